@@ -1,0 +1,31 @@
+import { z } from 'zod';
+import { calendarDateSchema, idSchema, requiredText } from './common';
+
+export const calibratedQuantities = ['reference-air-kerma', 'kerma-area-product'] as const;
+export const calibratedPlanes = ['single', 'A', 'B'] as const;
+
+/** True over displayed, for one plane of one machine, from a date on. Never edited: a newer row follows. */
+export const calibrationFactorSchema = z.object({
+  id: idSchema,
+  equipmentId: idSchema,
+  plane: z.enum(calibratedPlanes),
+  quantity: z.enum(calibratedQuantities),
+  factor: z.number(),
+  uncertaintyPercent: z.number().nullable(),
+  validFrom: calendarDateSchema,
+  source: z.string(),
+  enteredBy: z.string(),
+  enteredAt: z.string(),
+});
+export type CalibrationFactor = z.infer<typeof calibrationFactorSchema>;
+
+export const calibrationFactorInputSchema = z.object({
+  equipmentId: idSchema,
+  plane: z.enum(calibratedPlanes),
+  quantity: z.enum(calibratedQuantities),
+  factor: z.number().min(0.2, 'Between 0.2 and 5.').max(5, 'Between 0.2 and 5.'),
+  uncertaintyPercent: z.number().min(0).max(100).nullable(),
+  validFrom: calendarDateSchema,
+  source: requiredText(300),
+});
+export type CalibrationFactorInput = z.input<typeof calibrationFactorInputSchema>;
