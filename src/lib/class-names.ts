@@ -1,0 +1,3 @@
+/** Joins class names, leaving out what does not apply. */
+export const joinClassNames = (...names: (string | false | null | undefined)[]): string =>
+  names.filter(Boolean).join(' ');

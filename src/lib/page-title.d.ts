@@ -1,0 +1,2 @@
+/** Names the browser's tab and history entry after the page. */
+export declare function usePageTitle(title: string): void;
