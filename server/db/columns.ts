@@ -1,0 +1,22 @@
+/** Column types, spelled once: nothing depends on emitted decorator metadata. */
+export const uuid = { type: 'uuid' } as const;
+export const optionalUuid = { type: 'uuid', nullable: true } as const;
+export const text = { type: 'text' } as const;
+export const optionalText = { type: 'text', nullable: true } as const;
+export const texts = { type: 'text', array: true, default: () => "'{}'" } as const;
+export const yesNo = { type: 'boolean', default: false } as const;
+export const optionalYesNo = { type: 'boolean', nullable: true } as const;
+export const quantity = { type: 'double precision' } as const;
+export const optionalQuantity = { type: 'double precision', nullable: true } as const;
+export const quantities = { type: 'double precision', array: true, default: () => "'{}'" } as const;
+export const count = { type: 'integer', default: 0 } as const;
+export const optionalCount = { type: 'integer', nullable: true } as const;
+export const version = { type: 'integer', default: 1 } as const;
+export const moment = { type: 'timestamptz' } as const;
+export const optionalMoment = { type: 'timestamptz', nullable: true } as const;
+export const now = { type: 'timestamptz', default: () => 'now()' } as const;
+export const day = { type: 'date' } as const;
+export const optionalDay = { type: 'date', nullable: true } as const;
+export const document = { type: 'jsonb' } as const;
+export const optionalDocument = { type: 'jsonb', nullable: true } as const;
+export const documents = { type: 'jsonb', default: () => "'[]'" } as const;

@@ -1,0 +1,39 @@
+import { AuditEntry } from '../audit/audit-entry.entity';
+import { DoseReport } from '../dose-reports/dose-report.entity';
+import { OriginalFile } from '../dose-reports/original-file.entity';
+import { CalibrationFactor } from '../equipment/calibration-factor.entity';
+import { Equipment } from '../equipment/equipment.entity';
+import { Garment } from '../garments/garment.entity';
+import { Hospital } from '../hospital/hospital.entity';
+import { Level } from '../levels/level.entity';
+import { Account } from '../people/account.entity';
+import { Person } from '../people/person.entity';
+import { SignInLink } from '../people/sign-in-link.entity';
+import { IrradiationEvent } from '../procedures/irradiation-event.entity';
+import { PatientIdentity } from '../procedures/patient-identity.entity';
+import { Presence } from '../procedures/presence.entity';
+import { Procedure } from '../procedures/procedure.entity';
+import { ProcedureType } from '../procedure-types/procedure-type.entity';
+import { Room } from '../rooms/room.entity';
+import { StaffEstimate } from '../staff-exposure/staff-estimate.entity';
+
+export const entities = [
+  Hospital,
+  Person,
+  Account,
+  SignInLink,
+  Room,
+  Equipment,
+  CalibrationFactor,
+  ProcedureType,
+  Garment,
+  Level,
+  OriginalFile,
+  DoseReport,
+  PatientIdentity,
+  Procedure,
+  IrradiationEvent,
+  Presence,
+  StaffEstimate,
+  AuditEntry,
+];
