@@ -1,5 +1,11 @@
 import { defineConfig } from 'vitest/config';
 
+const needsDatabase = {
+  globalSetup: ['tests/global-setup.ts'],
+  // A slow machine makes a database in a second or two.
+  hookTimeout: 60_000,
+};
+
 export default defineConfig({
   test: {
     projects: [
@@ -10,8 +16,21 @@ export default defineConfig({
             'shared/**/*.test.ts',
             'server/**/*.test.ts',
             'src/**/*.test.{ts,tsx}',
+            'scripts/**/*.test.ts',
             'tests/reference/**/*.test.ts',
           ],
+          testTimeout: 30_000,
+        },
+      },
+      { test: { name: 'api', include: ['tests/api/**/*.test.ts'], testTimeout: 30_000, ...needsDatabase } },
+      {
+        test: {
+          name: 'browser',
+          include: ['tests/browser/**/*.test.ts'],
+          testTimeout: 120_000,
+          // One Chromium at a time: two cores serve the page, the database and the browser.
+          fileParallelism: false,
+          ...needsDatabase,
         },
       },
     ],
