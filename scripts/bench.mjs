@@ -1,0 +1,3 @@
+import { launch } from './launch.mjs';
+
+await launch('./run-bench.ts');
