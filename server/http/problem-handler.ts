@@ -1,0 +1,47 @@
+import type { ErrorRequestHandler, RequestHandler } from 'express';
+import { MulterError } from 'multer';
+import type { Problem as ProblemBody } from '../../shared/contract/problem';
+import { Problem } from '../kernel/problem';
+
+/** What libraries throw, in our own words. */
+function toProblem(error: unknown): Problem | null {
+  if (error instanceof Problem) return error;
+  if (error instanceof MulterError)
+    return error.code === 'LIMIT_FILE_SIZE'
+      ? new Problem(
+          'too-large',
+          'A file is larger than the limit; nothing of this request was kept. Send it alone or ask for a higher limit.',
+        )
+      : new Problem(
+          'malformed-request',
+          'The upload could not be read: send the files in the field "files".',
+        );
+  const { type, code } = error as { type?: string; code?: string };
+  if (type === 'entity.too.large') return new Problem('too-large');
+  if (type?.startsWith('entity.') || type === 'charset.unsupported') return new Problem('malformed-request');
+  if (code === 'ECONNREFUSED' || code === '57P01' || code === '57P03') return new Problem('unavailable');
+  return null;
+}
+
+export const handleProblem: ErrorRequestHandler = (error, request, response, next) => {
+  if (response.headersSent) return next(error);
+  const problem = toProblem(error);
+  if (!problem) request.log.error({ err: error }, 'unexpected error');
+  const shown =
+    problem ?? new Problem('unexpected', 'It was recorded under this request id; nothing was changed.');
+  const body: ProblemBody = {
+    type: `urn:leeward:problem:${shown.code}`,
+    title: shown.title,
+    status: shown.status,
+    code: shown.code,
+    detail: shown.detail,
+    requestId: String(request.id),
+    issues: shown.issues,
+    ...(shown.current === undefined ? {} : { current: shown.current }),
+  };
+  response.status(shown.status).type('application/problem+json').send(JSON.stringify(body));
+};
+
+export const handleUnknownRoute: RequestHandler = () => {
+  throw new Problem('not-found', 'No such address.');
+};
