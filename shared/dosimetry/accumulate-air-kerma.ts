@@ -2,13 +2,15 @@ import { bodyPoints, bodyPointZM, type BodyPoint } from './body-points';
 import { beamFlags, type EventBeams } from './event-beams';
 import type { Place } from './exposure-types';
 import { clamp } from './clamp';
+import { scatterModels, type ScatterModelId } from './scatter-air-kerma';
 import {
-  maxScatterAngleDeg,
-  minScatterAngleDeg,
-  scatterModels,
-  type ScatterModelId,
-} from './scatter-air-kerma';
-import { crossesDetector, crossesTable, isNearLongAxis, minDistanceM } from './scatter-geometry';
+  angleFromCosineDeg,
+  clampDistanceM,
+  clampScatterAngleDeg,
+  crossesDetector,
+  crossesTable,
+  isNearLongAxis,
+} from './scatter-geometry';
 
 /** From here on the scatter models are known better (back-scatter). Degrees. */
 const backScatterFromDeg = 105;
@@ -75,15 +77,24 @@ export function accumulateAirKerma(input: {
   const kerma = new Float64Array(bodyPoints.length * errorClassCount);
   const transmitted = new Float64Array(bodyPoints.length * errorClassCount);
   const waist = bodyPoints.indexOf('waist');
+  // Read once: the loop below runs for every event, person and body point.
+  const { acquisition, rotational } = beamFlags;
+  const [toAngleDeg, limitAngleDeg, limitDistanceM] = [
+    angleFromCosineDeg,
+    clampScatterAngleDeg,
+    clampDistanceM,
+  ];
+  const [isThroughDetector, backFromDeg] = [crossesDetector, backScatterFromDeg];
+  const classCount = errorClassCount;
   const closeEvents = new Set<number>();
   const steepEvents = new Set<number>();
 
   for (let row = 0; row < beams.count; row += 1) {
     const flags = beams.flags[row] ?? 0;
-    const isAcquisition = (flags & beamFlags.acquisition) !== 0;
+    const isAcquisition = (flags & acquisition) !== 0;
     const place = isAcquisition ? acquisitionPlace : fluoroscopyPlace;
     if (place.isBehindBarrier) continue;
-    if ((flags & beamFlags.rotational) !== 0 && !input.isPresentDuringRotation) continue;
+    if ((flags & rotational) !== 0 && !input.isPresentDuringRotation) continue;
     const rays = raysByPart[isAcquisition ? 1 : 0];
     const ux = beams.ux[row] ?? 0;
     const uy = beams.uy[row] ?? 0;
@@ -96,18 +107,18 @@ export function accumulateAirKerma(input: {
       const ray = rays[point] as Ray;
       const distanceM = ray.distanceM;
       const cosine = distanceM === 0 ? 0 : (ux * ray.x + uy * ray.y + uz * ray.z) / distanceM;
-      const rawThetaDeg = (Math.acos(clamp(cosine, -1, 1)) * 180) / Math.PI;
-      const thetaDeg = clamp(rawThetaDeg, minScatterAngleDeg, maxScatterAngleDeg);
+      const rawThetaDeg = toAngleDeg(cosine);
+      const thetaDeg = limitAngleDeg(rawThetaDeg);
       if (thetaDeg !== rawThetaDeg) steepEvents.add(event);
-      if (distanceM < minDistanceM) closeEvents.add(event);
-      const usedDistanceM = Math.max(distanceM, minDistanceM);
+      const usedDistanceM = limitDistanceM(distanceM);
+      if (usedDistanceM !== distanceM) closeEvents.add(event);
       const airKermaUGy =
         (scatterUGyPerGyCm2(thetaDeg, kvp) * kermaAreaProduct) / (usedDistanceM * usedDistanceM);
       const regime =
-        (thetaDeg >= backScatterFromDeg ? 1 : 0) |
+        (thetaDeg >= backFromDeg ? 1 : 0) |
         (ray.isAxial && thetaDeg >= 60 && thetaDeg <= 100 ? 2 : 0) |
-        (ray.isThroughTable || crossesDetector(rawThetaDeg) ? 4 : 0);
-      const slot = point * errorClassCount + ((flags & 15) | (regime << 4));
+        (ray.isThroughTable || isThroughDetector(rawThetaDeg) ? 4 : 0);
+      const slot = point * classCount + ((flags & 15) | (regime << 4));
       kerma[slot] = (kerma[slot] ?? 0) + airKermaUGy;
       if (point === waist && transmission) {
         transmitted[slot] = (transmitted[slot] ?? 0) + airKermaUGy * (transmission[row] ?? 1);

@@ -20,7 +20,7 @@ import {
 } from './exposure-types';
 import { personSpreads } from './person-spreads';
 import { defaultScatterModel, scatterModels } from './scatter-air-kerma';
-import { garmentColumn, protectionOf } from './worn-protection';
+import { createGarmentColumns, protectionOf } from './worn-protection';
 
 export type * from './exposure-types';
 export { sumExposures } from './sum-exposures';
@@ -57,13 +57,19 @@ export function estimateStaffExposures(
 ): StaffExposureEstimate[] {
   const beams = prepareEventBeams(events, context);
   const warnings = eventWarnings(events, context, context.scatterModel ?? defaultScatterModel);
-  return persons.map((person) => estimateOne(events, beams, warnings, person, context, options));
+  const columns = createGarmentColumns(beams);
+  return persons.map((person) => estimateOne({ events, beams, columns, warnings }, person, context, options));
 }
 
+type SharedByPersons = {
+  events: readonly ExposureEvent[];
+  beams: EventBeams;
+  columns: ReturnType<typeof createGarmentColumns>;
+  warnings: readonly Note[];
+};
+
 function estimateOne(
-  events: readonly ExposureEvent[],
-  beams: EventBeams,
-  sharedWarnings: readonly Note[],
+  { events, beams, columns, warnings }: SharedByPersons,
   person: ExposedPerson,
   context: ExposureContext,
   { draws = 0, seed = 1 }: EstimateOptions,
@@ -79,7 +85,7 @@ function estimateOne(
     statureM,
     isPresentDuringRotation: person.isPresentDuringRotation,
     scatterModel,
-    transmission: leadMm === null ? null : garmentColumn(beams, leadMm, person.garment),
+    transmission: leadMm === null ? null : columns(leadMm, person.garment),
   });
   const model: ExposureModel = {
     sums: accumulated.sums,
@@ -119,7 +125,7 @@ function estimateOne(
     spreads,
     gaps: exposureGaps(events, person, isUnprotectedBack),
     warnings: [
-      ...sharedWarnings,
+      ...warnings,
       ...personWarnings(events, person, context, usedFormula),
       ...clampWarnings(accumulated),
     ],

@@ -1,13 +1,14 @@
 import { regimeCount, regimeOf } from './accumulate-air-kerma';
-import { bodyPoints } from './body-points';
-import { inputIndex, scatterSpread, screenInputs, type EstimateInput } from './estimate-inputs';
+import { bodyPoints, type BodyPoint } from './body-points';
+import { createFactors, type FactorSlot } from './draw-factors';
+import { scatterSpread, screenInputs, type EstimateInput } from './estimate-inputs';
 import { beamFlags } from './event-beams';
 import type { ExposureModel } from './exposure-model';
 import { estimatedQuantities } from './exposure-types';
 import { defectiveTransmission } from './garment-transmission';
 import { conversionFactors } from './personal-quantities';
-import { isBehindScreen, screenFactors, screenProductFloor } from './screen-factors';
-import { factorAt, noSpread, type Spread } from './spread';
+import { isBehindScreen, limitScreenProduct, screenFactors } from './screen-factors';
+import { noSpread, type Spread } from './spread';
 
 /** Values of all quantities in the order of `estimatedQuantities`. */
 export type QuantityValues = Float64Array;
@@ -16,117 +17,138 @@ export const quantityIndex = Object.fromEntries(
   estimatedQuantities.map((quantity, index) => [quantity, index]),
 ) as Record<(typeof estimatedQuantities)[number], number>;
 
-const scatterSpreads = Array.from({ length: regimeCount }, (_, regime) => scatterSpread(regime));
-const [eye, collar, chest, waist, lowerLeg] = (['eye', 'collar', 'chest', 'waist', 'lowerLeg'] as const).map(
-  (point) => bodyPoints.indexOf(point),
-) as [number, number, number, number, number];
-
-function conversionSpread({ factor, low, high }: { factor: number; low: number; high: number }): Spread {
-  return { low: low / factor, high: high / factor };
-}
-const hp10Spread = conversionSpread(conversionFactors.hp10);
-const hp3Spread = conversionSpread(conversionFactors.hp3);
-const behindLeadSpread = conversionSpread(conversionFactors.hp10BehindLead);
-const unprotectedSpread = conversionSpread(conversionFactors.effectiveUnprotected);
-
-/** Parts of an exposure: 0 fluoroscopy, 1 acquisition; left out: both together. */
+/** Parts of an exposure: 0 fluoroscopy, 1 acquisition. */
 export type Part = 0 | 1;
 
+type RelativeRange = { factor: number; low: number; high: number };
+const spreadOf = ({ factor, low, high }: RelativeRange): Spread => ({
+  low: low / factor,
+  high: high / factor,
+});
+
+/** Collects the slots of an evaluation; each `add` answers where its factor will stand. */
+function collectSlots() {
+  const slots: FactorSlot[] = [];
+  const add = (input: EstimateInput, spread: Spread | undefined) =>
+    slots.push({ input, spread: spread ?? noSpread }) - 1;
+  return { slots, add };
+}
+
 /**
- * The function that gives all quantities of one exposure for inputs standing z standard deviations
- * off their nominal value. All z = 0 is the deterministic estimate. Quantities that cannot be
- * estimated come out as NaN.
+ * The function that gives all quantities of one exposure (or one part of it) for inputs standing z
+ * standard deviations off their nominal value, z in the order of `estimateInputs`. All z = 0 is the
+ * deterministic estimate. Quantities that cannot be estimated come out as NaN.
  */
 export function createEvaluator(model: ExposureModel, part?: Part) {
-  const sums = model.sums.filter(
-    ({ errorClass }) => part === undefined || (errorClass & beamFlags.acquisition) === part,
+  const { slots, add } = collectSlots();
+  const { spreads, defectAreaFraction, effectiveDoseWeights, protection } = model;
+  const kapDisplay = add('kap-display', spreads['kap-display']);
+  const kapCalibration = add('kap-calibration', spreads['kap-calibration']);
+  const angles = add('positioner-angles', spreads['positioner-angles']);
+  const kvp = add('tube-voltage', spreads['tube-voltage']);
+  const kvpTransmission = add('tube-voltage', model.kvpTransmissionSpread);
+  const places = model.positionSpreads.map((spread) => add('position', spread));
+  const regimes = Array.from({ length: regimeCount }, (_, regime) =>
+    add('scatter-model', scatterSpread(regime)),
   );
-  const pointOf = Uint8Array.from(sums, ({ point }) => bodyPoints.indexOf(point));
-  const screensAt = bodyPoints.map((point) =>
-    model.screens.filter((screen) => isBehindScreen(screen, point, model.statureM)),
-  );
+  const garment = (
+    ['garment-transmission', 'lead-equivalence', 'garment-condition', 'lead-free-material'] as const
+  ).map((input) => add(input, spreads[input]));
+  const hp10 = add('quantity-conversion', spreadOf(conversionFactors.hp10));
+  const hp3 = add('quantity-conversion', spreadOf(conversionFactors.hp3));
+  const behindLead = add('quantity-conversion', spreadOf(conversionFactors.hp10BehindLead));
+  const unprotected = add('quantity-conversion', spreadOf(conversionFactors.effectiveUnprotected));
+  const formula = add('effective-dose-formula', spreads['effective-dose-formula']);
+  const screenSlots = model.screens.map((screen) => ({
+    screen,
+    factor: screenFactors[screen].factor,
+    slot: add(screenInputs[screen], spreadOf(screenFactors[screen])),
+  }));
+
+  const fillFactors = createFactors(slots);
+  const factors = new Float64Array(slots.length);
+  const f = (slot: number) => factors[slot] as number;
+
+  const sums = model.sums
+    .filter(({ errorClass }) => part === undefined || (errorClass & beamFlags.acquisition) === part)
+    .map(({ point, errorClass, airKermaUGy, transmittedUGy }) => ({
+      point: bodyPoints.indexOf(point),
+      isWaist: point === 'waist',
+      airKermaUGy,
+      soundTransmission: transmittedUGy / airKermaUGy,
+      kap: (errorClass & beamFlags.calibrated) !== 0 ? kapCalibration : kapDisplay,
+      isAngleMissing: (errorClass & beamFlags.anglesMissing) !== 0,
+      isKvpMissing: (errorClass & beamFlags.kvpMissing) !== 0,
+      place: places[errorClass & beamFlags.acquisition] as number,
+      regime: regimes[regimeOf(errorClass)] as number,
+    }));
   const airKerma = new Float64Array(bodyPoints.length);
-  const regimeFactors = new Float64Array(regimeCount);
-  const defects = model.defectAreaFraction;
-  const weights = model.effectiveDoseWeights;
+  const pointIndex = (point: BodyPoint) => bodyPoints.indexOf(point);
+  const [eye, collar, chest, waist, lowerLeg] = [
+    pointIndex('eye'),
+    pointIndex('collar'),
+    pointIndex('chest'),
+    pointIndex('waist'),
+    pointIndex('lowerLeg'),
+  ];
+  const screensAt = bodyPoints.map((point) =>
+    screenSlots.filter(({ screen }) => isBehindScreen(screen, point, model.statureM)),
+  );
+  const behindScreens = (point: number) => {
+    let product = 1;
+    for (const { factor, slot } of screensAt[point] as (typeof screensAt)[number])
+      product *= factor * f(slot);
+    return limitScreenProduct(product);
+  };
+  const conversion = {
+    hp10: conversionFactors.hp10.factor,
+    hp3: conversionFactors.hp3.factor,
+    behindLead: conversionFactors.hp10BehindLead.factor,
+    unprotected: conversionFactors.effectiveUnprotected.factor,
+  };
+  const at = { ...quantityIndex };
 
   return function evaluate(z: Float64Array, out: QuantityValues): void {
-    const zOf = (input: EstimateInput) => z[inputIndex[input]] ?? 0;
-    const factorOf = (input: EstimateInput) => factorAt(model.spreads[input] ?? noSpread, zOf(input));
-
-    const displayed = factorOf('kap-display');
-    const calibrated = factorOf('kap-calibration');
-    const angles = factorOf('positioner-angles');
-    const kvp = factorOf('tube-voltage');
-    const kvpTransmission = factorAt(model.kvpTransmissionSpread, zOf('tube-voltage'));
-    const fluoroscopyPlace = factorAt(model.positionSpreads[0], zOf('position'));
-    const acquisitionPlace = factorAt(model.positionSpreads[1], zOf('position'));
-    for (let regime = 0; regime < regimeCount; regime += 1) {
-      regimeFactors[regime] = factorAt(scatterSpreads[regime] ?? noSpread, zOf('scatter-model'));
-    }
-    const garment =
-      factorOf('garment-transmission') *
-      factorOf('lead-equivalence') *
-      factorOf('garment-condition') *
-      factorOf('lead-free-material');
-
+    fillFactors(z, factors);
+    const garmentFactor = garment.reduce((product, slot) => product * f(slot), 1);
     airKerma.fill(0);
     let transmitted = 0;
-    for (let index = 0; index < sums.length; index += 1) {
-      const { errorClass, airKermaUGy, transmittedUGy } = sums[index] as (typeof sums)[number];
-      const point = pointOf[index] ?? 0;
-      const isKvpMissing = (errorClass & beamFlags.kvpMissing) !== 0;
-      const factor =
-        ((errorClass & beamFlags.calibrated) !== 0 ? calibrated : displayed) *
-        ((errorClass & beamFlags.anglesMissing) !== 0 ? angles : 1) *
-        (isKvpMissing ? kvp : 1) *
-        ((errorClass & beamFlags.acquisition) !== 0 ? acquisitionPlace : fluoroscopyPlace) *
-        (regimeFactors[regimeOf(errorClass)] ?? 1);
-      airKerma[point] = (airKerma[point] ?? 0) + factor * airKermaUGy;
-      if (point === waist) {
-        const sound = (transmittedUGy / airKermaUGy) * garment * (isKvpMissing ? kvpTransmission : 1);
-        transmitted += factor * airKermaUGy * defectiveTransmission(Math.min(1, sound), defects);
+    for (const sum of sums) {
+      const value =
+        sum.airKermaUGy *
+        f(sum.kap) *
+        (sum.isAngleMissing ? f(angles) : 1) *
+        (sum.isKvpMissing ? f(kvp) : 1) *
+        f(sum.place) *
+        f(sum.regime);
+      airKerma[sum.point] = (airKerma[sum.point] as number) + value;
+      if (sum.isWaist) {
+        const sound = sum.soundTransmission * garmentFactor * (sum.isKvpMissing ? f(kvpTransmission) : 1);
+        transmitted += value * defectiveTransmission(Math.min(1, sound), defectAreaFraction);
       }
     }
+    const atEye = airKerma[eye] as number;
+    const atCollar = airKerma[collar] as number;
+    const atChest = airKerma[chest] as number;
+    const atLowerLeg = airKerma[lowerLeg] as number;
+    const collarHp10 = conversion.hp10 * f(hp10) * atCollar * behindScreens(collar);
+    const underGarment = conversion.behindLead * f(behindLead) * transmitted * behindScreens(waist);
 
-    const at = (point: number) => airKerma[point] ?? 0;
-    const behindScreens = (point: number) => {
-      let product = 1;
-      for (const screen of screensAt[point] ?? []) {
-        const { factor, low, high } = screenFactors[screen];
-        const spread = { low: low / factor, high: high / factor };
-        product *= factor * factorAt(spread, zOf(screenInputs[screen]));
-      }
-      return Math.max(screenProductFloor, product);
-    };
-    const conversion = (spread: Spread) => factorAt(spread, zOf('quantity-conversion'));
-    const hp3 = conversionFactors.hp3.factor * conversion(hp3Spread);
-    const collarHp10 =
-      conversionFactors.hp10.factor * conversion(hp10Spread) * at(collar) * behindScreens(collar);
-    const underGarment =
-      conversionFactors.hp10BehindLead.factor *
-      conversion(behindLeadSpread) *
-      transmitted *
-      behindScreens(waist);
-
-    out[quantityIndex.eyeAirKermaUGy] = at(eye);
-    out[quantityIndex.collarAirKermaUGy] = at(collar);
-    out[quantityIndex.chestAirKermaUGy] = at(chest);
-    out[quantityIndex.waistAirKermaUGy] = at(waist);
-    out[quantityIndex.lowerLegAirKermaUGy] = at(lowerLeg);
-    out[quantityIndex.collarHp10USv] = collarHp10;
-    out[quantityIndex.eyeHp3USv] = hp3 * at(eye) * behindScreens(eye);
-    out[quantityIndex.lowerLegHp007USv] = hp3 * at(lowerLeg) * behindScreens(lowerLeg);
-    out[quantityIndex.underGarmentHp10USv] = model.protection === 'garment' ? underGarment : Number.NaN;
-    out[quantityIndex.effectiveDoseUSv] =
-      model.protection === 'garment'
-        ? (weights.underGarment * underGarment + weights.collar * collarHp10) *
-          factorOf('effective-dose-formula')
-        : model.protection === 'unprotected'
-          ? conversionFactors.effectiveUnprotected.factor *
-            conversion(unprotectedSpread) *
-            at(chest) *
-            behindScreens(chest)
-          : Number.NaN;
+    out[at.eyeAirKermaUGy] = atEye;
+    out[at.collarAirKermaUGy] = atCollar;
+    out[at.chestAirKermaUGy] = atChest;
+    out[at.waistAirKermaUGy] = airKerma[waist] as number;
+    out[at.lowerLegAirKermaUGy] = atLowerLeg;
+    out[at.collarHp10USv] = collarHp10;
+    out[at.eyeHp3USv] = conversion.hp3 * f(hp3) * atEye * behindScreens(eye);
+    out[at.lowerLegHp007USv] = conversion.hp3 * f(hp3) * atLowerLeg * behindScreens(lowerLeg);
+    out[at.underGarmentHp10USv] = protection === 'garment' ? underGarment : Number.NaN;
+    out[at.effectiveDoseUSv] = Number.NaN;
+    if (protection === 'garment') {
+      const { underGarment: u, collar: c } = effectiveDoseWeights;
+      out[at.effectiveDoseUSv] = (u * underGarment + c * collarHp10) * f(formula);
+    } else if (protection === 'unprotected') {
+      out[at.effectiveDoseUSv] = conversion.unprotected * f(unprotected) * atChest * behindScreens(chest);
+    }
   };
 }

@@ -22,7 +22,12 @@ const detectorHalfAngleDeg = (Math.atan(0.2 / 0.3) * 180) / Math.PI;
  */
 export function scatterAngleDeg([ux, uy, uz]: Vector, [x, y, z]: Vector): number {
   const distanceM = Math.hypot(x, y, z);
-  return (Math.acos(clamp((ux * x + uy * y + uz * z) / distanceM, -1, 1)) * 180) / Math.PI;
+  return angleFromCosineDeg((ux * x + uy * y + uz * z) / distanceM);
+}
+
+/** The angle in degrees whose cosine this is; rounding beyond ±1 is forgiven. 0 → 90. */
+export function angleFromCosineDeg(cosine: number): number {
+  return (Math.acos(Math.min(1, Math.max(-1, cosine))) * 180) / Math.PI;
 }
 
 /** The angle kept to 30–165°, where the scatter models hold. 10 → 30. */

@@ -32,13 +32,17 @@ export function isBehindScreen(screen: Screen, point: BodyPoint, statureM: numbe
   return point === 'waist' && bodyPointZM('waist', statureM) < -tableTopBelowIsocentreM;
 }
 
-/**
- * The product of the factors of the screens before a point, never below 0.02.
- *
- * Known value: ceiling screen 0.35 and glasses 0.5: 0.175; with a mobile screen 0.1: 0.02.
- */
-export function multiplyScreens(factors: Iterable<number>): number {
-  let product = 1;
-  for (const factor of factors) product *= factor;
+/** A product of screen factors, never below 0.02. 0.0175 → 0.02. */
+export function limitScreenProduct(product: number): number {
   return Math.max(screenProductFloor, product);
+}
+
+/**
+ * The transmission factor of the screens before a body point: their product, never below 0.02.
+ *
+ * Known value: ceiling screen 0.35 and glasses 0.5 at the eye: 0.175; with a mobile screen 0.1: 0.02.
+ */
+export function screenFactorAt(worn: readonly Screen[], point: BodyPoint, statureM: number): number {
+  const before = worn.filter((screen) => isBehindScreen(screen, point, statureM));
+  return limitScreenProduct(before.reduce((product, screen) => product * screenFactors[screen].factor, 1));
 }

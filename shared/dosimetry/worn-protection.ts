@@ -28,24 +28,25 @@ export function protectionOf(person: ExposedPerson): {
   };
 }
 
-/** The sound garment's transmission for each row of the beams. Equal kVp and copper are read once. */
-export function garmentColumn(
-  beams: EventBeams,
-  leadMm: number,
-  garment: ExposedPerson['garment'],
-): Float64Array {
-  const isLeadFree = garment.answer === 'worn' && garment.isLeadFree;
-  const column = new Float64Array(beams.count);
-  let [lastKvp, lastCopper, lastTransmission] = [Number.NaN, Number.NaN, 1];
-  for (let row = 0; row < beams.count; row += 1) {
-    const kvp = beams.kvp[row] ?? 0;
+/**
+ * Gives the sound garment's transmission for each row of the beams, reading each lead thickness and
+ * material once however many persons wear it.
+ */
+export function createGarmentColumns(beams: EventBeams) {
+  const known = new Map<string, Float64Array>();
+  return (leadMm: number, garment: ExposedPerson['garment']): Float64Array => {
+    const isLeadFree = garment.answer === 'worn' && garment.isLeadFree;
+    const key = `${leadMm} ${isLeadFree}`;
+    const column = known.get(key) ?? garmentColumn(beams, leadMm, isLeadFree);
+    known.set(key, column);
+    return column;
+  };
+}
+
+function garmentColumn(beams: EventBeams, leadMm: number, isLeadFree: boolean): Float64Array {
+  return Float64Array.from({ length: beams.count }, (_, row) => {
     const copper = beams.copperMm[row] ?? Number.NaN;
-    if (kvp !== lastKvp || !Object.is(copper, lastCopper)) {
-      const copperMm = Number.isNaN(copper) ? null : copper;
-      lastTransmission = garmentTransmission({ kvp, copperMm, leadMm, isLeadFree });
-      [lastKvp, lastCopper] = [kvp, copper];
-    }
-    column[row] = lastTransmission;
-  }
-  return column;
+    const copperMm = Number.isNaN(copper) ? null : copper;
+    return garmentTransmission({ kvp: beams.kvp[row] ?? 0, copperMm, leadMm, isLeadFree });
+  });
 }
