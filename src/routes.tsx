@@ -1,0 +1,54 @@
+import { createBrowserRouter, redirect, type LoaderFunctionArgs, type RouteObject } from 'react-router-dom';
+import { sessionQueries } from './features/session/queries';
+import { Frame } from './frame/frame';
+import { NotFound } from './frame/not-found';
+import { RouteError } from './frame/route-error';
+import { Waiting } from './frame/waiting';
+import { queryClient } from './lib/query-client';
+import { buildSignInPath, paths } from './paths';
+
+/** The URL map of what stands behind the sign-in. A page is loaded when it is opened. */
+const pages: RouteObject[] = [
+  { path: paths.home, lazy: () => import('./pages/home') },
+  { path: '*', Component: NotFound },
+];
+
+async function requirePerson({ request }: LoaderFunctionArgs): Promise<null> {
+  const { user } = await queryClient.ensureQueryData({
+    ...sessionQueries.current(),
+    revalidateIfStale: true,
+  });
+  if (user) return null;
+  const { pathname, search } = new URL(request.url);
+  throw redirect(buildSignInPath(pathname + search));
+}
+
+/** At the sign-in page nothing of the person before may remain. */
+async function fetchSession(): Promise<null> {
+  queryClient.clear();
+  await queryClient.ensureQueryData(sessionQueries.current());
+  return null;
+}
+
+export const createRouter = () =>
+  createBrowserRouter([
+    {
+      errorElement: <RouteError />,
+      hydrateFallbackElement: <Waiting />,
+      children: [
+        { path: paths.signIn, loader: fetchSession, lazy: () => import('./pages/sign-in') },
+        {
+          path: paths.signInLink(':token'),
+          loader: fetchSession,
+          lazy: () => import('./pages/welcome'),
+        },
+        {
+          loader: requirePerson,
+          // The session may have ended since: every change of page asks the cache again.
+          shouldRevalidate: () => true,
+          Component: Frame,
+          children: [{ errorElement: <RouteError />, children: pages }],
+        },
+      ],
+    },
+  ]);
