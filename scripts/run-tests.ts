@@ -3,7 +3,7 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { buildClient } from './build-client';
-import { countTestsInFile, formatCounts } from './count-tests';
+import { countTestsInFile, formatCounts, type TestCounts } from './count-tests';
 import { startCluster } from './database-cluster/start-cluster';
 import { runCommand } from './run-command';
 import type { Stopper } from './stopper';
@@ -47,17 +47,17 @@ async function runTests(stopper: Stopper, reportFile: string): Promise<number> {
 
 await runCommand(async (stopper) => {
   const folder = mkdtempSync(join(tmpdir(), 'leeward-test-report-'));
+  stopper.add(async () => rmSync(folder, { recursive: true, force: true }));
   const reportFile = join(folder, 'report.json');
-  let code = 1;
+  let counts: TestCounts = { passed: 0, failed: 0, skipped: 0 };
+  let code: number;
   try {
     code = await runTests(stopper, reportFile);
+    counts = countTestsInFile(reportFile);
   } finally {
-    const counts = countTestsInFile(reportFile);
-    rmSync(folder, { recursive: true, force: true });
     await stopper.stop();
     // Nothing is written behind this line.
     console.log(formatCounts(counts));
-    process.exitCode = code || (counts.failed > 0 || counts.passed === 0 ? 1 : 0);
   }
-  process.exit();
-});
+  process.exit(code || (counts.failed > 0 || counts.passed === 0 ? 1 : 0));
+}, 130);

@@ -71,4 +71,4 @@ async function serve(stopper: Stopper): Promise<void> {
   if (demoPassword) report(describeDemoAccounts(demoPassword));
 }
 
-await runCommand(serve);
+await runCommand(serve, 0);

@@ -10,7 +10,10 @@ export class Stopper {
   private stopping: Promise<void> | null = null;
   private firstSignalMs = 0;
 
-  constructor(private readonly report: (line: string) => void) {
+  constructor(
+    private readonly report: (line: string) => void,
+    private readonly exitCodeWhenTold: number,
+  ) {
     for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP'] as const) {
       process.on(signal, () => this.takeSignal());
     }
@@ -42,6 +45,6 @@ export class Stopper {
     }
     this.firstSignalMs = Date.now();
     this.report('Stopping (once more to end at once)');
-    void this.stop().then(() => process.exit(0));
+    void this.stop().then(() => process.exit(this.exitCodeWhenTold));
   }
 }
