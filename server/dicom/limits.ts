@@ -1,0 +1,11 @@
+/**
+ * Limits in place of crashes. A report of 3,000 events holds about 540,000 items at a depth of about 10, so each
+ * limit leaves room for any sensible report and stops what would exhaust memory or the call stack.
+ */
+export const limits = {
+  /** dicom-parser descends by recursion and overflows at a depth of about 2,000. */
+  depth: 64,
+  items: 1_000_000,
+  inflatedBytes: 64 * 1024 * 1024,
+  textBytes: 1024 * 1024,
+} as const;

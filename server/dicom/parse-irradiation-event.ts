@@ -1,0 +1,88 @@
+import type { ReportEvent } from '../../shared/contract/report-event';
+import { eventTypeOf, fluoroModeOf, planeOf } from './coded-values';
+import type { ContentItem } from './content-tree';
+import { parseDateTime } from './date-time';
+import { ItemIndex } from './item-index';
+import { parseFilter } from './parse-filter';
+import { readDevices, readPersons } from './participants';
+import { eventQuantities, eventQuantityLists } from './quantity-fields.table-data';
+import { readQuantityFields, readQuantityLists } from './read-quantity-fields';
+import { meanOf, type Reported } from './read-quantity';
+import type { WarningCollector } from './warning-collector';
+import { warnOfMissingEventValues } from './missing-event-values';
+
+function readStart(index: ItemIndex, defaultOffset: string | null, warnings: WarningCollector) {
+  const text = index.text('startedAt');
+  if (text === null) return null;
+  const parsed = parseDateTime(text, defaultOffset);
+  if (!parsed) warnings.add('date-time-unreadable', `startedAt ${JSON.stringify(text.slice(0, 40))}`);
+  if (parsed?.isImprecise) warnings.add('date-time-imprecise', 'startedAt');
+  return parsed;
+}
+
+function readCodes(index: ItemIndex, warnings: WarningCollector) {
+  const planeCode = index.code('acquisitionPlane');
+  const plane = planeOf(planeCode);
+  const typeCode = index.code('eventType');
+  const type = eventTypeOf(typeCode);
+  if (planeCode && !plane) warnings.add('plane-unknown', JSON.stringify(planeCode.meaning));
+  if (typeCode && !type) warnings.add('event-type-unknown', JSON.stringify(typeCode.meaning));
+  return {
+    plane,
+    planeCode,
+    type,
+    typeCode,
+    fluoroMode: fluoroModeOf(index.code('fluoroMode')),
+    anatomy: index.code('anatomy'),
+    laterality: index.below('anatomy')?.code('laterality') ?? index.code('laterality'),
+    targetRegion: index.code('targetRegion'),
+    imageView: index.code('imageView'),
+    projectionName: index.code('projectionName'),
+    patientTableRelationship: index.code('patientTableRelationship'),
+    patientOrientation: index.code('patientOrientation'),
+    patientOrientationModifier:
+      index.below('patientOrientation')?.code('patientOrientationModifier') ??
+      index.code('patientOrientationModifier'),
+    anodeMaterial: index.code('anodeTargetMaterial'),
+    mechanicalConfiguration: index.code('mechanicalConfiguration'),
+    grids: (index.all('grid') ?? []).flatMap((item) => (item.code ? [item.code] : [])),
+  };
+}
+
+/**
+ * One irradiation event of one plane (TID 10003 with 10003A–C) in canonical units. `kvpMean`, `tubeCurrentMa` and
+ * `pulseWidthMs` are plain means of the values given; the tube current falls back to the average that the device
+ * states (113767). What is absent is null, with a warning where the event should have it.
+ */
+export function parseIrradiationEvent(
+  item: ContentItem,
+  defaultOffset: string | null,
+  warnings: WarningCollector,
+): ReportEvent {
+  const index = new ItemIndex(item);
+  const reported: Reported = {};
+  const start = readStart(index, defaultOffset, warnings);
+  const quantities = readQuantityFields(index, eventQuantities, reported, warnings);
+  const lists = readQuantityLists(index, eventQuantityLists, reported, warnings);
+  const event: ReportEvent = {
+    irradiationEventUid: index.text('irradiationEventUid'),
+    startedAt: start?.text ?? null,
+    utcOffset: start?.utcOffset ?? null,
+    protocol: index.text('protocol'),
+    label: index.text('eventLabel'),
+    comment: index.text('comment'),
+    ...readCodes(index, warnings),
+    ...quantities,
+    ...lists,
+    kvpMean: meanOf(lists.kvpValues),
+    tubeCurrentMa: meanOf(lists.tubeCurrentValuesMa) ?? quantities.averageTubeCurrentMa,
+    pulseWidthMs: meanOf(lists.pulseWidthValuesMs),
+    filters: (index.all('filters') ?? []).map((filter) => parseFilter(filter, reported, warnings)),
+    referencePointDefinition: index.referencePoint(),
+    persons: readPersons(index.all('personName')),
+    devices: readDevices(index.all('deviceRole')),
+    reported,
+  };
+  warnOfMissingEventValues(event, warnings);
+  return event;
+}

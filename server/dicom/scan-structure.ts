@@ -1,0 +1,197 @@
+import { classifySopClass } from './classify-sop-class';
+import type { ElementEncoding } from './encoding';
+import { limits } from './limits';
+import { ReadFailure } from './read-failure';
+
+const UNDEFINED_LENGTH = 0xffffffff;
+const ITEM = 0xfffee000;
+const ITEM_END = 0xfffee00d;
+const SEQUENCE_END = 0xfffee0dd;
+const CONTENT_SEQUENCE = 0x0040a730;
+const SOP_CLASS_UID = 0x00080016;
+const PIXEL_DATA = 0x7fe00010;
+const SQ = 0x5351;
+const UN = 0x554e;
+
+/** Value representations with a four-byte length, two letters in one number; the set that dicom-parser knows. */
+const longForm = new Set(
+  ['OB', 'OD', 'OL', 'OW', 'SQ', 'OF', 'UC', 'UR', 'UT', 'UN'].map(
+    (vr) => (vr.charCodeAt(0) << 8) | vr.charCodeAt(1),
+  ),
+);
+
+interface Frame {
+  isSequence: boolean;
+  isExplicit: boolean;
+  hasUndefinedLength: boolean;
+  /** Nothing inside may pass this byte: its own end, or the outer one while its length is undefined. */
+  bound: number;
+  lastTag: number;
+}
+
+function isTypeLetters(vr: number): boolean {
+  const first = vr >>> 8;
+  const second = vr & 0xff;
+  return first >= 0x41 && first <= 0x5a && second >= 0x41 && second <= 0x5a;
+}
+
+/** One walk over a data set; see `scanStructure`. */
+class StructureScan {
+  private readonly view: DataView;
+  private readonly littleEndian: boolean;
+  private readonly stack: Frame[] = [];
+  private frame: Frame;
+  private position = 0;
+  private itemCount = 0;
+
+  constructor(
+    private readonly bytes: Buffer,
+    encoding: ElementEncoding,
+  ) {
+    this.view = new DataView(bytes.buffer, bytes.byteOffset, bytes.length);
+    this.littleEndian = !encoding.isBigEndian;
+    this.frame = {
+      isSequence: false,
+      isExplicit: encoding.isExplicit,
+      hasUndefinedLength: false,
+      bound: bytes.length,
+      lastTag: 0,
+    };
+    this.stack.push(this.frame);
+  }
+
+  run(): void {
+    while (true) {
+      if (!this.frame.hasUndefinedLength && this.position === this.frame.bound) {
+        if (this.stack.length === 1) return;
+        this.close();
+      } else if (this.frame.isSequence) {
+        this.readItemTag();
+      } else {
+        this.readElement();
+      }
+    }
+  }
+
+  private malformed(detail: string): ReadFailure {
+    return new ReadFailure('malformed', `${detail} at byte ${this.position}`);
+  }
+
+  /** The next bytes must lie in the file and in what is open. */
+  private require(byteCount: number): void {
+    const end = this.position + byteCount;
+    if (end > this.bytes.length)
+      throw new ReadFailure('truncated', `ends early, after byte ${this.position}`);
+    if (end > this.frame.bound) throw this.malformed('an inner length passes the outer one');
+  }
+
+  private readTag(): number {
+    const group = this.view.getUint16(this.position, this.littleEndian);
+    return ((group << 16) | this.view.getUint16(this.position + 2, this.littleEndian)) >>> 0;
+  }
+
+  private open(isSequence: boolean, isExplicit: boolean, length: number): void {
+    const hasUndefinedLength = length === UNDEFINED_LENGTH;
+    if (!hasUndefinedLength) this.require(length);
+    const bound = hasUndefinedLength ? this.frame.bound : this.position + length;
+    this.frame = { isSequence, isExplicit, hasUndefinedLength, bound, lastTag: 0 };
+    this.stack.push(this.frame);
+    if (this.stack.length > limits.depth * 2) {
+      throw new ReadFailure('limit-depth', `more than ${limits.depth} levels of sequences`);
+    }
+  }
+
+  private close(): void {
+    this.stack.pop();
+    this.frame = this.stack[this.stack.length - 1] as Frame;
+  }
+
+  private readItemTag(): void {
+    this.require(8);
+    const tag = this.readTag();
+    const length = this.view.getUint32(this.position + 4, this.littleEndian);
+    if (tag === ITEM) {
+      this.itemCount += 1;
+      if (this.itemCount > limits.items)
+        throw new ReadFailure('limit-items', `more than ${limits.items} items`);
+      this.position += 8;
+      this.open(false, this.frame.isExplicit, length);
+    } else if (tag === SEQUENCE_END && this.frame.hasUndefinedLength) {
+      this.position += 8;
+      this.close();
+    } else {
+      throw this.malformed('a sequence holds something else than items');
+    }
+  }
+
+  private readElement(): void {
+    this.require(8);
+    const tag = this.readTag();
+    if (tag === ITEM_END && this.frame.hasUndefinedLength) {
+      this.position += 8;
+      this.close();
+      return;
+    }
+    this.checkOrder(tag);
+    let type = 0;
+    let length: number;
+    if (this.frame.isExplicit) {
+      type = this.view.getUint16(this.position + 4, false);
+      if (!isTypeLetters(type)) throw this.malformed('an element has no type');
+      const isLong = longForm.has(type);
+      this.require(isLong ? 12 : 8);
+      length = isLong
+        ? this.view.getUint32(this.position + 8, this.littleEndian)
+        : this.view.getUint16(this.position + 6, this.littleEndian);
+      this.position += isLong ? 12 : 8;
+    } else {
+      length = this.view.getUint32(this.position + 4, true);
+      this.position += 8;
+    }
+    if (tag === PIXEL_DATA) throw new ReadFailure('image', 'has pixel data');
+    if (this.isSequence(type, length)) this.open(true, this.frame.isExplicit && type !== UN, length);
+    else this.passValue(tag, length);
+  }
+
+  /**
+   * A content sequence whose length is too short spills the elements of its items, which sort before it; so does
+   * an item tag outside a sequence. The DICOM library takes either in silence and loses what follows.
+   */
+  private checkOrder(tag: number): void {
+    if (tag >>> 16 === 0xfffe) throw this.malformed('an item stands outside a sequence');
+    const { lastTag } = this.frame;
+    if (lastTag >= CONTENT_SEQUENCE && tag <= lastTag) throw this.malformed('elements run backwards');
+    this.frame.lastTag = tag;
+  }
+
+  private isSequence(type: number, length: number): boolean {
+    if (this.frame.isExplicit) return type === SQ || (type === UN && length === UNDEFINED_LENGTH);
+    // Implicit: without a dictionary, a sequence is what starts with an item (as dicom-parser decides it).
+    if (length === UNDEFINED_LENGTH) return true;
+    if (length < 8 || this.position + 4 > this.bytes.length) return false;
+    const next = this.view.getUint32(this.position, true);
+    return next === 0xe000fffe || next === 0xe0ddfffe;
+  }
+
+  private passValue(tag: number, length: number): void {
+    if (length === UNDEFINED_LENGTH) throw this.malformed('a plain value has no length');
+    this.require(length);
+    if (length > limits.textBytes && this.stack.length > 1) {
+      throw new ReadFailure('limit-text-length', `a value of ${length} bytes`);
+    }
+    if (tag === SOP_CLASS_UID && this.stack.length === 1) {
+      const value = this.bytes.toString('latin1', this.position, this.position + Math.min(length, 128));
+      classifySopClass(value.replace(/[\0 ]+$/, ''));
+    }
+    this.position += length;
+  }
+}
+
+/**
+ * Walks a data set once, without recursion and without objects for elements, and throws a ReadFailure where the file
+ * ends early, its lengths contradict each other, or a limit is passed. The DICOM library is called only after this:
+ * it accepts cut files and short lengths in silence and descends by recursion.
+ */
+export function scanStructure(bytes: Buffer, encoding: ElementEncoding): void {
+  new StructureScan(bytes, encoding).run();
+}
