@@ -39,9 +39,13 @@ export const archerLeadSecondary = rows([
   [150, 1.791, 5.478, 0.5678],
 ]);
 
-/** NCRP 147 tables B.1 (primary) and C.1 (secondary): whole workloads instead of one kVp. */
+/**
+ * NCRP 147 tables B.1 (primary) and C.1 (secondary): whole workloads instead of one kVp. The chest
+ * bucky's fit is from memory; it gives the report's own example.
+ */
 export const archerLeadWorkloads = {
   primary: {
+    chestBucky: { alphaPerMm: 2.264, betaPerMm: 13.08, gamma: 0.56 },
     fluoroscopyTube: { alphaPerMm: 2.347, betaPerMm: 12.67, gamma: 0.6149 },
     cardiacAngiography: { alphaPerMm: 2.389, betaPerMm: 14.26, gamma: 0.5948 },
     peripheralAngiography: { alphaPerMm: 2.728, betaPerMm: 18.52, gamma: 0.4614 },
