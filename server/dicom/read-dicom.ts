@@ -1,14 +1,11 @@
-import {
-  ByteStream,
-  bigEndianByteArrayParser,
-  littleEndianByteArrayParser,
-  parseDicomDataSetExplicit,
-  parseDicomDataSetImplicit,
-  type DataSet,
-} from 'dicom-parser';
+import * as library from 'dicom-parser';
+import type { DataSet } from 'dicom-parser';
 import type { WarningCode } from '../../shared/contract/outcome';
 import { locateDataSet } from './locate-data-set';
 import { scanStructure } from './scan-structure';
+
+/** The package is CommonJS: Node's own loader shows its functions at `default` only, bundlers at the top. */
+const dicomParser = 'default' in library ? (library.default as typeof library) : library;
 
 /** A data set or the data set of an item: elements by tag ("x00080018") over shared bytes. */
 export type DicomDataSet = Pick<DataSet, 'elements'> & { byteArray: Buffer };
@@ -28,11 +25,15 @@ export function readDicom(bytes: Uint8Array): DicomFile {
   );
   scanStructure(data, encoding);
   const dataSet: DicomDataSet = { elements: {}, byteArray: data };
-  const parser = encoding.isBigEndian ? bigEndianByteArrayParser : littleEndianByteArrayParser;
-  const parse = encoding.isExplicit ? parseDicomDataSetExplicit : parseDicomDataSetImplicit;
+  const parser = encoding.isBigEndian
+    ? dicomParser.bigEndianByteArrayParser
+    : dicomParser.littleEndianByteArrayParser;
+  const parse = encoding.isExplicit
+    ? dicomParser.parseDicomDataSetExplicit
+    : dicomParser.parseDicomDataSetImplicit;
   parse(
     Object.assign(dataSet, { warnings: [] }) as unknown as DataSet,
-    new ByteStream(parser, data, 0),
+    new dicomParser.ByteStream(parser, data, 0),
     data.length,
   );
   return { dataSet, warnings };

@@ -1,0 +1,40 @@
+import { mkdirSync, writeFileSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
+import { readableSamples } from './samples/readable-samples';
+import type { Sample } from './samples/sample';
+import { unreadableSamples } from './samples/unreadable-samples';
+
+const folder = fileURLToPath(new URL('../samples/', import.meta.url));
+
+const introduction = `# Samples
+
+Synthetic dose reports for tests, demonstrations and support. Every file was written by \`npm run samples\` from the
+descriptions in \`scripts/samples/\` with the writer in \`server/dicom-writer/\`; the same bytes come out each time.
+Makers, models, serial numbers, stations, institution and persons are invented; no file stems from a real machine or
+patient.
+
+Beside each file stands what the reader must make of it (\`.expected.json\`), derived from the writer's input and not
+from the reader: \`outcome\`, then either \`report\` and \`warningCodes\`, or \`reasonCode\`. Files that are held print as
+"refused" with the same code.
+
+"valid" means: dciodvfy (dicom3tools) finds no error in it. Its deflated sample is checked after inflating, because
+that tool does not inflate.
+
+| file | how it was made | valid | outcome |
+|---|---|---|---|
+`;
+
+function row({ fileName, how, isValid, expected }: Sample): string {
+  const outcome = expected.outcome === 'read' ? 'read' : `refused, ${expected.reasonCode}`;
+  return `| ${fileName} | ${how} | ${isValid ? 'yes' : 'no'} | ${outcome} |\n`;
+}
+
+mkdirSync(folder, { recursive: true });
+const samples = [...readableSamples(), ...unreadableSamples()];
+for (const { fileName, bytes, expected, isValid } of samples) {
+  writeFileSync(folder + fileName, bytes);
+  const name = fileName.replace(/\.[^.]+$/, '');
+  writeFileSync(`${folder}${name}.expected.json`, `${JSON.stringify({ fileName, isValid, ...expected })}\n`);
+}
+writeFileSync(`${folder}README.md`, introduction + samples.map(row).join(''));
+process.stdout.write(`${samples.length} samples written to samples/\n`);
