@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { Db } from '../db/db';
 import { noteAudit } from '../audit/audit.store';
 import type { Actor } from './actor';
 import { newId } from './new-id';
@@ -10,16 +10,18 @@ type Saving<T> = {
   id: string | null;
   /** The version that the person saw. */
   version: number | undefined;
-  find: (tx: EntityManager, id: string) => Promise<T | null>;
-  add: (tx: EntityManager, id: string) => Promise<void>;
+  find: (tx: Db, id: string) => Promise<T | null>;
+  add: (tx: Db, id: string) => Promise<void>;
   /** False when the version has moved on. */
-  update: (tx: EntityManager, id: string, version: number) => Promise<boolean>;
+  update: (tx: Db, id: string, version: number) => Promise<boolean>;
+  /** The field that may be held by one record only, and what to say when another holds it. */
+  uniqueField?: { pointer: string; detail: string };
 };
 
 const isUniqueViolation = (error: unknown) => (error as { code?: string }).code === '23505';
 
 /** Adds or edits one record with its audit line in one transaction; a conflict shows the other's version. */
-export async function saveVersioned<T>(db: EntityManager, actor: Actor, saving: Saving<T>): Promise<T> {
+export async function saveVersioned<T>(db: Db, actor: Actor, saving: Saving<T>): Promise<T> {
   const { subject, version, find } = saving;
   const id = saving.id ?? newId();
   try {
@@ -29,7 +31,7 @@ export async function saveVersioned<T>(db: EntityManager, actor: Actor, saving: 
       else if (!before) throw new Problem('not-found');
       else if (!(await saving.update(tx, id, version ?? 0)))
         throw new Problem('conflict', 'Somebody saved this after you opened it. Compare, then save again.', {
-          current: before,
+          current: await find(tx, id),
         });
       const after = await find(tx, id);
       if (!after) throw new Problem('not-found');
@@ -47,7 +49,9 @@ export async function saveVersioned<T>(db: EntityManager, actor: Actor, saving: 
     });
   } catch (error) {
     if (isUniqueViolation(error))
-      throw new Problem('already-exists', 'Another one has this code or name already.');
+      throw new Problem('already-exists', 'Another one has this code or name already; nothing was changed.', {
+        issues: saving.uniqueField ? [saving.uniqueField] : [],
+      });
     throw error;
   }
 }
