@@ -50,6 +50,15 @@ export async function saveAccount(
   await db.upsert(Account, { ...account, email: account.email.toLowerCase() }, ['personId']);
 }
 
+/** The sign-in of a person, without its secret; null without one. */
+export async function findPasswordState(
+  db: EntityManager,
+  personId: string,
+): Promise<{ email: string; hasPassword: boolean } | null> {
+  const account = await db.findOneBy(Account, { personId });
+  return account && { email: account.email, hasPassword: account.passwordHash !== null };
+}
+
 export async function setPassword(db: EntityManager, personId: string, passwordHash: string): Promise<void> {
   await db.update(Account, { personId }, { passwordHash });
 }
