@@ -1,15 +1,23 @@
-import type passport from 'passport';
+import type { Authenticator } from './http/passport';
+import { equipmentRoutes } from './equipment/equipment.routes';
+import { garmentRoutes } from './garments/garment.routes';
 import { healthRoutes } from './health/health.routes';
 import type { Route } from './http/route';
 import type { SignInThrottle } from './http/sign-in-throttle';
+import { personRoutes } from './people/person.routes';
+import { procedureTypeRoutes } from './procedure-types/procedure-type.routes';
 import { roomRoutes } from './rooms/room.routes';
 import { sessionRoutes } from './session/session.routes';
 
-type Parts = { authenticator: passport.Authenticator; throttle: SignInThrottle; version: string };
+type Parts = { authenticator: Authenticator; throttle: SignInThrottle; version: string };
 
 /** Every endpoint of the API, below /api. */
 export const allRoutes = ({ authenticator, throttle, version }: Parts): Route[] => [
   ...healthRoutes(version),
   ...sessionRoutes(authenticator, throttle),
+  ...personRoutes,
   ...roomRoutes,
+  ...equipmentRoutes,
+  ...procedureTypeRoutes,
+  ...garmentRoutes,
 ];

@@ -39,3 +39,5 @@ export const endSession = (request: Request): Promise<void> =>
   new Promise((resolve, reject) => {
     request.session.destroy((error?: unknown) => (error ? reject(error) : resolve()));
   });
+
+export type Authenticator = passport.Authenticator;
