@@ -1,4 +1,5 @@
 import { readFileSync } from 'node:fs';
+import { resolve } from 'node:path';
 import { readDoseReport } from '../server/dicom/read-dose-report';
 import { toPrintedReport } from '../shared/contract/report';
 
@@ -9,11 +10,14 @@ interface PrintedLine {
   report: ReturnType<typeof toPrintedReport> | null;
 }
 
+/** npm runs scripts in the project's folder and keeps the caller's one here: paths are meant from there. */
+const callerFolder = process.env['INIT_CWD'] ?? process.cwd();
+
 /** One line for a file; a held file prints as refused with its own code. */
 function readLine(file: string): PrintedLine {
   let bytes: Uint8Array;
   try {
-    bytes = readFileSync(file);
+    bytes = readFileSync(resolve(callerFolder, file));
   } catch (error) {
     const detail = error instanceof Error ? error.message : String(error);
     return { file, outcome: 'refused', reason: { code: 'file-unreadable', detail }, report: null };

@@ -1,8 +1,8 @@
-import type { WrittenEvent } from '../../server/dicom-writer/dose-report-content';
-import { clock, sampleUid } from './case-content';
+import type { DoseReportContent, WrittenEvent } from '../../server/dicom-writer/dose-report-content';
+import { caseContent, clock, sampleUid } from './case-content';
 
 /** What a mobile C-arm writes: no geometry, no field, kerma 30 cm in front of the receptor. */
-export function mobileEvent(sample: number, index: number): WrittenEvent {
+function mobileEvent(sample: number, index: number): WrittenEvent {
   return {
     irradiationEventUid: sampleUid(sample, 4, index),
     type: 'fluoroscopy',
@@ -19,7 +19,7 @@ export function mobileEvent(sample: number, index: number): WrittenEvent {
 }
 
 /** One exposure of a radiography room with column and bucky. */
-export function radiographyEvent(sample: number, index: number): WrittenEvent {
+function radiographyEvent(sample: number, index: number): WrittenEvent {
   return {
     irradiationEventUid: sampleUid(sample, 4, index),
     plane: 'single',
@@ -44,5 +44,63 @@ export function radiographyEvent(sample: number, index: number): WrittenEvent {
     fieldAreaCm2: 1470,
     columnAngulationDeg: 0,
     sourceToDetectorMm: 1800,
+  };
+}
+
+/** A case in theatre with a mobile C-arm. */
+export function mobileCase(sample: number): DoseReportContent {
+  const base = caseContent(sample);
+  const room = {
+    modelName: 'Tern M',
+    serialNumber: 'QR-88012',
+    stationName: 'MCRH-OR4',
+    deviceUid: sampleUid(0, 9, 2),
+  };
+  return {
+    ...base,
+    equipment: { ...base.equipment, ...room },
+    studyDescription: 'Fluoroscopy in theatre',
+    planes: [
+      {
+        plane: 'single',
+        kermaAreaProductGyCm2: 1.52,
+        referenceAirKermaGy: 0.0061,
+        fluoroscopyKermaAreaProductGyCm2: 1.52,
+        fluoroscopyReferenceAirKermaGy: 0.0061,
+        fluoroscopyTimeS: 96,
+        acquisitionKermaAreaProductGyCm2: 0,
+        acquisitionReferenceAirKermaGy: 0,
+        acquisitionTimeS: 0,
+        referencePointDefinition: 'image-input-surface-30-cm-in-front',
+      },
+    ],
+    events: [mobileEvent(sample, 0), mobileEvent(sample, 1)],
+  };
+}
+
+/** Two exposures in a radiography room. */
+export function radiographyCase(sample: number): DoseReportContent {
+  const base = caseContent(sample);
+  const room = {
+    modelName: 'Plover DX',
+    serialNumber: 'QR-55120',
+    stationName: 'MCRH-XR2',
+    deviceUid: sampleUid(0, 9, 3),
+  };
+  return {
+    ...base,
+    equipment: { ...base.equipment, ...room },
+    studyDescription: 'Chest two views',
+    acquisitionDeviceType: 'integrated',
+    planes: [
+      {
+        plane: 'single',
+        kermaAreaProductGyCm2: 0.182,
+        referenceAirKermaGy: 0.00023,
+        frameCount: 2,
+        referencePointDefinition: 'detector-plane',
+      },
+    ],
+    events: [radiographyEvent(sample, 0), radiographyEvent(sample, 1)],
   };
 }
