@@ -13,7 +13,8 @@ export const maxNarrowBeamKeV = 150;
 export function leadMassAttenuationCm2PerG(energyKeV: number): number {
   const energy = clamp(energyKeV, minNarrowBeamKeV, maxNarrowBeamKeV);
   // The last row at or below the energy: on an edge, its upper side.
-  const index = leadMassAttenuation.findLastIndex(([rowKeV]) => rowKeV <= energy);
+  const above = leadMassAttenuation.findIndex(([rowKeV]) => rowKeV > energy);
+  const index = (above === -1 ? leadMassAttenuation.length : above) - 1;
   const lower = leadMassAttenuation[index];
   if (!lower) throw new RangeError('The attenuation table starts above its own lower end.');
   const upper = leadMassAttenuation[index + 1] ?? lower;
