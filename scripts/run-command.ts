@@ -18,11 +18,12 @@ export async function runCommand(
   try {
     await command(stopper);
   } catch (error) {
-    if (!stopper.isStopping) {
+    if (stopper.wasTold) process.exitCode = exitCodeWhenTold;
+    else {
       console.error(describe(error));
       if (process.env['LOG_LEVEL'] === 'debug') console.error(error);
       process.exitCode = readExitCode(error);
-    } else process.exitCode = exitCodeWhenTold;
+    }
     await stopper.stop();
     process.exit();
   }

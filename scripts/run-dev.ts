@@ -58,7 +58,7 @@ async function develop(stopper: Stopper): Promise<void> {
   if (env.isDemo) report(describeDemoAccounts(password));
   report('Open the address that Vite prints; the server answers once its database is migrated');
   await Promise.race([server, page]);
-  if (!stopper.isStopping) throw new Error('The server or Vite has ended.');
+  if (!stopper.wasTold) throw new Error('The server or Vite has ended.');
 }
 
 await runCommand(develop, 0);

@@ -19,8 +19,9 @@ export class Stopper {
     }
   }
 
-  get isStopping(): boolean {
-    return this.stopping !== null;
+  /** Whether a signal asked for the end: what fails after that fails because of it. */
+  get wasTold(): boolean {
+    return this.firstSignalMs > 0;
   }
 
   /** Adds what has to be ended; what was added last is ended first. */
