@@ -1,3 +1,4 @@
+import { groupThousands } from '../../shared/units';
 import { findDecades, findLogTicks, placeOnLogScale } from './log-scale';
 
 type LevelRuleProps = {
@@ -32,7 +33,7 @@ export function LevelRule({
   scaleFrom,
   scaleTo,
   label,
-  formatTick = String,
+  formatTick = (at) => groupThousands(String(at)),
   isMarked,
 }: LevelRuleProps) {
   const share = (at: number) => 0.02 + 0.96 * placeOnLogScale(at, scaleFrom, scaleTo);

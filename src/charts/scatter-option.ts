@@ -34,7 +34,7 @@ export function buildScatterOption(input: ScatterOptionInput, colours: ChartColo
   const { points, guides, xTitle, yTitle, formatX, formatY, isNarrow } = input;
   const range = findScatterRange(points);
   const edge = isNarrow ? 40 : 70;
-  const grid = { left: 44, top: edge + 26, right: edge + 8, bottom: 46 };
+  const grid = { left: 58, top: edge + 6, right: edge + 8, bottom: 46 };
   const xTicks = findLogTicks(10 ** range.xFrom, 10 ** range.xTo);
   const xPlaces = xTicks.filter((tick) => !isNarrow || !/^[25]/.test(String(tick))).map(Math.log10);
   const yPlaces = findRoundTicks(range.yFrom, range.yTo, 6);
@@ -70,7 +70,7 @@ export function buildScatterOption(input: ScatterOptionInput, colours: ChartColo
     tooltip: { trigger: 'item' },
     grid: [
       grid,
-      { left: grid.left, right: grid.right, top: 22, height: edge },
+      { left: grid.left, right: grid.right, top: 0, height: edge },
       { right: 0, width: edge, top: grid.top, bottom: grid.bottom },
     ],
     xAxis: [
@@ -91,24 +91,14 @@ export function buildScatterOption(input: ScatterOptionInput, colours: ChartColo
       {
         ...axis,
         min: range.yFrom,
+        name: yTitle,
+        nameLocation: 'middle',
+        nameGap: 40,
         max: range.yTo,
         axisTick: { customValues: yPlaces, show: false },
         axisLabel: label(formatY, yPlaces),
       },
-      {
-        ...hidden,
-        type: 'value',
-        gridIndex: 1,
-        show: true,
-        name: yTitle,
-        nameLocation: 'end',
-        nameGap: 8,
-        nameTextStyle: { color: colours['ink-2'], fontSize: 12, align: 'left', padding: [0, 0, 0, -44] },
-        axisLabel: hidden,
-        axisTick: hidden,
-        axisLine: hidden,
-        splitLine: hidden,
-      },
+      { ...hidden, type: 'value', gridIndex: 1 },
       { ...hidden, type: 'category', gridIndex: 2, data: yCounts.map((_, place) => place) },
     ],
     brush: {
@@ -117,7 +107,7 @@ export function buildScatterOption(input: ScatterOptionInput, colours: ChartColo
       seriesIndex: toneSizes.map((_, tone) => tone),
       brushMode: 'single',
       brushStyle: { borderWidth: 1.5, color: 'transparent', borderColor: colours.lee },
-      outOfBrush: { colorAlpha: 0.3 },
+      outOfBrush: { opacity: 0.22 },
     },
     series: [
       ...toneSizes.map((symbolSize, tone) => ({

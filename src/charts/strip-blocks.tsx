@@ -4,7 +4,7 @@ import type { StripScale } from './strip-scale';
 
 type StripBlocksProps = { blocks: readonly StripBlock[]; scale: StripScale; patternId: string };
 
-const leastBreadthPx = 1.5;
+const leastBreadthPx = 2;
 
 export function outlineBlock(block: StripBlock, scale: StripScale) {
   const x = scale.placeX(block.from);
@@ -25,8 +25,9 @@ export const StripBlocks = memo(function StripBlocks({ blocks, scale, patternId 
           <g key={index}>
             <rect
               {...outline}
-              className={`${findShadeFill(block.shade)} stroke-ramp-4`}
-              strokeWidth="0.6"
+              className={`${findShadeFill(block.shade)} stroke-ramp-3`}
+              // The two faintest shades need an edge against the paper; the others would lose their tone to it.
+              strokeWidth={block.shade === null || block.shade < 2 ? 0.7 : 0}
               strokeDasharray={block.shade === null ? '2 2' : undefined}
             />
             {block.isPatterned && (

@@ -30,7 +30,7 @@ export function StripChart({ blocks, span, peak, label, width = 220 }: StripChar
       viewBox={`0 0 ${width} ${height}`}
       width={width}
       height={height}
-      className="block max-w-full"
+      className="block max-md:w-full"
       preserveAspectRatio="none"
     >
       {blocks.map((block, place) => {

@@ -1,18 +1,13 @@
-/** The mark: what comes from the left parts at a shield and leaves one place behind it in shelter. */
+/** The mark: rings around a source, broken by a screen that leaves one place in its lee. */
 export const Mark = ({ className }: { className?: string }) => (
-  <svg viewBox="0 0 26 24" className={className} aria-hidden="true" fill="none">
-    <g stroke="currentColor" strokeWidth="1.7" strokeLinecap="round" className="text-ramp-3">
-      <path d="M1.5 7.6C8 7.6 8 2.6 13.6 2.6c4.6 0 6.4 2 10.4 2.6" />
-      <path d="M1.5 12h5" />
-      <path d="M1.5 16.4c6.5 0 6.5 5 12.1 5 4.6 0 6.4-2 10.4-2.6" />
-    </g>
+  <svg viewBox="0 0 24 24" className={className} aria-hidden="true" fill="none" strokeLinecap="round">
     <path
-      d="M13.6 6.6c-4 2.6-4 8.2 0 10.8"
-      stroke="currentColor"
-      strokeWidth="2.8"
-      strokeLinecap="round"
-      className="text-ink"
+      d="M13.69 18.79A7 7 0 1 1 18.85 10.54M15.73 22.24A10.9 10.9 0 1 1 22.84 10.86"
+      strokeWidth="1.5"
+      className="stroke-ramp-3"
     />
-    <circle cx="17.6" cy="12" r="2.5" fill="currentColor" className="text-lee" />
+    <circle cx="12" cy="12" r="2.6" strokeWidth="1.5" className="stroke-ramp-4" />
+    <path d="M14.74 19.13L19.61 11.33" strokeWidth="2.5" className="stroke-ink" />
+    <circle cx="21.0" cy="17.6" r="2" className="fill-lee" />
   </svg>
 );

@@ -30,7 +30,7 @@ export function Page({ title, heading, eyebrow, lead, deeds, margin, children }:
     >
       <div className="flex min-w-0 flex-col gap-6">
         <div className="flex flex-wrap items-start justify-between gap-x-8 gap-y-3">
-          <div className="flex min-w-0 flex-col gap-1">
+          <div className="flex min-w-0 grow basis-80 flex-col gap-1">
             {eyebrow && <p className="text-sm text-ink-2">{eyebrow}</p>}
             <h1 className={heading ? 'sr-only' : 'text-2xl font-normal'}>{title}</h1>
             {heading}

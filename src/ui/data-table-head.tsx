@@ -58,6 +58,7 @@ function SortButton<Row>({
       onClick={() => onSort({ key, order: isSorted ? opposite : first })}
       className={joinClassNames(
         'target group relative hover:text-lee',
+        isSorted && 'text-lee',
         column.align === 'end' ? 'text-right' : 'text-left',
       )}
     >
@@ -68,7 +69,7 @@ function SortButton<Row>({
         height="4"
         aria-hidden="true"
         className={joinClassNames(
-          'absolute -bottom-1.5',
+          'absolute -bottom-1',
           column.align === 'end' ? 'right-0' : 'left-0',
           isSorted ? 'text-lee' : 'text-transparent group-hover:text-edge group-focus-visible:text-edge',
         )}

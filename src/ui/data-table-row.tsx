@@ -25,24 +25,30 @@ export function DataTableRow<Row>({ row, columns, href, isMarked }: RowProps<Row
         isMarked && 'shadow-[inset_3px_0_0_var(--color-beacon)] max-md:pl-3',
       )}
     >
-      {columns.map((column) => (
-        <Cell key={column.key} column={column} isMarked={isMarked}>
-          {isRowHead(column) && href ? (
-            <Link
-              to={href}
-              data-row-link=""
-              className="target inline-block hover:underline hover:underline-offset-3"
-            >
-              {column.cell(row)}
-            </Link>
-          ) : (
-            column.cell(row)
-          )}
-        </Cell>
-      ))}
+      {columns.map((column) => {
+        const content = column.cell(row);
+        return (
+          <Cell key={column.key} column={column} isMarked={isMarked} isEmpty={isNothing(content)}>
+            {isRowHead(column) && href ? (
+              <Link
+                to={href}
+                data-row-link=""
+                className="target inline-block hover:underline hover:underline-offset-3"
+              >
+                {content}
+              </Link>
+            ) : (
+              content
+            )}
+          </Cell>
+        );
+      })}
     </tr>
   );
 }
+
+const isNothing = (content: ReactNode): boolean =>
+  content === null || content === undefined || content === false || content === '';
 
 const isRowHead = <Row,>(column: Column<Row>): boolean => column.isRowHead ?? column.phone === 'title';
 
@@ -59,10 +65,13 @@ const phoneLooks = {
 function Cell<Row>({
   column,
   isMarked,
+  isEmpty,
   children,
 }: {
   column: Column<Row>;
   isMarked: boolean;
+  /** On a phone a label without a value would only puzzle. */
+  isEmpty: boolean;
   children: ReactNode;
 }) {
   const Tag = isRowHead(column) ? 'th' : 'td';
@@ -75,7 +84,7 @@ function Cell<Row>({
         'px-2 py-1.5 align-middle font-normal last:pr-0 max-md:block max-md:p-0',
         isMarked ? 'first:pl-3 max-md:first:pl-0' : 'first:pl-0',
         column.align === 'end' && 'md:whitespace-nowrap md:text-right',
-        phoneLooks[phone],
+        phoneLooks[isEmpty ? 'hidden' : phone],
         column.className,
       )}
     >

@@ -1,6 +1,5 @@
 import { useEffect, useRef, type ReactNode } from 'react';
 import { ApiProblem } from '../lib/api-problem';
-import { AttentionMark } from './attention-mark';
 
 type ProblemNoteProps = {
   error: unknown;
@@ -26,9 +25,7 @@ export function ProblemNote({ error, kept, next, fieldNames = {} }: ProblemNoteP
       role="alert"
       className="flex flex-col gap-1.5 border-l-3 border-beacon bg-surface px-4 py-3"
     >
-      <p className="font-semibold">
-        <AttentionMark strength="act">{title}</AttentionMark>
-      </p>
+      <p className="font-semibold text-beacon">{title}</p>
       {problem && problem.detail !== problem.title && <p>{problem.detail}</p>}
       {problem && problem.issues.length > 0 && (
         <ul className="list-disc pl-5">

@@ -1,0 +1,91 @@
+import type { UseMutationResult } from '@tanstack/react-query';
+import { useCallback, useRef, type FormEvent, type ReactNode } from 'react';
+import type { FieldValues, UseFormReturn } from 'react-hook-form';
+import { ApiProblem } from '../lib/api-problem';
+import { placeIssues } from '../lib/place-issues';
+import { Button, ButtonLink } from './button';
+import { ConflictNote } from './conflict-note';
+import { LeaveGuard } from './leave-guard';
+import { ProblemNote } from './problem-note';
+
+/** How a record's values read, field by field: for the comparison of two versions. */
+export type DescribeValues<Values> = (values: Values) => { name: string; value: string }[];
+
+type RecordFormProps<Input extends FieldValues, Output extends object, Saved> = {
+  form: UseFormReturn<Input, unknown, Output>;
+  save: UseMutationResult<Saved, Error, object>;
+  onSaved: (saved: Saved) => void;
+  saveText: string;
+  /** Where Cancel leads. */
+  backTo: string;
+  /** The server's newer version as form values; null when it cannot be read. */
+  readCurrent: (current: unknown) => Input | null;
+  describe: DescribeValues<Input>;
+  children: ReactNode;
+};
+
+/** The frame of a register's form: save and cancel, issues at their fields, conflict, unsaved entries. */
+export function RecordForm<Input extends FieldValues, Output extends object, Saved>({
+  form,
+  save,
+  onSaved,
+  saveText,
+  backTo,
+  readCurrent,
+  describe,
+  children,
+}: RecordFormProps<Input, Output, Saved>) {
+  const { isDirty } = form.formState;
+  const isDone = useRef(false);
+  const isGuarding = useCallback(() => isDirty && !isDone.current, [isDirty]);
+
+  const submit = form.handleSubmit((values) =>
+    save.mutate(values, {
+      onSuccess: (saved) => {
+        isDone.current = true;
+        onSaved(saved);
+      },
+      onError: (error) => placeIssues(error, form.setError),
+    }),
+  );
+  const submitOnce = (event?: FormEvent) => {
+    event?.preventDefault();
+    if (!save.isPending) void submit();
+  };
+
+  const isConflict = save.error instanceof ApiProblem && save.error.code === 'conflict';
+  const theirs = isConflict ? readCurrent((save.error as ApiProblem).problem.current) : null;
+  return (
+    <form noValidate onSubmit={submitOnce} className="flex max-w-3xl flex-col gap-5">
+      {!theirs && <ProblemNote error={save.error} kept="Your entries are still in the form." />}
+      {theirs && (
+        <ConflictNote
+          rows={compareVersions(describe(form.getValues()), describe(theirs))}
+          isBusy={save.isPending}
+          onKeepMine={() => {
+            form.setValue('version' as never, theirs['version']);
+            submitOnce();
+          }}
+          onTakeTheirs={() => {
+            form.reset(theirs);
+            save.reset();
+          }}
+        />
+      )}
+      {children}
+      <div className="flex flex-wrap gap-3 border-t border-rule pt-4">
+        <Button type="submit" variant="primary" isBusy={save.isPending} busyText="Saving …">
+          {saveText}
+        </Button>
+        <ButtonLink to={backTo}>Cancel</ButtonLink>
+      </div>
+      <LeaveGuard isGuarding={isGuarding} />
+    </form>
+  );
+}
+
+function compareVersions(mine: { name: string; value: string }[], theirs: { name: string; value: string }[]) {
+  return mine
+    .map(({ name, value }, place) => ({ name, mine: value, theirs: theirs[place]?.value ?? '' }))
+    .filter((row) => row.mine !== row.theirs);
+}
