@@ -67,9 +67,10 @@ beforeEach(async () => {
 
 afterEach(async () => {
   for (const end of ends.toReversed()) await end();
-});
+}, 60_000);
 
-describe('startCluster', () => {
+// Making a durable cluster waits for the disk: up to twenty seconds on a machine that is busy writing.
+describe('startCluster', { timeout: 120_000 }, () => {
   it('joins the server that a killed process left running, then stops it', async () => {
     await kill(await startElsewhere());
     const serverPid = readServerPid();
