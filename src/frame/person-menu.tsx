@@ -6,6 +6,7 @@ import { buildSignInPath, paths } from '../paths';
 import { Button } from '../ui/button';
 import { Chevron } from '../ui/chevron';
 import { ProblemNote } from '../ui/problem-note';
+import { dropBelow } from './drop-below';
 import { ThemeSwitch } from './theme-switch';
 
 const roleNames: Record<Role, string> = {
@@ -38,7 +39,8 @@ export function PersonMenu({ user }: { user: User }) {
       <div
         id="person-menu"
         popover="auto"
-        className="fixed top-13 right-2 left-auto m-0 w-72 max-w-[calc(100vw-1rem)] border border-edge bg-surface p-4 text-ink shadow-lg md:right-6"
+        onBeforeToggle={dropBelow}
+        className="fixed right-2 bottom-auto left-auto m-0 w-72 max-w-[calc(100vw-1rem)] border border-edge bg-surface p-4 text-ink shadow-lg md:right-6"
       >
         <p className="font-semibold break-words">{user.name}</p>
         <p className="text-sm text-ink-2">

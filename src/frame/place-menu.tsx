@@ -2,6 +2,7 @@ import { useRef } from 'react';
 import { NavLink, useLocation } from 'react-router-dom';
 import { Chevron } from '../ui/chevron';
 import { joinClassNames } from '../lib/class-names';
+import { dropBelow } from './drop-below';
 
 type PlaceLink = { path: string; name: string };
 
@@ -41,7 +42,8 @@ export function PlaceMenu({ places }: { places: readonly PlaceLink[] }) {
         ref={menu}
         id="places"
         popover="auto"
-        className="fixed inset-x-0 top-13 bottom-auto m-0 w-full border-y border-edge bg-surface p-2 text-ink shadow-lg"
+        onBeforeToggle={dropBelow}
+        className="fixed inset-x-0 bottom-auto m-0 w-full border-y border-edge bg-surface p-2 text-ink shadow-lg"
       >
         {places.map((place) => (
           <li key={place.path}>

@@ -1,5 +1,4 @@
 import type { ReactNode } from 'react';
-import { AttentionMark } from './attention-mark';
 import { Button } from './button';
 import { DataTable } from './data-table';
 import type { Column } from './data-table.types';
@@ -24,9 +23,7 @@ type ConflictNoteProps = {
 /** Two people edited the same record: both versions side by side, and the choice between them. */
 export const ConflictNote = ({ rows, onKeepMine, onTakeTheirs, isBusy }: ConflictNoteProps) => (
   <div role="alert" className="flex flex-col gap-3 border-l-3 border-beacon bg-surface px-4 py-3">
-    <p>
-      <AttentionMark strength="act">Somebody saved this after you opened it</AttentionMark>
-    </p>
+    <p className="font-semibold text-beacon">Somebody saved this after you opened it</p>
     <p>
       {rows.length === 0
         ? 'What they saved equals your entries.'

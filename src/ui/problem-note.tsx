@@ -14,7 +14,10 @@ type ProblemNoteProps = {
 /** An error: what happened, what was kept, what to do, and every issue of the input at once. */
 export function ProblemNote({ error, kept, next, fieldNames = {} }: ProblemNoteProps) {
   const note = useRef<HTMLDivElement>(null);
-  useEffect(() => note.current?.scrollIntoView({ block: 'nearest' }), [error]);
+  useEffect(() => {
+    // In braces: newer browsers return a promise from scrolling, which React would take for a cleanup.
+    note.current?.scrollIntoView({ block: 'nearest' });
+  }, [error]);
   if (error === null || error === undefined) return null;
 
   const problem = error instanceof ApiProblem ? error : null;

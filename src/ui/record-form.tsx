@@ -39,24 +39,23 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
   const isDone = useRef(false);
   const isGuarding = useCallback(() => isDirty && !isDone.current, [isDirty]);
 
-  const submit = form.handleSubmit((values) =>
+  const send = (values: Output) =>
     save.mutate(values, {
       onSuccess: (saved) => {
         isDone.current = true;
         onSaved(saved);
       },
       onError: (error) => placeIssues(error, form.setError),
-    }),
-  );
-  const submitOnce = (event?: FormEvent) => {
+    });
+  const submit = (event?: FormEvent) => {
     event?.preventDefault();
-    if (!save.isPending) void submit();
+    if (!save.isPending) void form.handleSubmit(send)();
   };
 
   const isConflict = save.error instanceof ApiProblem && save.error.code === 'conflict';
   const theirs = isConflict ? readCurrent((save.error as ApiProblem).problem.current) : null;
   return (
-    <form noValidate onSubmit={submitOnce} className="flex max-w-3xl flex-col gap-5">
+    <form noValidate onSubmit={submit} className="flex max-w-3xl flex-col gap-5">
       {!theirs && <ProblemNote error={save.error} kept="Your entries are still in the form." />}
       {theirs && (
         <ConflictNote
@@ -64,7 +63,7 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
           isBusy={save.isPending}
           onKeepMine={() => {
             form.setValue('version' as never, theirs['version']);
-            submitOnce();
+            submit();
           }}
           onTakeTheirs={() => {
             form.reset(theirs);
