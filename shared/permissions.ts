@@ -9,6 +9,14 @@ export const roles = [
 ] as const;
 export type Role = (typeof roles)[number];
 
+export const roleNames: Record<Role, string> = {
+  technologist: 'technologist',
+  physicist: 'medical physicist',
+  interventionalist: 'interventionalist',
+  committee: 'committee member',
+  administrator: 'administrator',
+};
+
 /** Everyone who signs in is also a monitored person: own exposure, own garments. */
 type Holder = Role | 'monitored';
 

@@ -4,6 +4,15 @@ import { calendarDateSchema, idSchema, requiredText } from './common';
 export const calibratedQuantities = ['reference-air-kerma', 'kerma-area-product'] as const;
 export const calibratedPlanes = ['single', 'A', 'B'] as const;
 
+/**
+ * True over displayed of a display that keeps within 35 % of the true value (IEC 60601-2-43, from memory):
+ * 1/1.35 = 0.74 when it shows 35 % too much, 1/0.65 = 1.54 when it shows 35 % too little.
+ */
+export const expectedFactorRange = { low: 1 / 1.35, high: 1 / 0.65 } as const;
+
+export const isExpectedFactor = (factor: number): boolean =>
+  factor >= expectedFactorRange.low && factor <= expectedFactorRange.high;
+
 /** True over displayed, for one plane of one machine, from a date on. Never edited: a newer row follows. */
 export const calibrationFactorSchema = z.object({
   id: idSchema,
