@@ -34,17 +34,17 @@ describe('conversions (SI prefixes; 1 rem = 0.01 Sv)', () => {
 
 describe('reference air kerma', () => {
   test('is whole milligray with thin-space thousands', () => {
-    expect(formatReferenceAirKerma(5.3104)).toEqual({ value: '5\u2009310', unit: 'mGy' });
+    expect(formatReferenceAirKerma(5.3104)).toEqual({ value: '5\u202f310', unit: 'mGy' });
   });
   test('turns to gray with two decimals at ten gray', () => {
     expect(formatReferenceAirKerma(12.346)).toEqual({ value: '12.35', unit: 'Gy' });
   });
   test('turns to gray as soon as it would read 10 000 mGy', () => {
     expect(formatReferenceAirKerma(9.9997)).toEqual({ value: '10.00', unit: 'Gy' });
-    expect(formatReferenceAirKerma(9.9994)).toEqual({ value: '9\u2009999', unit: 'mGy' });
+    expect(formatReferenceAirKerma(9.9994)).toEqual({ value: '9\u202f999', unit: 'mGy' });
   });
   test('keeps milligray in a column', () => {
-    expect(formatReferenceAirKermaMgy(12.346)).toBe('12\u2009346');
+    expect(formatReferenceAirKermaMgy(12.346)).toBe('12\u202f346');
   });
   test('never shows a small value as zero', () => {
     expect(formatReferenceAirKermaMgy(0.00031)).toBe('0.3');
@@ -60,7 +60,7 @@ test('kerma–area product has three significant digits', () => {
     '0.840',
     '43.0',
     '271',
-    '1\u2009230',
+    '1\u202f230',
     '100',
     '0',
   ]);
@@ -73,12 +73,12 @@ test('fluoroscopy time has one decimal and never hides a short run', () => {
 test('scatter has two significant digits and an interval', () => {
   expect(formatScatter(433.2)).toBe('430');
   expect(formatScatter(0.0518)).toBe('0.052');
-  expect(formatScatterInterval(142, 1304)).toBe('140–1\u2009300');
+  expect(formatScatterInterval(142, 1304)).toBe('140–1\u202f300');
   expect(formatScatterInterval(142, null)).toBeNull();
 });
 
 test('a negative value bears a minus sign unless it rounds to zero', () => {
-  expect(formatDecimals(-1234.5, 1)).toBe('\u22121\u2009234.5');
+  expect(formatDecimals(-1234.5, 1)).toBe('\u22121\u202f234.5');
   expect(formatDecimals(-0.04, 1)).toBe('0.0');
 });
 
@@ -88,11 +88,11 @@ test('an infinite or undefined result is missing', () => {
 
 test('percentages keep a decimal where a whole number would mislead', () => {
   expect([0.0083, 0.62, 0.997, 1, 0.0996].map(formatPercent)).toEqual([
-    '0.8\u2009%',
-    '62\u2009%',
-    '99.7\u2009%',
-    '100\u2009%',
-    '10\u2009%',
+    '0.8\u202f%',
+    '62\u202f%',
+    '99.7\u202f%',
+    '100\u202f%',
+    '10\u202f%',
   ]);
 });
 

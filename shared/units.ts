@@ -5,8 +5,8 @@
 
 /** What stands where a value is missing; never 0. */
 export const MISSING = '–';
-/** Groups thousands: U+2009, narrower than a word space and never a comma or a point. */
-export const THIN_SPACE = '\u2009';
+/** Groups thousands: U+202F, a thin space at which no line breaks; never a comma or a point. */
+export const THIN_SPACE = '\u202f';
 
 /** A figure as it is printed: the digits apart from their unit, so that tables can put the unit in the head. */
 export type DisplayedFigure = { value: string; unit: string };

@@ -1,7 +1,7 @@
 import type { EChartsCoreOption } from 'echarts/core';
 import { binValues } from './bin-values';
 import type { ChartColours } from './chart-colours';
-import { findLogRange, findLogTicks } from './log-scale';
+import { findDecades, findLogRange, findLogTicks } from './log-scale';
 import type { ScatterGuide, ScatterPoint } from './scatter.types';
 import { findRoundTicks } from './ticks';
 import { toneSizes } from './tone-sizes';
@@ -35,8 +35,9 @@ export function buildScatterOption(input: ScatterOptionInput, colours: ChartColo
   const range = findScatterRange(points);
   const edge = isNarrow ? 40 : 70;
   const grid = { left: 58, top: edge + 6, right: edge + 8, bottom: 46 };
-  const xTicks = findLogTicks(10 ** range.xFrom, 10 ** range.xTo);
-  const xPlaces = xTicks.filter((tick) => !isNarrow || !/^[25]/.test(String(tick))).map(Math.log10);
+  const findTicks = isNarrow ? findDecades : findLogTicks;
+  const xTicks = findTicks(10 ** range.xFrom, 10 ** range.xTo);
+  const xPlaces = xTicks.map(Math.log10);
   const yPlaces = findRoundTicks(range.yFrom, range.yTo, 6);
   const placed = points.filter((point) => point.x > 0);
   const axis = {

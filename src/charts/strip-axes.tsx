@@ -15,7 +15,10 @@ const leastTickPx = 74;
 export function StripAxes({ scale, window, originS, formatRate }: StripAxesProps) {
   const { plotLeft, plotRight, plotBottom, base } = scale;
   const most = Math.max(1, Math.floor((plotRight - plotLeft) / leastTickPx));
-  const times = findClockTicks(window.from, window.to, originS, most);
+  const times = findClockTicks(window.from, window.to, originS, most).filter(
+    // A label cut by the picture's edge would read as another time.
+    (at) => scale.placeX(at) <= plotRight - 12,
+  );
   const hasSeconds = times.length > 1 && times[1]! - times[0]! < 60;
   const above = findSideTicks(scale.peakAbove, base - scale.plotTop);
   const below = findSideTicks(scale.peakBelow, plotBottom - base).filter((rate) => rate > 0);
