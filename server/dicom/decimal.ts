@@ -10,3 +10,21 @@ export function parseDecimal(text: string): number | null {
   const value = Number(trimmed);
   return Number.isFinite(value) ? value : null;
 }
+
+/** The exponent of a factor that is a power of ten; null for others such as 60. */
+function powerOfTen(factor: number): number | null {
+  const exponent = Math.round(Math.log10(factor));
+  return Number(`1e${exponent}`) === factor ? exponent : null;
+}
+
+/**
+ * A decimal string times a factor. A power of ten shifts the point in the text, so that nothing is lost to binary
+ * fractions: "0.00015" × 10,000 is 1.5 and not 1.4999999999999998.
+ */
+export function scaleDecimal(text: string, factor: number): number | null {
+  const value = parseDecimal(text);
+  const shift = powerOfTen(factor);
+  if (value === null || shift === null) return value === null ? null : value * factor;
+  const [mantissa = '', exponent = '0'] = text.trim().toLowerCase().split('e');
+  return Number(`${mantissa}e${Number(exponent) + shift}`);
+}

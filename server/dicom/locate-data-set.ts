@@ -96,7 +96,11 @@ export function locateDataSet(bytes: Buffer): LocatedDataSet {
       `transfer syntax ${JSON.stringify(meta.transferSyntaxUid)}`,
     );
   }
-  if (declared?.isDeflated) return { data: inflate(rest), encoding: declared, warnings };
+  if (declared?.isDeflated) {
+    const data = inflate(rest);
+    if (data.length === 0) throw new ReadFailure('truncated', 'the deflated data set is empty');
+    return { data, encoding: declared, warnings };
+  }
   const shown = guessEncoding(rest);
   const encoding = shown ?? declared;
   if (!encoding) throw new ReadFailure('malformed', 'no data set after the file meta information');

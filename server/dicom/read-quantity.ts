@@ -1,6 +1,6 @@
 import type { ReportedQuantity } from '../../shared/contract/report-parts';
 import type { ContentItem } from './content-tree';
-import { parseDecimal } from './decimal';
+import { scaleDecimal } from './decimal';
 import { unitFactor, type QuantityKind } from './units';
 import type { WarningCollector } from './warning-collector';
 
@@ -42,9 +42,9 @@ function readItem(
   const factor = factorOf(item, field, kind, warnings);
   if (factor === null) return [];
   return measurement.text.flatMap((text) => {
-    const value = parseDecimal(text);
+    const value = scaleDecimal(text, factor);
     if (value === null) warnings.add('number-unreadable', `${field} ${JSON.stringify(text.slice(0, 40))}`);
-    return value === null ? [] : [value * factor];
+    return value === null ? [] : [value];
   });
 }
 

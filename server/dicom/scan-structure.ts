@@ -106,6 +106,12 @@ class StructureScan {
     this.frame = this.stack[this.stack.length - 1] as Frame;
   }
 
+  private passDelimiter(): void {
+    if (this.view.getUint32(this.position + 4, true) !== 0) throw this.malformed('a delimiter has a length');
+    this.position += 8;
+    this.close();
+  }
+
   private readItemTag(): void {
     this.require(8);
     const tag = this.readTag();
@@ -117,8 +123,7 @@ class StructureScan {
       this.position += 8;
       this.open(false, this.frame.isExplicit, length);
     } else if (tag === SEQUENCE_END && this.frame.hasUndefinedLength) {
-      this.position += 8;
-      this.close();
+      this.passDelimiter();
     } else {
       throw this.malformed('a sequence holds something else than items');
     }
@@ -128,8 +133,7 @@ class StructureScan {
     this.require(8);
     const tag = this.readTag();
     if (tag === ITEM_END && this.frame.hasUndefinedLength) {
-      this.position += 8;
-      this.close();
+      this.passDelimiter();
       return;
     }
     this.checkOrder(tag);
@@ -168,7 +172,7 @@ class StructureScan {
     if (this.frame.isExplicit) return type === SQ || (type === UN && length === UNDEFINED_LENGTH);
     // Implicit: without a dictionary, a sequence is what starts with an item (as dicom-parser decides it).
     if (length === UNDEFINED_LENGTH) return true;
-    if (length < 8 || this.position + 4 > this.bytes.length) return false;
+    if (length === 0 || this.position + 4 > this.bytes.length) return false;
     const next = this.view.getUint32(this.position, true);
     return next === 0xe000fffe || next === 0xe0ddfffe;
   }

@@ -1,0 +1,34 @@
+import { expect, it } from 'vitest';
+import { parseDecimal, scaleDecimal } from './decimal';
+
+it.each([
+  ['0.00125', 0.00125],
+  [' +1.25E-3 ', 0.00125],
+  ['.5', 0.5],
+  ['5.', 5],
+  ['-0012', -12],
+  ['1e5', 100_000],
+])('reads %j as a decimal string', (text, value) => {
+  expect(parseDecimal(text)).toBe(value);
+});
+
+it.each(['', ' ', '0,00125', '12abc', 'NaN', 'INF', '1e', '--1', '0x10', '1 2', '1e999', '١٢'])(
+  'does not make a number of %j',
+  (text) => {
+    expect(parseDecimal(text)).toBeNull();
+  },
+);
+
+it.each([
+  ['0.00015', 10_000, 1.5],
+  ['1.2345E-3', 10_000, 12.345],
+  ['558', 0.001, 0.558],
+  ['-.7', 1e-6, -7e-7],
+  ['2.5', 60, 150],
+])('moves the point of %j exactly when scaled by %d', (text, factor, value) => {
+  expect(scaleDecimal(text, factor)).toBe(value);
+});
+
+it('does not scale what is no number', () => {
+  expect(scaleDecimal('0,5', 10)).toBeNull();
+});
