@@ -1,7 +1,10 @@
 import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
+import { putIssuesInOwnWords } from '../shared/issue-words';
 import { App } from './app';
 import './index.css';
+
+putIssuesInOwnWords();
 
 const root = document.getElementById('root');
 if (!root) throw new Error('index.html has no element with the id "root".');

@@ -32,7 +32,7 @@ export function DoorPage({ title, lead, demoHospitalName, children }: DoorPagePr
           </div>
           {children}
           <div className="mt-auto flex flex-col gap-4 pt-8">
-            <ThemeSwitch />
+            <ThemeSwitch isInline />
             <Caution of="practitioners-decide" />
             <Caution of="local-regulation" />
           </div>

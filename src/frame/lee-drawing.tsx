@@ -1,6 +1,6 @@
 /** Rings around a source, held back behind a screen: contour lines of the shelter that names the product. */
 const source = { x: 170, y: 210 };
-const shadow = { centreDeg: 28, halfWidthDeg: 23, edgeDeg: 5, remaining: 0.34 };
+const shadow = { centreDeg: 28, halfWidthDeg: 23, edgeDeg: 7, remaining: 0.34 };
 const rings = [52, 78, 112, 156, 214, 290, 390, 520];
 
 const toRad = (deg: number): number => (deg * Math.PI) / 180;
@@ -15,8 +15,8 @@ function findReach(deg: number): number {
 
 function drawRing(radius: number): string {
   // Rings inside the screen's distance are whole.
-  const points = Array.from({ length: 240 }, (_, step) => {
-    const deg = step * 1.5 - 180;
+  const points = Array.from({ length: 900 }, (_, step) => {
+    const deg = step * 0.4 - 180;
     const reach = radius < 70 ? radius : Math.max(68, radius * findReach(deg));
     const wobble = 1 + 0.018 * Math.sin(toRad(deg) * 3 + radius);
     const x = source.x + reach * wobble * Math.cos(toRad(deg));

@@ -2,11 +2,12 @@ import { chooseTheme, themeChoices, themeNames, useThemeChoice } from '../lib/th
 import { RadioGroup } from '../ui/radio-group';
 
 /** Sheet, Dim, or as the system has it. */
-export function ThemeSwitch() {
+export function ThemeSwitch({ isInline }: { isInline?: boolean }) {
   const chosen = useThemeChoice();
   return (
     <RadioGroup
       legend="Theme"
+      isInline={isInline}
       value={chosen}
       choices={themeChoices.map((value) => ({ value, label: themeNames[value] }))}
       radio={{
