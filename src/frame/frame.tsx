@@ -1,6 +1,7 @@
 import { Suspense, useEffect, useRef } from 'react';
-import { Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
+import { Navigate, Outlet, ScrollRestoration, useLocation, useNavigation } from 'react-router-dom';
 import { useSession } from '../features/session/queries';
+import { buildSignInPath } from '../paths';
 import { Toasts } from '../ui/toasts';
 import { DemoBanner } from './demo-banner';
 import { TopBar } from './top-bar';
@@ -11,6 +12,9 @@ export function Frame() {
   const { user, hospital } = useSession();
   const content = useFocusOnNewPage();
   const navigation = useNavigation();
+  const { pathname, search } = useLocation();
+  // The session may end while a page is open: the answer to the next request says so.
+  if (!user) return <Navigate to={buildSignInPath(pathname + search)} replace />;
   return (
     <>
       <a
@@ -20,7 +24,7 @@ export function Frame() {
         Skip to the content
       </a>
       {hospital?.isDemo && <DemoBanner hospitalName={hospital.name} />}
-      {user && <TopBar user={user} />}
+      <TopBar user={user} />
       {navigation.state === 'loading' && <Waiting />}
       <main id="content" ref={content} tabIndex={-1} className="outline-none">
         <Suspense fallback={<Waiting />}>

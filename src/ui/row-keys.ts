@@ -1,8 +1,8 @@
 import type { KeyboardEvent } from 'react';
 
 const steps: Record<string, (place: number, last: number) => number> = {
-  ArrowDown: (place, last) => Math.min(place + 1, last),
-  ArrowUp: (place) => Math.max(place - 1, 0),
+  ArrowDown: (place) => place + 1,
+  ArrowUp: (place) => place - 1,
   Home: () => 0,
   End: (_place, last) => last,
 };
@@ -15,5 +15,6 @@ export function moveAlongRows(event: KeyboardEvent<HTMLElement>): void {
   const place = links.findIndex((link) => link === event.target);
   if (place < 0) return;
   event.preventDefault();
+  // Beyond the ends there is no link, and the focus stays.
   links[step(place, links.length - 1)]?.focus();
 }
