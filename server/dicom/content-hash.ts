@@ -9,32 +9,20 @@ const CLOSE = '\u001e';
 
 const codeText = (code: Code | null) => (code ? `${code.scheme}|${code.value}` : '');
 
-function append(parts: string[], item: ContentItem): void {
+function textOf(item: ContentItem): string {
   const { measurement } = item;
-  parts.push(
-    OPEN,
-    item.relationship,
-    FIELD,
-    item.valueType,
-    FIELD,
-    codeText(item.concept),
-    FIELD,
-    codeText(item.code),
-    FIELD,
-    item.text ?? '',
-    FIELD,
-    measurement ? `${measurement.text.join('\\')}|${codeText(measurement.unit)}` : '',
-  );
-  for (const child of item.children) append(parts, child);
-  parts.push(CLOSE);
+  const value = measurement
+    ? `${measurement.text.join('\\')}|${codeText(measurement.unit)}`
+    : (item.text ?? codeText(item.code));
+  let text = OPEN + item.valueType + FIELD + codeText(item.concept) + FIELD + value;
+  for (const child of item.children) text += textOf(child);
+  return text + CLOSE;
 }
 
 /**
- * SHA-256 (hexadecimal) of the content tree: relationships, concepts, values. Header, transfer syntax, character set,
+ * SHA-256 (hexadecimal) of the content tree: value types, concepts, values. Header, transfer syntax, character set,
  * lengths and the meanings of codes do not count: archives rewrite those.
  */
 export function hashContent(root: ContentItem): string {
-  const parts: string[] = [];
-  append(parts, root);
-  return createHash('sha256').update(parts.join('')).digest('hex');
+  return createHash('sha256').update(textOf(root)).digest('hex');
 }

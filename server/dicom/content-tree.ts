@@ -13,7 +13,6 @@ export interface Measurement {
 
 /** A content item of the SR tree (PS3.3 C.17.3) with its value, whichever type it is of. */
 export interface ContentItem {
-  relationship: string;
   valueType: string;
   concept: Code | null;
   /** The concept among those the reader knows. */
@@ -36,7 +35,15 @@ const textTags = new Map([
 
 const none: ContentItem[] = [];
 
+interface KnownCode {
+  code: Code;
+  name: ConceptName | null;
+}
+
 export class ContentTreeReader {
+  /** A report repeats few codes many times: each is decoded once, with the meaning of its first appearance. */
+  private readonly codes = new Map<string, KnownCode>();
+
   constructor(private readonly notice: CharacterSetNotice) {}
 
   /** The root container and everything below it. */
@@ -49,18 +56,47 @@ export class ContentTreeReader {
     const own = asciiOf(dataSet, 'x00080005');
     const text = own === null ? outerText : createTextReader(own, this.notice);
     const valueType = asciiOf(dataSet, 'x0040a040') ?? '';
-    const concept = readCode(firstItemOf(dataSet, 'x0040a043'), text);
+    const concept = this.readCode(firstItemOf(dataSet, 'x0040a043'), text);
     const textTag = textTags.get(valueType);
     const children = itemsOf(dataSet, 'x0040a730');
     return {
-      relationship: asciiOf(dataSet, 'x0040a010') ?? '',
       valueType,
-      concept,
-      name: concept && conceptNameOf(concept.scheme, concept.value),
-      code: valueType === 'CODE' ? readCode(firstItemOf(dataSet, 'x0040a168'), text) : null,
+      concept: concept?.code ?? null,
+      name: concept?.name ?? null,
+      code: valueType === 'CODE' ? this.codeOf(firstItemOf(dataSet, 'x0040a168'), text) : null,
       text: textTag === undefined ? null : readText(dataSet, textTag, text),
-      measurement: valueType === 'NUM' ? readMeasurement(dataSet, text) : null,
+      measurement: valueType === 'NUM' ? this.readMeasurement(dataSet, text) : null,
       children: children.length === 0 ? none : children.map((child) => this.readItem(child, text)),
+    };
+  }
+
+  private codeOf(item: DicomDataSet | undefined, reader: TextReader): Code | null {
+    return this.readCode(item, reader)?.code ?? null;
+  }
+
+  /** A code sequence item (PS3.3 table 8.8-1): Code Value, Long Code Value or URN Code Value. */
+  private readCode(item: DicomDataSet | undefined, reader: TextReader): KnownCode | null {
+    if (!item) return null;
+    const value = asciiOf(item, 'x00080100') ?? asciiOf(item, 'x00080119') ?? asciiOf(item, 'x00080120');
+    if (value === null) return null;
+    const scheme = asciiOf(item, 'x00080102') ?? '';
+    const key = `${scheme}|${value}`;
+    let known = this.codes.get(key);
+    if (!known) {
+      const meaning = readText(item, 'x00080104', reader) ?? '';
+      const code = { value: value.trim(), scheme: scheme.trim(), meaning };
+      this.codes.set(key, (known = { code, name: conceptNameOf(code.scheme, code.value) }));
+    }
+    return known;
+  }
+
+  private readMeasurement(dataSet: DicomDataSet, reader: TextReader): Measurement {
+    const measured = firstItemOf(dataSet, 'x0040a300');
+    const text = measured ? asciiOf(measured, 'x0040a30a') : null;
+    return {
+      text: text === null ? [] : text.split('\\').map((part) => part.trim()),
+      unit: measured ? this.codeOf(firstItemOf(measured, 'x004008ea'), reader) : null,
+      qualifier: this.codeOf(firstItemOf(dataSet, 'x0040a301'), reader),
     };
   }
 }
@@ -69,26 +105,4 @@ export class ContentTreeReader {
 export function readText(dataSet: DicomDataSet, tag: string, reader: TextReader): string | null {
   const bytes = bytesOf(dataSet, tag);
   return bytes === undefined || bytes.length === 0 ? null : reader.decode(bytes) || null;
-}
-
-/** A code sequence item (PS3.3 table 8.8-1): Code Value, Long Code Value or URN Code Value. */
-export function readCode(item: DicomDataSet | undefined, reader: TextReader): Code | null {
-  if (!item) return null;
-  const value = asciiOf(item, 'x00080100') ?? asciiOf(item, 'x00080119') ?? asciiOf(item, 'x00080120');
-  if (value === null) return null;
-  return {
-    value: value.trim(),
-    scheme: asciiOf(item, 'x00080102')?.trim() ?? '',
-    meaning: readText(item, 'x00080104', reader) ?? '',
-  };
-}
-
-function readMeasurement(dataSet: DicomDataSet, reader: TextReader): Measurement {
-  const measured = firstItemOf(dataSet, 'x0040a300');
-  const text = measured ? asciiOf(measured, 'x0040a30a') : null;
-  return {
-    text: text === null ? [] : text.split('\\').map((part) => part.trim()),
-    unit: measured ? readCode(firstItemOf(measured, 'x004008ea'), reader) : null,
-    qualifier: readCode(firstItemOf(dataSet, 'x0040a301'), reader),
-  };
 }

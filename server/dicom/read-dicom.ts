@@ -7,8 +7,11 @@ import { scanStructure } from './scan-structure';
 /** The package is CommonJS: Node's own loader shows its functions at `default` only, bundlers at the top. */
 const dicomParser = 'default' in library ? (library.default as typeof library) : library;
 
+/** Node's own slice to text, several times faster on short values than `toString`; its types leave it out. */
+type SliceableBuffer = Buffer & { latin1Slice(start: number, end: number): string };
+
 /** A data set or the data set of an item: elements by tag ("x00080018") over shared bytes. */
-export type DicomDataSet = Pick<DataSet, 'elements'> & { byteArray: Buffer };
+export type DicomDataSet = Pick<DataSet, 'elements'> & { byteArray: SliceableBuffer };
 
 export interface DicomFile {
   dataSet: DicomDataSet;
@@ -24,7 +27,7 @@ export function readDicom(bytes: Uint8Array): DicomFile {
     Buffer.from(bytes.buffer, bytes.byteOffset, bytes.length),
   );
   scanStructure(data, encoding);
-  const dataSet: DicomDataSet = { elements: {}, byteArray: data };
+  const dataSet: DicomDataSet = { elements: {}, byteArray: data as SliceableBuffer };
   const parser = encoding.isBigEndian
     ? dicomParser.bigEndianByteArrayParser
     : dicomParser.littleEndianByteArrayParser;
@@ -70,5 +73,5 @@ export function asciiOf(dataSet: DicomDataSet, tag: string): string | null {
   let end = element.dataOffset + element.length;
   const bytes = dataSet.byteArray;
   while (end > element.dataOffset && (bytes[end - 1] === 0x20 || bytes[end - 1] === 0)) end -= 1;
-  return end > element.dataOffset ? bytes.toString('latin1', element.dataOffset, end) : null;
+  return end > element.dataOffset ? bytes.latin1Slice(element.dataOffset, end) : null;
 }
