@@ -1,5 +1,5 @@
 import { groupThousands } from '../../shared/units';
-import { findDecades, findLogTicks, placeOnLogScale } from './log-scale';
+import { findDecades, findLogTicks, placeOnLogScale } from '../lib/log-scale';
 
 type LevelRuleProps = {
   value: number | null;

@@ -1,7 +1,7 @@
 import type { EChartsCoreOption } from 'echarts/core';
 import { binValues } from './bin-values';
 import type { ChartColours } from './chart-colours';
-import { findDecades, findLogRange, findLogTicks } from './log-scale';
+import { findDecades, findLogRange, findLogTicks } from '../lib/log-scale';
 import type { ScatterGuide, ScatterPoint } from './scatter.types';
 import { findRoundTicks } from './ticks';
 import { toneSizes } from './tone-sizes';

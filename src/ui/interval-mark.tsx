@@ -1,3 +1,5 @@
+import { findDecades, placeOnLogScale } from '../lib/log-scale';
+
 type IntervalMarkProps = {
   nominal: number | null;
   low: number | null;
@@ -13,12 +15,6 @@ type IntervalMarkProps = {
 };
 
 const height = 20;
-
-/** Place of a value on a logarithmic scale, 0..1; what lies outside is held at the end. */
-export function placeOnLogScale(value: number, from: number, to: number): number {
-  if (value <= 0) return 0;
-  return Math.min(1, Math.max(0, Math.log(value / from) / Math.log(to / from)));
-}
 
 /** Dot and interval on a log scale; never a filled bar, for an estimate is not an amount. */
 export function IntervalMark({
@@ -52,11 +48,4 @@ export function IntervalMark({
       {nominal !== null && <circle cx={place(nominal)} cy={middle} r="4" className="fill-ink stroke-paper" />}
     </svg>
   );
-}
-
-/** The powers of ten inside a scale. */
-export function findDecades(from: number, to: number): number[] {
-  const first = Math.ceil(Math.log10(from) - 1e-9);
-  const last = Math.floor(Math.log10(to) + 1e-9);
-  return Array.from({ length: Math.max(0, last - first + 1) }, (_, step) => 10 ** (first + step));
 }
