@@ -9,9 +9,21 @@ export const paths = {
   staffExposure: '/staff-exposure',
   myExposure: '/my-exposure',
   garments: '/garments',
+  garment: (id: string) => `/garments/${id}`,
   methods: '/methods',
   administration: '/admin',
+  people: '/admin/people',
+  person: (id: string) => `/admin/people/${id}`,
+  rooms: '/admin/rooms',
+  room: (id: string) => `/admin/rooms/${id}`,
+  equipment: '/admin/equipment',
+  machine: (id: string) => `/admin/equipment/${id}`,
+  procedureTypes: '/admin/procedure-types',
+  procedureType: (id: string) => `/admin/procedure-types/${id}`,
 } as const;
+
+/** Stands for the id where a record is still to be added. */
+export const newId = 'new';
 
 /** The sign-in page, which leads back to where the person wanted to go. */
 export const buildSignInPath = (next: string): string =>

@@ -10,6 +10,17 @@ import { buildSignInPath, paths } from './paths';
 /** The URL map of what stands behind the sign-in. A page is loaded when it is opened. */
 const pages: RouteObject[] = [
   { path: paths.home, lazy: () => import('./pages/home') },
+  { path: paths.garments, lazy: () => import('./pages/garments') },
+  { path: paths.garment(':id'), lazy: () => import('./pages/garment') },
+  { path: paths.administration, lazy: () => import('./pages/admin') },
+  { path: paths.people, lazy: () => import('./pages/admin-people') },
+  { path: paths.person(':id'), lazy: () => import('./pages/admin-person') },
+  { path: paths.rooms, lazy: () => import('./pages/admin-rooms') },
+  { path: paths.room(':id'), lazy: () => import('./pages/admin-room') },
+  { path: paths.equipment, lazy: () => import('./pages/admin-equipment') },
+  { path: paths.machine(':id'), lazy: () => import('./pages/admin-machine') },
+  { path: paths.procedureTypes, lazy: () => import('./pages/admin-procedure-types') },
+  { path: paths.procedureType(':id'), lazy: () => import('./pages/admin-procedure-type') },
   { path: '*', Component: NotFound },
 ];
 

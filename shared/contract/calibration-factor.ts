@@ -33,7 +33,7 @@ export const calibrationFactorInputSchema = z.object({
   plane: z.enum(calibratedPlanes),
   quantity: z.enum(calibratedQuantities),
   factor: z.number().min(0.2, 'Between 0.2 and 5.').max(5, 'Between 0.2 and 5.'),
-  uncertaintyPercent: z.number().min(0).max(100).nullable(),
+  uncertaintyPercent: z.number().min(0, 'Between 0 and 100 %.').max(100, 'Between 0 and 100 %.').nullable(),
   validFrom: calendarDateSchema,
   source: requiredText(300),
 });

@@ -56,7 +56,7 @@ export const garmentInputSchema = z.object({
   material: z.enum(garmentMaterials),
   frontLeadMm: leadMm,
   backLeadMm: leadMm,
-  leadKvp: z.number().min(40).max(150).nullable(),
+  leadKvp: z.number().min(40, 'Between 40 and 150 kV.').max(150, 'Between 40 and 150 kV.').nullable(),
   isMeasured: z.boolean(),
   ownerId: idSchema.nullable(),
   state: z.enum(garmentStates),

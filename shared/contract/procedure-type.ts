@@ -19,7 +19,7 @@ export const procedureTypeInputSchema = z.object({
   key: requiredText(20),
   name: requiredText(120),
   bodyRegion: z.enum(bodyRegions),
-  typicalKvp: z.number().min(40).max(150).nullable(),
+  typicalKvp: z.number().min(40, 'Between 40 and 150 kV.').max(150, 'Between 40 and 150 kV.').nullable(),
   /** Words in the study description or protocol that suggest this type. */
   recognisedBy: z.array(requiredText(120)).max(40),
   isActive: z.boolean(),

@@ -1,6 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { useLinkSchema, type SignInLink, type UseLink } from '../../../shared/contract/session';
+import { placeIssues } from '../../lib/place-issues';
 import { Button } from '../../ui/button';
 import { ProblemNote } from '../../ui/problem-note';
 import { TextField } from '../../ui/text-field';
@@ -25,7 +26,12 @@ export function WelcomeForm({ token, link, onDone }: WelcomeFormProps) {
     <form
       noValidate
       onSubmit={(event) =>
-        void form.handleSubmit((values) => spend.mutate(values, { onSuccess: onDone }))(event)
+        void form.handleSubmit((values) =>
+          spend.mutate(values, {
+            onSuccess: onDone,
+            onError: (error) => placeIssues(error, form.setError),
+          }),
+        )(event)
       }
       className="flex flex-col gap-4"
     >
