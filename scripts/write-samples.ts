@@ -20,13 +20,11 @@ from the reader: \`outcome\`, then either \`report\` and \`warningCodes\`, or \`
 "valid" means: dciodvfy (dicom3tools) finds no error in it. Its deflated sample is checked after inflating, because
 that tool does not inflate.
 
-| file | how it was made | valid | outcome |
-|---|---|---|---|
 `;
 
-function row({ fileName, how, isValid, expected }: Sample): string {
+function line({ fileName, how, isValid, expected }: Sample): string {
   const outcome = expected.outcome === 'read' ? 'read' : `refused, ${expected.reasonCode}`;
-  return `| ${fileName} | ${how} | ${isValid ? 'yes' : 'no'} | ${outcome} |\n`;
+  return `- **${fileName}** (${isValid ? 'valid, ' : ''}${outcome}): ${how}\n`;
 }
 
 mkdirSync(folder, { recursive: true });
@@ -36,5 +34,5 @@ for (const { fileName, bytes, expected, isValid } of samples) {
   const name = fileName.replace(/\.[^.]+$/, '');
   writeFileSync(`${folder}${name}.expected.json`, `${JSON.stringify({ fileName, isValid, ...expected })}\n`);
 }
-writeFileSync(`${folder}README.md`, introduction + samples.map(row).join(''));
+writeFileSync(`${folder}README.md`, introduction + samples.map(line).join(''));
 process.stdout.write(`${samples.length} samples written to samples/\n`);

@@ -3,7 +3,7 @@ import { ReadFailure } from './read-failure';
 const STORAGE = '1.2.840.10008.5.1.4.1.1.';
 
 /** Storage classes that are neither images nor structured reports, by the number after the storage root. */
-const otherObjects = /^(9|11|66|67|68|79|80|481\.(?!1$)\d+)(\.|$)|^481\.(?!1$)/;
+const otherObjects = /^(9|11|66|67|68|79|80)(\.|$)|^481\.(?!1$)/;
 
 /**
  * Stops early at what cannot be a dose report, by SOP class (PS3.4 annex B, PS3.6 annex A). Structured reports of
