@@ -107,6 +107,35 @@ describe('what makes the interval wider', () => {
     expect(spread?.low).toBe(0.05);
   });
 
+  it('the scatter model by where the ray goes: forward, and back-scatter through the table top', () => {
+    const { spreads } = estimate(calibrated);
+    const spreadOf = (quantity: EstimatedQuantity) =>
+      spreads[quantity]?.find(({ input }) => input === 'scatter-model');
+    // Waist at 96°: −78…+40 %. Leg at 128°: −45…+20 %, a further 40 % down.
+    expect(spreadOf('waistAirKermaUGy')).toMatchObject({ low: 0.22, high: 1.4 });
+    expect(spreadOf('lowerLegAirKermaUGy')).toMatchObject({ low: 0.33, high: 1.2 });
+  });
+
+  it('a missing kVp through the scatter before the garment, and its transmission behind it', () => {
+    const { spreads } = estimate({ kvp: null });
+    const highOf = (quantity: EstimatedQuantity) =>
+      spreads[quantity]?.find(({ input }) => input === 'tube-voltage')?.high ?? Number.NaN;
+    // By hand, 100 against 80 kV: scatter 1.08981/0.97007; lead 0.5 mm 0.047201/0.013703.
+    expect(highOf('collarAirKermaUGy')).toBeCloseTo(1.12343, 4);
+    expect(highOf('underGarmentHp10USv')).toBeCloseTo(1.12343 * 3.4446, 2);
+  });
+
+  it('a preset place of one part by that part only', () => {
+    const preset = placeFromPreset('operator');
+    const given = { ...preset, preset: null };
+    const events = [exampleEvent(), exampleEvent({ type: 'stationary-acquisition' })];
+    const both = { fluoroscopyPlace: preset, acquisitionPlace: given };
+    const { spreads } = estimateStaffExposure(events, examplePerson(both), exampleContext());
+    // Half of the sum stands at ×1.5, half where it was given.
+    const position = spreads.eyeAirKermaUGy?.find(({ input }) => input === 'position');
+    expect(position?.high).toBeCloseTo(1.25, 5);
+  });
+
   it('nothing at all is left where everything is exact but the scatter model and the calibration', () => {
     const inputs = estimate(calibrated).spreads.collarAirKermaUGy?.map(({ input }) => input);
     expect(inputs).toEqual(['kap-calibration', 'scatter-model']);

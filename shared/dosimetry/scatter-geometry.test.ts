@@ -26,6 +26,8 @@ describe('what a ray meets', () => {
     expect(crossesTable([-0.6, -0.45, -0.61])).toBe(true));
   it('passes over the table on its way to the waist', () =>
     expect(crossesTable([-0.6, -0.45, -0.084])).toBe(false));
+  it('ends above the table top before it could pass it', () =>
+    expect(crossesTable([-0.1, -0.2, -0.05])).toBe(false));
   it('misses the table far below its side', () => expect(crossesTable([-2, 0, -0.3])).toBe(false));
   it('meets the detector near the beam’s axis only', () =>
     expect([20, 33, 34.5, 90].map(crossesDetector)).toEqual([true, true, false, false]));
