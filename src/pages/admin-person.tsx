@@ -46,7 +46,9 @@ function PersonPage({ person }: { person: Person | null }) {
   return (
     <AdminPage
       title={title}
-      margin={person?.email && person.isActive && <InvitePart person={person} onInvited={setInvited} />}
+      margin={
+        person?.email && person.isActive ? <InvitePart person={person} onInvited={setInvited} /> : undefined
+      }
     >
       <PersonForm person={person} backTo={paths.people} onSaved={finish} />
     </AdminPage>

@@ -26,9 +26,11 @@ export function Component() {
     <Page
       title={garment ? `Garment ${garment.code}` : 'Add a garment'}
       margin={
-        <MarginNote title="Where it counts">
-          <Caution of="garment-condition" values={{ date: garment?.lastInspectedOn ?? 'on no known day' }} />
-        </MarginNote>
+        garment ? (
+          <MarginNote title="Where it counts">
+            <Caution of="garment-condition" values={{ date: garment.lastInspectedOn ?? 'on no known day' }} />
+          </MarginNote>
+        ) : undefined
       }
     >
       <GarmentForm

@@ -2,6 +2,7 @@ import type { UseMutationResult } from '@tanstack/react-query';
 import { useCallback, useRef, type FormEvent, type ReactNode } from 'react';
 import type { FieldValues, UseFormReturn } from 'react-hook-form';
 import { ApiProblem } from '../lib/api-problem';
+import { mergeVersions } from '../lib/merge-versions';
 import { placeIssues } from '../lib/place-issues';
 import { Button, ButtonLink } from './button';
 import { ConflictNote } from './conflict-note';
@@ -35,7 +36,7 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
   describe,
   children,
 }: RecordFormProps<Input, Output, Saved>) {
-  const { isDirty } = form.formState;
+  const { isDirty, defaultValues } = form.formState;
   const isDone = useRef(false);
   const isGuarding = useCallback(() => isDirty && !isDone.current, [isDirty]);
 
@@ -54,6 +55,12 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
 
   const isConflict = save.error instanceof ApiProblem && save.error.code === 'conflict';
   const theirs = isConflict ? readCurrent((save.error as ApiProblem).problem.current) : null;
+  const merge = (): Input | null =>
+    theirs && mergeVersions<Input>(defaultValues ?? {}, form.getValues(), theirs);
+  const saveVersion = (values: Input) => {
+    form.reset(values, { keepDefaultValues: true });
+    submit();
+  };
   return (
     <form noValidate onSubmit={submit} className="flex max-w-3xl flex-col gap-5">
       {!theirs && <ProblemNote error={save.error} kept="Your entries are still in the form." />}
@@ -61,10 +68,8 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
         <ConflictNote
           rows={compareVersions(describe(form.getValues()), describe(theirs))}
           isBusy={save.isPending}
-          onKeepMine={() => {
-            form.setValue('version' as never, theirs['version']);
-            submit();
-          }}
+          onMerge={merge() && (() => saveVersion(merge() ?? form.getValues()))}
+          onKeepMine={() => saveVersion({ ...form.getValues(), version: theirs['version'] })}
           onTakeTheirs={() => {
             form.reset(theirs);
             save.reset();

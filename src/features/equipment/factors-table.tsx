@@ -23,11 +23,10 @@ export function FactorsTable({ equipmentId, timeZone }: { equipmentId: string; t
       align: 'end',
       cell: (factor) => formatDecimals(factor.uncertaintyPercent, 1),
     },
-    { key: 'source', head: 'Source', phone: 'wide', cell: (factor) => factor.source },
+    { key: 'source', head: 'Source', cell: (factor) => factor.source },
     {
       key: 'entered',
       head: 'Entered',
-      phone: 'wide',
       cell: (factor) => `${formatInstant(factor.enteredAt, timeZone)} by ${factor.enteredBy}`,
     },
   ];

@@ -1,4 +1,4 @@
-import { useRef, useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '../../ui/button';
 import { Field, controlLook } from '../../ui/field';
 
@@ -8,6 +8,8 @@ type InvitationPanelProps = { name: string; email: string | null; url: string };
 export function InvitationPanel({ name, email, url }: InvitationPanelProps) {
   const field = useRef<HTMLInputElement>(null);
   const [copied, setCopied] = useState<'no' | 'yes' | 'refused'>('no');
+  // It takes the form's place: the focus must not be left behind there.
+  useEffect(() => field.current?.focus(), []);
   const copy = async () => {
     field.current?.select();
     try {

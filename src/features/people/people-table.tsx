@@ -1,5 +1,5 @@
 import { jobNames, type Person } from '../../../shared/contract/person';
-import { formatMetres } from '../../../shared/units';
+import { formatMetres, MISSING } from '../../../shared/units';
 import { DataTable } from '../../ui/data-table';
 import type { Column } from '../../ui/data-table.types';
 import { EmptyState } from '../../ui/empty-state';
@@ -10,13 +10,12 @@ import { describeSignIn, listRoles } from './person-values';
 const columns: Column<Person>[] = [
   { key: 'name', head: 'Name', phone: 'title', cell: (person) => person.name },
   { key: 'job', head: 'Job', cell: (person) => jobNames[person.job] },
-  { key: 'roles', head: 'Roles', cell: (person) => listRoles(person.roles) || 'none' },
+  { key: 'roles', head: 'Roles', cell: (person) => listRoles(person.roles) || MISSING },
   {
     key: 'email',
     head: 'E-mail',
-    phone: 'wide',
     className: 'wrap-anywhere',
-    cell: (person) => person.email,
+    cell: (person) => person.email ?? MISSING,
   },
   { key: 'sign-in', head: 'Sign-in', cell: describeSignIn },
   {

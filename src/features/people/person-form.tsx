@@ -75,7 +75,7 @@ export function PersonForm({ person, backTo, onSaved }: PersonFormProps) {
       </FieldGroup>
       <FieldGroup
         legend="Sign-in"
-        note="Staff without a sign-in need no e-mail. Everyone who signs in sees the own exposure and garments; a role opens more."
+        note="Staff without a sign-in need no e-mail. Everyone who signs in sees their own exposure and garments; a role opens more."
       >
         <TextField
           label="E-mail"

@@ -14,10 +14,10 @@ export const jobChoices = jobs.map((value: Job) => ({ value, label: jobNames[val
 /** What each role opens, for the person who gives it away. */
 export const roleHints: Record<Role, string> = {
   technologist: 'Receives reports, completes records; sees patients’ identities.',
-  physicist: 'Sees everything but administration of people and rooms; keeps factors and types.',
+  physicist: 'Sees all procedures and everyone’s exposure; keeps machines, factors, types and garments.',
   interventionalist: 'Sees own procedures and own exposure only.',
   committee: 'Sees figures without names of patients or staff.',
-  administrator: 'Keeps people, rooms and machines; sees no procedures.',
+  administrator: 'Keeps people, rooms, machines, types and garments; sees no procedures and no patients.',
 };
 
 export const listRoles = (roles: readonly Role[]): string => roles.map((role) => roleNames[role]).join(', ');
