@@ -5,6 +5,7 @@ import { PeopleTable } from '../features/people/people-table';
 import { jobChoices } from '../features/people/person-values';
 import { personQueries } from '../features/people/queries';
 import { AdminPage } from '../frame/admin-page';
+import { useSearchText } from '../lib/search-text';
 import { useUrlFilter } from '../lib/url-filter';
 import { newId, paths } from '../paths';
 import { ButtonLink } from '../ui/button';
@@ -27,12 +28,12 @@ const stays = [
 export function Component() {
   const { data: people } = useSuspenseQuery(personQueries.list());
   const [filter, changeFilter] = useUrlFilter(filterSchema);
-  const typed = filter.name.trim().toLowerCase();
+  const search = useSearchText(filter.name, (name) => changeFilter({ name }));
   const found = people.filter(
     (person) =>
       (filter.job === 'any' || person.job === filter.job) &&
       (filter.stay === 'either' || person.isActive === (filter.stay === 'here')) &&
-      `${person.name} ${person.email ?? ''}`.toLowerCase().includes(typed),
+      `${person.name} ${person.email ?? ''}`.toLowerCase().includes(search.text),
   );
   const signIns = people.filter((person) => person.isActive && person.hasPassword).length;
   return (
@@ -62,13 +63,7 @@ export function Component() {
         </ButtonLink>
       }
     >
-      <TextField
-        label="Name or e-mail contains"
-        type="search"
-        className="max-w-sm"
-        value={filter.name}
-        onChange={(event) => changeFilter({ name: event.target.value })}
-      />
+      <TextField label="Name or e-mail contains" type="search" className="max-w-sm" {...search.input} />
       <PeopleTable people={found} hrefOf={paths.person} isFiltered={people.length > 0} />
     </AdminPage>
   );
