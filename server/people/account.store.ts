@@ -63,6 +63,11 @@ export async function setPassword(db: EntityManager, personId: string, passwordH
   await db.update(Account, { personId }, { passwordHash });
 }
 
+/** Signs a person out everywhere: a new password ends what the old one opened. */
+export async function endSessionsOf(db: EntityManager, personId: string): Promise<void> {
+  await db.query(`delete from session where sess->'passport'->>'user' = $1`, [personId]);
+}
+
 export async function removeAccount(db: EntityManager, personId: string): Promise<void> {
   await db.delete(Account, { personId });
 }

@@ -1,5 +1,5 @@
 import { IANAZone } from 'luxon';
-import type { EntityManager } from 'typeorm';
+import type { Db } from '../db/db';
 import type { SignInLink, UseLink } from '../../shared/contract/session';
 import { noteAudit } from '../audit/audit.store';
 import { addHospital } from '../hospital/hospital.store';
@@ -7,12 +7,12 @@ import type { Actor } from '../kernel/actor';
 import { newId } from '../kernel/new-id';
 import { Problem } from '../kernel/problem';
 import { addDefaultLevels } from '../levels/add-default-levels';
-import { findActor, saveAccount, setPassword } from '../people/account.store';
+import { endSessionsOf, findActor, saveAccount, setPassword } from '../people/account.store';
 import { hashPassword } from '../people/password';
 import { addPerson } from '../people/person.store';
 import { findOpenLink, spendLink } from '../people/sign-in-link.store';
 
-type Deps = { db: EntityManager; now: () => Date };
+type Deps = { db: Db; now: () => Date };
 
 const spent = () =>
   new Problem('link-spent', 'This link has been used or has expired. Ask an administrator for a new one.');
@@ -33,6 +33,7 @@ export async function useLink({ db, now }: Deps, input: UseLink): Promise<Actor>
     const personId = link.personId ?? (await addFirstAdministrator(tx, input));
     if (!(await spendLink(tx, input.token, now()))) throw spent();
     await setPassword(tx, personId, passwordHash);
+    await endSessionsOf(tx, personId);
     const actor = await findActor(tx, personId);
     if (!actor) throw spent();
     await noteAudit(tx, {
@@ -46,7 +47,7 @@ export async function useLink({ db, now }: Deps, input: UseLink): Promise<Actor>
   });
 }
 
-async function addFirstAdministrator(tx: EntityManager, input: UseLink): Promise<string> {
+async function addFirstAdministrator(tx: Db, input: UseLink): Promise<string> {
   const issues = (['hospitalName', 'timeZone', 'name', 'email'] as const)
     .filter((field) => !input[field])
     .map((field) => ({ pointer: `/${field}`, detail: 'Fill this in.' }));

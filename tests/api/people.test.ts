@@ -91,6 +91,19 @@ test('a new invitation ends the one before, and only its hash is kept', async ()
   expect(kept[0].kept).not.toContain(token);
 });
 
+test('a newly chosen password ends the sessions that the old one opened, and no others', async () => {
+  const email = `forgot-${number}@example.org`;
+  const id = await makePerson(app.dataSource, hospitalId, { email, roles: ['technologist'] });
+  const before = await signIn(app.app, email, testPassword);
+  const { body } = await administrator.post(`/api/people/${id}/invitation`).expect(201);
+  const token = body.invitationUrl.split('/').pop();
+  const after = request.agent(app.app);
+  await after.post('/api/sign-in-links').send({ token, password: 'another long password' }).expect(200);
+  await before.get('/api/rooms').expect(401);
+  await after.get('/api/rooms').expect(200);
+  await administrator.get('/api/people').expect(200);
+});
+
 test('a person without an e-mail, and one who left, cannot be invited', async () => {
   const { body: nurse } = await administrator.post('/api/people').send(personInput()).expect(201);
   const refused = await administrator.post(`/api/people/${nurse.person.id}/invitation`).expect(422);
