@@ -44,7 +44,7 @@ const only = (files, patterns) => ({
   rules: { 'no-restricted-imports': ['error', { patterns }] },
 });
 const noExpress = {
-  group: ['express', 'express-*', 'multer', 'passport*'],
+  regex: '^(express|multer|passport)(-|/|$)',
   message: 'Only routes and http/ know Express.',
 };
 const noTypeorm = {

@@ -1,12 +1,8 @@
 import type { EntityManager } from 'typeorm';
 import { CalibrationFactor } from '../equipment/calibration-factor.entity';
 import { Equipment } from '../equipment/equipment.entity';
-import { Garment } from '../garments/garment.entity';
 import { Hospital } from '../hospital/hospital.entity';
 import { Level } from '../levels/level.entity';
-import { Person } from '../people/person.entity';
-import { ProcedureType } from '../procedure-types/procedure-type.entity';
-import type { EstimateRegisters } from './estimate-rows';
 import { demoHospital } from './hospital';
 
 /** The demo hospital once it is whole. Seeding is one transaction, so a half one is never seen. */
@@ -44,18 +40,6 @@ export async function drawCaseNumbers(db: EntityManager, count: number): Promise
     [count],
   );
   return rows.map((row) => Number(row.number));
-}
-
-/** Garments by id, statures by person, usual kVp by procedure type. */
-export async function readRegisters(db: EntityManager, hospitalId: string): Promise<EstimateRegisters> {
-  const garments = await db.findBy(Garment, { hospitalId });
-  const people = await db.findBy(Person, { hospitalId });
-  const types = await db.findBy(ProcedureType, { hospitalId });
-  return {
-    garments: new Map(garments.map((garment) => [garment.id, garment])),
-    staturesM: new Map(people.map(({ id, statureM }) => [id, statureM])),
-    typicalKvps: new Map(types.map(({ id, typicalKvp }) => [id, typicalKvp])),
-  };
 }
 
 /** Fresh statistics: without them the planner takes the new tables for empty. */

@@ -1,37 +1,19 @@
-import {
-  placeFromPreset,
-  type PositionPreset as DosimetryPreset,
-} from '../../shared/dosimetry/room-positions';
-import type { Place as DosimetryPlace } from '../../shared/dosimetry/exposure-types';
-import type { Place, PositionPreset } from '../../shared/contract/record';
+import { placeFromPreset } from '../../shared/dosimetry/room-positions';
+import type { Place, PositionPreset, Presence as PresenceContract } from '../../shared/contract/record';
 import type { Presence } from '../procedures/presence.entity';
 import { bulkId } from './bulk-ids';
 import type { DemoProcedure } from './demo-types';
 import { type DemoIds, idOf } from './seed-hospital';
 
-/** The model's own short name of the second operator's place. */
-const toDosimetryPreset = (preset: PositionPreset): DosimetryPreset =>
-  preset === 'second-operator' ? 'second' : preset;
-
 function toPlace(preset: PositionPreset): Place {
-  const { xM, yM, isBehindBarrier } = placeFromPreset(toDosimetryPreset(preset));
+  const { xM, yM, isBehindBarrier } = placeFromPreset(preset);
   return { preset, xM, yM, isBehindBarrier };
 }
 
-/** A stored place as the estimate takes it. */
-export function toDosimetryPlace(place: Place | null): DosimetryPlace {
-  if (!place) throw new Error('A completed record has a place for everybody.');
-  return { ...place, preset: place.preset === null ? null : toDosimetryPreset(place.preset) };
-}
-
-/** The people of a completed record as rows, in the order in which the form lists them. */
-export function toPresenceRows(procedure: DemoProcedure, procedureId: string, ids: DemoIds): Presence[] {
-  return procedure.staff.map(
-    ({ staffCode, fluoroscopyPreset, acquisitionPreset, garmentCode, ...person }, position): Presence => ({
-      id: bulkId(procedure.startedAt),
-      procedureId,
-      revision: firstRevision,
-      position,
+/** The people of a record as a person would write them into the form. */
+export const describePresences = (procedure: DemoProcedure, ids: DemoIds): PresenceContract[] =>
+  procedure.staff.map(
+    ({ staffCode, fluoroscopyPreset, acquisitionPreset, garmentCode, ...answers }): PresenceContract => ({
       personId: idOf(ids.people, staffCode),
       visitorName: null,
       fluoroscopyPlace: toPlace(fluoroscopyPreset),
@@ -41,10 +23,19 @@ export function toPresenceRows(procedure: DemoProcedure, procedureId: string, id
       garmentId: garmentCode === null ? null : idOf(ids.garments, garmentCode),
       presentFromS: null,
       presentToS: null,
-      ...person,
+      ...answers,
     }),
   );
-}
+
+/** The people of a completed record as rows, in the order in which the form lists them. */
+export const toPresenceRows = (procedure: DemoProcedure, procedureId: string, ids: DemoIds): Presence[] =>
+  describePresences(procedure, ids).map((presence, position) => ({
+    id: bulkId(procedure.startedAt),
+    procedureId,
+    revision: firstRevision,
+    position,
+    ...presence,
+  }));
 
 /** The record of a generated procedure was completed once. */
 export const firstRevision = 1;

@@ -1,5 +1,6 @@
 import type { DataSource } from 'typeorm';
 import { hashPassword, isPasswordRight } from '../people/password';
+import { readRegisters } from '../staff-exposure/registers.store';
 import { findSignIn, setPassword } from '../people/account.store';
 import type { Db } from '../db/db';
 import {
@@ -9,7 +10,6 @@ import {
   listAllLevels,
   listFactors,
   markFinished,
-  readRegisters,
   waitForOtherSeeders,
 } from './demo-hospital.store';
 import type { DemoProcedure } from './demo-types';

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { Db } from '../db/db';
 import { insertLevels } from './level.store';
 
 const source =
@@ -8,7 +8,7 @@ const source =
  * Levels a new hospital starts with: first notification and substantial level for reference air kerma (Gy),
  * kerma-area product (Gy·cm²) and fluoroscopy time (s). A department's own policy replaces them.
  */
-export const addDefaultLevels = (db: EntityManager, hospitalId: string): Promise<void> =>
+export const addDefaultLevels = (db: Db, hospitalId: string): Promise<void> =>
   insertLevels(
     db,
     hospitalId,

@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { Db } from '../db/db';
 import { hasAnyAccount } from '../people/account.store';
 import { dropLinks, makeLink } from '../people/sign-in-link.store';
 
@@ -6,7 +6,7 @@ const day = 86_400_000;
 
 /** Where nobody can sign in yet, prints a one-time link that makes the first administrator. */
 export async function offerFirstAdministrator(
-  db: EntityManager,
+  db: Db,
   url: string,
   report: (line: string) => void,
 ): Promise<void> {

@@ -21,7 +21,12 @@ import { isUnchangedPreset, type PositionPreset } from './room-positions';
 import { scatterPerKap, type ScatterModelId } from './scatter-air-kerma';
 import { noSpread, type Spread } from './spread';
 
-const tablePresets: readonly PositionPreset[] = ['operator', 'second', 'jugular-access', 'left-chest'];
+const tablePresets: readonly PositionPreset[] = [
+  'operator',
+  'second-operator',
+  'jugular-access',
+  'left-chest',
+];
 
 function positionSpread(place: Place): Spread {
   if (place.preset === null || !isUnchangedPreset(place)) return noSpread;

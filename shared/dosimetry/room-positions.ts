@@ -7,7 +7,7 @@ import type { AccessSide, Place } from './exposure-types';
  */
 export const positionPresets = {
   operator: { xM: -0.6, yM: -0.45, isBehindBarrier: false },
-  second: { xM: -0.65, yM: -1.0, isBehindBarrier: false },
+  'second-operator': { xM: -0.65, yM: -1.0, isBehindBarrier: false },
   scrub: { xM: -0.7, yM: -1.35, isBehindBarrier: false },
   anaesthesia: { xM: 0.6, yM: 1.4, isBehindBarrier: false },
   circulating: { xM: 1.5, yM: -2.0, isBehindBarrier: false },

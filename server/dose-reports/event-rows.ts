@@ -1,0 +1,71 @@
+import type { Report } from '../../shared/contract/report';
+import type { ReportEvent } from '../../shared/contract/report-event';
+import { newId } from '../kernel/new-id';
+import { toInstant } from '../procedures/place-in-time';
+import type { NewEvent } from '../procedures/irradiation-event.store';
+
+/** Irradiation event UID and plane; an event without UID is known by its place in its report. */
+const keyOf = (event: ReportEvent, sopInstanceUid: string | null, index: number) =>
+  event.irradiationEventUid === null
+    ? `${sopInstanceUid ?? ''}#${index}`
+    : `${event.irradiationEventUid}|${event.plane ?? ''}`;
+
+const withOffset = (local: string | null, offset: string | null) =>
+  local === null ? null : offset && !/[zZ]|[+-]\d\d:?\d\d$/.test(local) ? `${local}${offset}` : local;
+
+/** The events of a report as rows; the same UID and plane twice counts once. */
+export function toEventRows(
+  report: Report,
+  doseReportId: string,
+  timeZone: string,
+  fallback: Date,
+): NewEvent[] {
+  const rows = new Map<string, NewEvent>();
+  report.events.forEach((event, index) => {
+    const eventKey = keyOf(event, report.sopInstanceUid, index);
+    if (rows.has(eventKey)) return;
+    const localStartedAt = withOffset(event.startedAt, event.utcOffset);
+    const { irradiationEventUid, plane, type, protocol, kvpValues, kvpMean, tubeCurrentMa, pulseWidthMs } =
+      event;
+    rows.set(eventKey, {
+      id: newId(),
+      doseReportId,
+      eventKey,
+      startedAt: (localStartedAt && toInstant(localStartedAt, timeZone)) || fallback,
+      localStartedAt,
+      irradiationEventUid,
+      plane,
+      type,
+      protocol,
+      kvpValues,
+      kvpMean,
+      tubeCurrentMa,
+      pulseWidthMs,
+      pulseCount: event.pulseCount,
+      pulseRatePerS: event.pulseRatePerS,
+      exposureTimeS: event.exposureTimeS,
+      irradiationDurationS: event.irradiationDurationS,
+      kermaAreaProductGyCm2: event.kermaAreaProductGyCm2,
+      referenceAirKermaGy: event.referenceAirKermaGy,
+      primaryAngleDeg: event.primaryAngleDeg,
+      secondaryAngleDeg: event.secondaryAngleDeg,
+      primaryEndAngleDeg: event.primaryEndAngleDeg,
+      secondaryEndAngleDeg: event.secondaryEndAngleDeg,
+      sourceToDetectorMm: event.sourceToDetectorMm,
+      sourceToIsocenterMm: event.sourceToIsocenterMm,
+      sourceToReferencePointMm: event.sourceToReferencePointMm,
+      tableLongitudinalMm: event.tableLongitudinalMm,
+      tableLateralMm: event.tableLateralMm,
+      tableHeightMm: event.tableHeightMm,
+      fieldAreaCm2: event.fieldAreaCm2,
+      filters: event.filters.map(({ type: kind, material, minThicknessMm, maxThicknessMm }) => ({
+        type: kind,
+        material,
+        minThicknessMm,
+        maxThicknessMm,
+      })),
+      reported: event.reported,
+    });
+  });
+  return [...rows.values()];
+}

@@ -1,0 +1,47 @@
+import type { ReceivedFile } from '../../shared/contract/dose-report';
+import { sentenceOfReason, type ReasonCode, type UnreadOutcome } from '../../shared/contract/outcome';
+import type { Db } from '../db/db';
+import { readDoseReport } from '../dicom/read-dose-report';
+import type { DoseReport } from './dose-report.entity';
+import { settle } from './dose-report.store';
+import { importDoseReport, type ReadReport } from './import-dose-report';
+
+/** Reads kept bytes and brings the row to its outcome. */
+export async function settleArrival(
+  db: Db,
+  arrival: DoseReport,
+  bytes: Buffer,
+  now: Date,
+): Promise<ReceivedFile> {
+  const read = readDoseReport(bytes);
+  if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, read.reason);
+  try {
+    return await store(db, arrival, read, now);
+  } catch (error) {
+    await giveUp(db, arrival, 'held', reasonOf('reader-failure'));
+    throw error;
+  }
+}
+
+const reasonOf = (code: ReasonCode) => ({ code, detail: sentenceOfReason(code) });
+
+async function store(db: Db, arrival: DoseReport, read: ReadReport, now: Date): Promise<ReceivedFile> {
+  const imported = await importDoseReport(db, arrival, read, now);
+  return {
+    fileName: arrival.fileName,
+    outcome: imported.outcome,
+    doseReportId: arrival.id,
+    procedureId: imported.outcome === 'held' ? null : imported.procedureId,
+    reason: imported.outcome === 'held' ? reasonOf(imported.code) : null,
+  };
+}
+
+async function giveUp(
+  db: Db,
+  arrival: DoseReport,
+  outcome: UnreadOutcome,
+  reason: { code: string; detail: string },
+): Promise<ReceivedFile> {
+  await settle(db, arrival.id, { outcome, reasonCode: reason.code, reasonDetail: reason.detail });
+  return { fileName: arrival.fileName, outcome, doseReportId: arrival.id, procedureId: null, reason };
+}

@@ -1,0 +1,67 @@
+import type { EntityManager } from 'typeorm';
+import { IrradiationEvent } from './irradiation-event.entity';
+
+export type NewEvent = Omit<IrradiationEvent, 'procedureId'>;
+
+/** Column of the table and its type, in the order of the insert. */
+const columns = {
+  id: 'uuid',
+  startedAt: 'timestamptz',
+  doseReportId: 'uuid',
+  eventKey: 'text',
+  irradiationEventUid: 'text',
+  plane: 'text',
+  type: 'text',
+  localStartedAt: 'text',
+  protocol: 'text',
+  kvpValues: 'double precision[]',
+  kvpMean: 'double precision',
+  tubeCurrentMa: 'double precision',
+  pulseWidthMs: 'double precision',
+  pulseCount: 'double precision',
+  pulseRatePerS: 'double precision',
+  exposureTimeS: 'double precision',
+  irradiationDurationS: 'double precision',
+  kermaAreaProductGyCm2: 'double precision',
+  referenceAirKermaGy: 'double precision',
+  primaryAngleDeg: 'double precision',
+  secondaryAngleDeg: 'double precision',
+  primaryEndAngleDeg: 'double precision',
+  secondaryEndAngleDeg: 'double precision',
+  sourceToDetectorMm: 'double precision',
+  sourceToIsocenterMm: 'double precision',
+  sourceToReferencePointMm: 'double precision',
+  tableLongitudinalMm: 'double precision',
+  tableLateralMm: 'double precision',
+  tableHeightMm: 'double precision',
+  fieldAreaCm2: 'double precision',
+  filters: 'jsonb',
+  reported: 'jsonb',
+} as const satisfies Record<keyof NewEvent, string>;
+
+const names = Object.keys(columns) as (keyof typeof columns)[];
+
+/**
+ * Adds the events that the procedure does not hold yet, all in one statement; one seen before (same UID and plane)
+ * changes nothing.
+ */
+export async function addEvents(db: EntityManager, procedureId: string, events: NewEvent[]): Promise<void> {
+  if (events.length === 0) return;
+  const column = (name: (typeof names)[number]) =>
+    db.connection.getMetadata(IrradiationEvent).findColumnWithPropertyName(name)?.databaseName;
+  const targets = names.map((name) => `"${column(name)}"`).join(', ');
+  const shape = names.map((name) => `"${name}" ${columns[name]}`).join(', ');
+  await db.query(
+    `insert into irradiation_event (procedure_id, ${targets})
+     select $1, ${names.map((name) => `given."${name}"`).join(', ')}
+       from jsonb_to_recordset($2::jsonb) as given(${shape})
+     on conflict (procedure_id, event_key, started_at) do nothing`,
+    [
+      procedureId,
+      JSON.stringify(events.map((event) => Object.fromEntries(names.map((name) => [name, event[name]])))),
+    ],
+  );
+}
+
+export const listEvents = (db: EntityManager, procedureId: string): Promise<IrradiationEvent[]> =>
+  db.find(IrradiationEvent, { where: { procedureId }, order: { startedAt: 'ASC', plane: 'ASC', id: 'ASC' } });

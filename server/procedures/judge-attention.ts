@@ -1,0 +1,59 @@
+import type { AttentionLevel } from '../../shared/contract/procedure';
+import type { DataCheck } from './check-data';
+import type { SummaryInput } from './summary-input';
+import type { Together } from './total-together';
+
+type Reason = { level: AttentionLevel; code: string; detail: string };
+export type Attention = { attentionLevel: AttentionLevel | null; attentionReasons: Reason[] };
+
+const order: AttentionLevel[] = ['note', 'notify', 'act'];
+/** A value exactly at the level counts, whatever the last binary digit says. */
+const rounded = (value: number) => Math.round(value * 1e6) / 1e6;
+const larger = ({ displayed, corrected }: { displayed: number | null; corrected: number | null }) =>
+  displayed === null ? corrected : Math.max(displayed, corrected ?? displayed);
+
+const words = {
+  'reference-air-kerma': (value: number) => `K a,r ${Math.round(value * 1000)} mGy`,
+  'kerma-area-product': (value: number) => `P KA ${Number(value.toPrecision(3))} Gy·cm²`,
+  'fluoroscopy-time': (value: number) => `Fluoroscopy time ${(value / 60).toFixed(1)} min`,
+};
+
+/**
+ * Which of the department's levels a procedure reached. The larger of displayed and corrected counts; fluoroscopy time
+ * only where both kerma figures are missing. A failed data check never silences a level.
+ */
+export function judgeAttention(input: SummaryInput, together: Together, checks: DataCheck[]): Attention {
+  if (input.procedure.procedureClass !== 'clinical' || input.procedure.deviceClass !== 'fluoroscopy')
+    return { attentionLevel: null, attentionReasons: [] };
+  const kerma = larger(together.referenceAirKerma);
+  const product = larger(together.kermaAreaProduct);
+  const values = {
+    'reference-air-kerma': kerma,
+    'kerma-area-product': product,
+    'fluoroscopy-time': kerma === null && product === null ? together.fluoroscopyTimeS : null,
+  };
+  const reached = input.levels.flatMap((level): Reason[] => {
+    const value = values[level.quantity];
+    if (value === null || rounded(value) < rounded(level.value)) return [];
+    const name = level.strength === 'act' ? 'substantial level' : 'notification level';
+    const write = words[level.quantity];
+    return [
+      {
+        level: level.strength,
+        code: level.quantity,
+        detail: `${write(value)}, at or above the ${name} of ${write(level.value).replace(/^\D+/, '')}`,
+      },
+    ];
+  });
+  const strongest = reached.filter(
+    (reason) =>
+      reason.level === 'act' || !reached.some((other) => other.code === reason.code && other.level === 'act'),
+  );
+  const notes = checks
+    .filter((check) => check.result === 'noted' || check.result === 'failed')
+    .map((check): Reason => ({ level: 'note', code: check.code, detail: check.detail }));
+  const reasons = [...strongest, ...notes].toSorted(
+    (a, b) => order.indexOf(b.level) - order.indexOf(a.level),
+  );
+  return { attentionLevel: reasons[0]?.level ?? null, attentionReasons: reasons };
+}

@@ -1,0 +1,58 @@
+import { kapWeightedKvp } from '../../shared/dosimetry/kap-weighted-kvp';
+import { buildStrip } from './build-strip';
+import { checkData } from './check-data';
+import { judgeAttention, type Attention } from './judge-attention';
+import { placeInTime, type PlacedInTime } from './place-in-time';
+import type { Procedure } from './procedure.entity';
+import type { SummaryInput } from './summary-input';
+import { totalPlanes } from './total-planes';
+import { totalTogether } from './total-together';
+
+export type Summary = PlacedInTime &
+  Attention &
+  Pick<
+    Procedure,
+    | 'fluoroscopyTimeS'
+    | 'referenceAirKermaGy'
+    | 'displayedReferenceAirKermaGy'
+    | 'isReferenceAirKermaUpperBound'
+    | 'kermaAreaProductGyCm2'
+    | 'displayedKermaAreaProductGyCm2'
+    | 'isCorrected'
+    | 'kvpMean'
+    | 'eventCount'
+    | 'strip'
+    | 'planes'
+    | 'dataChecks'
+    | 'isQuarantined'
+  >;
+
+/** Everything a procedure's row holds of its reports and events, recomputed from all of them; pure. */
+export function summariseProcedure(input: SummaryInput): Summary {
+  const when = placeInTime(input);
+  const planes = totalPlanes(input, when.localDate);
+  const together = totalTogether(planes, input.procedure.fieldsOverlap);
+  const dataChecks = checkData({ input, planes, together });
+  return {
+    ...when,
+    fluoroscopyTimeS: together.fluoroscopyTimeS,
+    referenceAirKermaGy: together.referenceAirKerma.corrected ?? together.referenceAirKerma.displayed,
+    displayedReferenceAirKermaGy: together.referenceAirKerma.displayed,
+    isReferenceAirKermaUpperBound: together.isUpperBound,
+    kermaAreaProductGyCm2: together.kermaAreaProduct.corrected ?? together.kermaAreaProduct.displayed,
+    displayedKermaAreaProductGyCm2: together.kermaAreaProduct.displayed,
+    isCorrected: together.isCorrected,
+    kvpMean: kapWeightedKvp(
+      input.events.map((event) => ({
+        kvp: event.kvpMean,
+        kermaAreaProductGyCm2: event.kermaAreaProductGyCm2,
+      })),
+    ),
+    eventCount: input.events.length,
+    strip: buildStrip(input.events),
+    planes,
+    dataChecks,
+    isQuarantined: dataChecks.some((check) => check.result === 'failed'),
+    ...judgeAttention(input, together, dataChecks),
+  };
+}
