@@ -1,3 +1,4 @@
+import { ByteSink } from './byte-sink';
 import type { DataElement, DataSet, ValueRepresentation } from './data-element';
 import { encodeText, type WriterCharacterSet } from './encode-text';
 
@@ -14,67 +15,83 @@ const zeroPadded = new Set<ValueRepresentation>(['OB', 'UI']);
 const localised = new Set<ValueRepresentation>(['LO', 'PN', 'SH', 'UT']);
 const UNDEFINED_LENGTH = 0xffffffff;
 
-function uint16(value: number, encoding: Encoding): Buffer {
-  const bytes = Buffer.alloc(2);
-  if (encoding.isBigEndian) bytes.writeUInt16BE(value);
-  else bytes.writeUInt16LE(value);
-  return bytes;
+function addTag(sink: ByteSink, tag: number): void {
+  sink.addUint16(tag >>> 16);
+  sink.addUint16(tag & 0xffff);
 }
 
-function uint32(value: number, encoding: Encoding): Buffer {
-  const bytes = Buffer.alloc(4);
-  if (encoding.isBigEndian) bytes.writeUInt32BE(value);
-  else bytes.writeUInt32LE(value);
-  return bytes;
-}
-
-function encodeTag(tag: number, encoding: Encoding): Buffer {
-  return Buffer.concat([uint16(tag >>> 16, encoding), uint16(tag & 0xffff, encoding)]);
-}
-
-function encodeItem(item: DataSet, encoding: Encoding): Buffer {
-  const content = encodeDataSet(item, encoding);
-  const start = encodeTag(0xfffee000, encoding);
+/** Adds an item; its length is filled in once its content is written. */
+function addItem(sink: ByteSink, item: DataSet, encoding: Encoding): void {
+  addTag(sink, 0xfffee000);
+  sink.addUint32(UNDEFINED_LENGTH);
+  const start = sink.length;
+  addElements(sink, item, encoding);
   if (!encoding.hasUndefinedLengths) {
-    return Buffer.concat([start, uint32(content.length, encoding), content]);
+    sink.setUint32(start - 4, sink.length - start);
+    return;
   }
-  const end = [encodeTag(0xfffee00d, encoding), uint32(0, encoding)];
-  return Buffer.concat([start, uint32(UNDEFINED_LENGTH, encoding), content, ...end]);
+  addTag(sink, 0xfffee00d);
+  sink.addUint32(0);
 }
 
-function encodeSequence(items: DataSet[], encoding: Encoding): Buffer {
-  const content = items.map((item) => encodeItem(item, encoding));
-  if (encoding.hasUndefinedLengths) content.push(encodeTag(0xfffee0dd, encoding), uint32(0, encoding));
-  return Buffer.concat(content);
+function addSequence(sink: ByteSink, items: DataSet[], encoding: Encoding): void {
+  for (const item of items) addItem(sink, item, encoding);
+  if (!encoding.hasUndefinedLengths) return;
+  addTag(sink, 0xfffee0dd);
+  sink.addUint32(0);
 }
 
-function encodeValue(element: DataElement, encoding: Encoding): Buffer {
-  const { vr, value } = element;
-  if (vr === 'SQ') return encodeSequence(value as DataSet[], encoding);
-  if (value instanceof Uint8Array) return Buffer.from(value);
-  if (vr === 'US') return Buffer.concat((value as number[]).map((n) => uint16(n, encoding)));
-  if (vr === 'UL') return Buffer.concat((value as number[]).map((n) => uint32(n, encoding)));
-  const text = Array.isArray(value) ? value.join('\\') : value;
-  return Buffer.from(encodeText(text, localised.has(vr) ? encoding.characterSet : null));
-}
-
-function encodeElement(element: DataElement, encoding: Encoding): Buffer {
-  const bare = encodeValue(element, encoding);
-  const padding = Buffer.from(zeroPadded.has(element.vr) ? [0] : [0x20]);
-  const value = bare.length % 2 === 1 ? Buffer.concat([bare, padding]) : bare;
-  const length = element.vr === 'SQ' && encoding.hasUndefinedLengths ? UNDEFINED_LENGTH : value.length;
-  const tag = encodeTag(element.tag, encoding);
-  if (!encoding.isExplicit) return Buffer.concat([tag, uint32(length, encoding), value]);
-  const vr = Buffer.from(element.vr, 'latin1');
-  if (longForm.has(element.vr)) {
-    return Buffer.concat([tag, vr, Buffer.alloc(2), uint32(length, encoding), value]);
+function addValue(sink: ByteSink, { vr, value }: DataElement, encoding: Encoding): void {
+  if (value instanceof Uint8Array) sink.addBytes(value);
+  else if (vr === 'US') for (const number of value as number[]) sink.addUint16(number);
+  else if (vr === 'UL') for (const number of value as number[]) sink.addUint32(number);
+  else {
+    const text = Array.isArray(value) ? value.join('\\') : value;
+    // ASCII is the same in every character set that the writer knows.
+    if (!sink.addAscii(text))
+      sink.addBytes(encodeText(text, localised.has(vr) ? encoding.characterSet : null));
   }
-  if (value.length > 0xffff) throw new RangeError(`value of ${element.vr} longer than 65,535 bytes`);
-  return Buffer.concat([tag, vr, uint16(length, encoding), value]);
+}
+
+/** Adds tag, representation and room for the length; returns where the length goes. */
+function openElement(sink: ByteSink, { tag, vr }: DataElement, encoding: Encoding): number {
+  addTag(sink, tag);
+  if (!encoding.isExplicit) {
+    sink.addUint32(0);
+    return sink.length - 4;
+  }
+  sink.addAscii(vr);
+  sink.addUint16(0);
+  if (!longForm.has(vr)) return sink.length - 2;
+  sink.addUint32(0);
+  return sink.length - 4;
+}
+
+function addElement(sink: ByteSink, element: DataElement, encoding: Encoding): void {
+  const { vr } = element;
+  const lengthAt = openElement(sink, element, encoding);
+  const start = sink.length;
+  if (vr === 'SQ') addSequence(sink, element.value as DataSet[], encoding);
+  else {
+    addValue(sink, element, encoding);
+    if ((sink.length - start) % 2 === 1) sink.addByte(zeroPadded.has(vr) ? 0 : 0x20);
+  }
+  const length = sink.length - start;
+  if (encoding.isExplicit && !longForm.has(vr)) {
+    if (length > 0xffff) throw new RangeError(`value of ${vr} longer than 65,535 bytes`);
+    sink.setUint16(lengthAt, length);
+  } else {
+    sink.setUint32(lengthAt, vr === 'SQ' && encoding.hasUndefinedLengths ? UNDEFINED_LENGTH : length);
+  }
+}
+
+function addElements(sink: ByteSink, dataSet: DataSet, encoding: Encoding): void {
+  for (const element of dataSet.toSorted((a, b) => a.tag - b.tag)) addElement(sink, element, encoding);
 }
 
 /** Encodes a data set, its elements in ascending order of tag (PS3.5 7.1). */
 export function encodeDataSet(dataSet: DataSet, encoding: Encoding): Buffer {
-  const ordered = [...dataSet].sort((a, b) => a.tag - b.tag);
-  return Buffer.concat(ordered.map((element) => encodeElement(element, encoding)));
+  const sink = new ByteSink(encoding.isBigEndian);
+  addElements(sink, dataSet, encoding);
+  return sink.take();
 }
