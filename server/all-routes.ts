@@ -1,13 +1,16 @@
 import type { Authenticator } from './http/passport';
+import { doseReportRoutes } from './dose-reports/dose-report.routes';
 import { equipmentRoutes } from './equipment/equipment.routes';
 import { garmentRoutes } from './garments/garment.routes';
 import { healthRoutes } from './health/health.routes';
 import type { Route } from './http/route';
 import type { SignInThrottle } from './http/sign-in-throttle';
 import { personRoutes } from './people/person.routes';
+import { procedureRoutes } from './procedures/procedure.routes';
 import { procedureTypeRoutes } from './procedure-types/procedure-type.routes';
 import { roomRoutes } from './rooms/room.routes';
 import { sessionRoutes } from './session/session.routes';
+import { exposureRoutes } from './staff-exposure/exposure.routes';
 
 type Parts = { authenticator: Authenticator; throttle: SignInThrottle; version: string };
 
@@ -16,8 +19,11 @@ export const allRoutes = ({ authenticator, throttle, version }: Parts): Route[] 
   ...healthRoutes(version),
   ...sessionRoutes(authenticator, throttle),
   ...personRoutes,
+  ...doseReportRoutes,
+  ...procedureRoutes,
   ...roomRoutes,
   ...equipmentRoutes,
   ...procedureTypeRoutes,
   ...garmentRoutes,
+  ...exposureRoutes,
 ];
