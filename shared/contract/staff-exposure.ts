@@ -65,11 +65,20 @@ export const exposureFilterSchema = z.object({
 export type ExposureFilter = z.output<typeof exposureFilterSchema>;
 export type ExposureFilterInput = z.input<typeof exposureFilterSchema>;
 
-/** One procedure as a point: fluoroscopy time across, kVp up, tone = the estimate. */
+export const exposureMonthsFilterSchema = exposureFilterSchema.pick({ person: true, period: true });
+export type ExposureMonthsFilter = z.output<typeof exposureMonthsFilterSchema>;
+
+/** Figures without names say whose they are when fewer people than this stand behind them. */
+export const fewestUnnamedPeople = 5;
+
+/**
+ * One procedure as a point: fluoroscopy time across, kVp up, tone = the estimate. Readers who see no names
+ * see neither case nor moment, which lead to a name; `procedureId` is there for who may open the procedure.
+ */
 export const exposurePointSchema = z.object({
   procedureId: idSchema.nullable(),
-  caseNumber: z.string(),
-  startedAt: localDateTimeSchema,
+  caseNumber: z.string().nullable(),
+  startedAt: localDateTimeSchema.nullable(),
   procedureType: z.string(),
   room: z.string().nullable(),
   fluoroscopyTimeS: z.number().nullable(),
@@ -83,9 +92,13 @@ export const exposurePointsSchema = z.object({
   items: z.array(exposurePointSchema),
   withoutEstimate: z.int(),
   incompleteRecords: z.int(),
+  /** Too few people stand behind the figures to show them without names. */
+  isWithheld: z.boolean(),
   method: z.string(),
   methodVersion: z.string(),
 });
+
+export type ExposurePoints = z.infer<typeof exposurePointsSchema>;
 
 export const exposureMonthSchema = z.object({
   month: z.string().regex(/^\d{4}-\d{2}$/),
@@ -101,6 +114,7 @@ export type ExposureMonth = z.infer<typeof exposureMonthSchema>;
 export const exposureMonthsSchema = z.object({
   /** Null for readers to whom people are not named. */
   person: namedSchema.nullable(),
+  isWithheld: z.boolean(),
   items: z.array(exposureMonthSchema),
 });
 export type ExposureMonths = z.infer<typeof exposureMonthsSchema>;
@@ -109,3 +123,4 @@ export type ExposureMonths = z.infer<typeof exposureMonthsSchema>;
 export const exposedPeopleSchema = z.object({
   items: z.array(namedSchema.extend({ job: z.enum(jobs), procedures: z.int() })),
 });
+export type ExposedPerson = z.infer<typeof exposedPeopleSchema>['items'][number];
