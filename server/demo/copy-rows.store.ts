@@ -31,39 +31,63 @@ function encodeValue(value: unknown, isJson: boolean): string {
   }
 }
 
-/** Lines of about 64 kB: fewer and larger pieces are several times faster than one piece a row. */
-function* encodeRows<T extends object>(rows: Iterable<T>, columns: ColumnMetadata[]): Generator<string> {
-  const fields = columns.map((column) => ({
-    name: column.propertyName as keyof T,
-    isJson: column.type === 'jsonb',
-  }));
-  let chunk = '';
-  for (const row of rows) {
-    chunk += fields.map(({ name, isJson }) => encodeValue(row[name], isJson)).join('\t') + '\n';
-    if (chunk.length > 65_536) {
-      yield chunk;
-      chunk = '';
-    }
-  }
-  if (chunk) yield chunk;
+/** Rows of one table, already in COPY's text format: a line is a fraction of the row's weight in memory. */
+export interface CopyLines<T> {
+  add(rows: readonly T[]): void;
+  /** Sends what was added, inside the transaction's own connection, and starts afresh. */
+  send(db: EntityManager): Promise<void>;
+}
+
+const linesPerChunk = 128;
+
+function* joinLines(lines: readonly string[]): Generator<string> {
+  for (let start = 0; start < lines.length; start += linesPerChunk)
+    yield lines.slice(start, start + linesPerChunk).join('');
 }
 
 /**
- * Writes many rows of one table by COPY, inside the manager's own transaction. A column that no row
- * names keeps the database's default.
+ * Collects rows of one table for COPY. Every row has the properties of the first; a column that it does
+ * not name keeps the database's default.
  */
+export function collectLines<T extends ObjectLiteral>(
+  db: EntityManager,
+  entity: EntityTarget<T>,
+): CopyLines<Partial<T>> {
+  const metadata = db.connection.getMetadata(entity);
+  let columns: ColumnMetadata[] = [];
+  let fields: { name: keyof T; isJson: boolean }[] = [];
+  let lines: string[] = [];
+  const learnColumns = (row: Partial<T>) => {
+    columns = metadata.columns.filter((column) => column.propertyName in row);
+    fields = columns.map((column) => ({ name: column.propertyName, isJson: column.type === 'jsonb' }));
+  };
+  return {
+    add: (rows) => {
+      for (const row of rows) {
+        if (fields.length === 0) learnColumns(row);
+        lines.push(fields.map(({ name, isJson }) => encodeValue(row[name], isJson)).join('\t') + '\n');
+      }
+    },
+    send: async (transaction) => {
+      const sending = lines;
+      lines = [];
+      if (sending.length === 0) return;
+      if (!transaction.queryRunner) throw new Error('COPY needs the connection of a transaction.');
+      const names = columns.map((column) => `"${column.databaseName}"`).join(', ');
+      const client = (await transaction.queryRunner.connect()) as PoolClient;
+      const copy = client.query(copyFrom(`copy "${metadata.tableName}" (${names}) from stdin`));
+      await pipeline(Readable.from(joinLines(sending)), copy);
+    },
+  };
+}
+
+/** Writes rows of one table by COPY. */
 export async function copyRows<T extends ObjectLiteral>(
   db: EntityManager,
   entity: EntityTarget<T>,
   rows: readonly Partial<T>[],
 ): Promise<void> {
-  const [first] = rows;
-  if (!first) return;
-  if (!db.queryRunner) throw new Error('COPY needs the connection of a transaction.');
-  const metadata = db.connection.getMetadata(entity);
-  const columns = metadata.columns.filter((column) => column.propertyName in first);
-  const names = columns.map((column) => `"${column.databaseName}"`).join(', ');
-  const client = (await db.queryRunner.connect()) as PoolClient;
-  const copy = client.query(copyFrom(`copy "${metadata.tableName}" (${names}) from stdin`));
-  await pipeline(Readable.from(encodeRows(rows, columns)), copy);
+  const collected = collectLines(db, entity);
+  collected.add(rows);
+  await collected.send(db);
 }

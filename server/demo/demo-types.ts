@@ -79,10 +79,10 @@ export interface DemoGarment {
 export type DemoPlane = 'single' | 'A' | 'B';
 
 export interface DemoFilter {
-  type: 'flat' | 'wedge';
-  material: 'Cu' | 'Al';
-  minThicknessMm: number;
-  maxThicknessMm: number;
+  type: 'flat' | 'wedge' | 'none';
+  material: 'Cu' | 'Al' | null;
+  minThicknessMm: number | null;
+  maxThicknessMm: number | null;
 }
 
 export interface DemoIrradiationEvent {

@@ -85,6 +85,8 @@ export function settleKvp(
   return drafts.map((draft) => clamp(meanKvp + draft.kvpDeviation - meanDeviation, 50, 125));
 }
 
+const noFilter: DemoFilter = { type: 'none', material: null, minThicknessMm: null, maxThicknessMm: null };
+
 /** The flat filter, if any, and now and then a wedge that softens the lung's edge. */
 export function listFilters(copperMm: number, random: Random): DemoFilter[] {
   const filters: DemoFilter[] = [];
@@ -92,5 +94,6 @@ export function listFilters(copperMm: number, random: Random): DemoFilter[] {
     filters.push({ type: 'flat', material: 'Cu', minThicknessMm: copperMm, maxThicknessMm: copperMm });
   if (random.chance(0.2))
     filters.push({ type: 'wedge', material: 'Al', minThicknessMm: 0, maxThicknessMm: 1.5 });
-  return filters;
+  // A machine says that nothing was in the beam; silence would mean that it does not know.
+  return filters.length > 0 ? filters : [noFilter];
 }

@@ -11,7 +11,7 @@ export const eventKeyOf = (event: { irradiationEventUid: string; plane?: string 
 export function toEventRow(
   event: DemoIrradiationEvent,
   procedure: DemoProcedure,
-  ids: { procedureId: string; doseReportId: string },
+  ids: { procedureId: string; doseReportId: string | null },
 ): IrradiationEvent {
   const { offsetS, filters, ...measured } = event;
   const startMs = procedure.startedAt.getTime() + 1000 * (offsetS + procedure.deviceClockAheadS);

@@ -26,7 +26,7 @@ export const isRecordUnfinished = (procedure: DemoProcedure): boolean =>
   procedure.defect === 'record-incomplete';
 
 /** What a person wrote into the record, or what is still missing of it. */
-function recordOf(procedure: DemoProcedure, ids: DemoIds) {
+export function recordOf(procedure: DemoProcedure, ids: DemoIds) {
   const isUnfinished = isRecordUnfinished(procedure);
   const person = (code: string | null) => (code === null || isUnfinished ? null : idOf(ids.people, code));
   const { heightM, weightKg } = procedure.patient;

@@ -10,6 +10,7 @@ import {
   listAllLevels,
   listFactors,
   markFinished,
+  settleArrivalTimes,
   waitForOtherSeeders,
 } from './demo-hospital.store';
 import type { DemoProcedure } from './demo-types';
@@ -17,6 +18,7 @@ import { generateProcedures, startOfNewest } from './generate-procedures';
 import type { DemoContext } from './procedure-row';
 import { seedGenerated } from './seed-generated';
 import { seedHospital } from './seed-hospital';
+import { seedNewest } from './seed-newest';
 import { demoAccounts, demoEmail } from './seed-people';
 import { settleAnchor } from './settle-anchor';
 
@@ -75,6 +77,8 @@ async function writeDemo(
     report,
   );
   await analyseTables(db);
+  await seedNewest(db, newest, ids, report);
+  await settleArrivalTimes(db, ids.hospitalId);
   await markFinished(db, ids.hospitalId, new Date());
 }
 

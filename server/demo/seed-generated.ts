@@ -4,37 +4,32 @@ import { PatientIdentity } from '../procedures/patient-identity.entity';
 import { Presence } from '../procedures/presence.entity';
 import { Procedure } from '../procedures/procedure.entity';
 import { StaffEstimate } from '../staff-exposure/staff-estimate.entity';
+import { AuditEntry } from '../audit/audit-entry.entity';
 import type { Db } from '../db/db';
 import { DoseReport } from '../dose-reports/dose-report.entity';
 import { bulkId } from './bulk-ids';
-import { copyRows } from './copy-rows.store';
+import { toAuditRows } from './audit-rows';
+import { collectLines } from './copy-rows.store';
 import { drawCaseNumbers } from './demo-hospital.store';
 import type { DemoProcedure } from './demo-types';
 import { toEstimateRows } from './estimate-rows';
-import { toEventRow } from './event-rows';
+import { eventKeyOf, toEventRow } from './event-rows';
 import { toPresenceRows } from './presence-rows';
 import { type DemoContext, isRecordUnfinished, toProcedureRow } from './procedure-row';
 import { toReportRows } from './report-rows';
 import { idOf } from './seed-hospital';
 
-/** Rows of some procedures, table by table. */
-interface Batch {
-  identities: PatientIdentity[];
-  procedures: Procedure[];
-  reports: DoseReport[];
-  events: IrradiationEvent[];
-  presences: Presence[];
-  estimates: StaffEstimate[];
-}
-
-const emptyBatch = (): Batch => ({
-  identities: [],
-  procedures: [],
-  reports: [],
-  events: [],
-  presences: [],
-  estimates: [],
+/** Rows of some procedures, table by table, in the order in which they refer to one another. */
+const collectBatch = (db: Db) => ({
+  identities: collectLines(db, PatientIdentity),
+  procedures: collectLines(db, Procedure),
+  reports: collectLines(db, DoseReport),
+  events: collectLines(db, IrradiationEvent),
+  presences: collectLines(db, Presence),
+  estimates: collectLines(db, StaffEstimate),
+  audit: collectLines(db, AuditEntry),
 });
+type Batch = ReturnType<typeof collectBatch>;
 
 function addToBatch(batch: Batch, procedure: DemoProcedure, caseNumber: number, context: DemoContext): void {
   const { ids } = context;
@@ -53,10 +48,9 @@ function addToBatch(batch: Batch, procedure: DemoProcedure, caseNumber: number, 
     equipmentId: idOf(ids.equipment, procedure.equipment.key),
   });
   const reportOf = new Map(reports.flatMap((report) => report.eventKeys.map((key) => [key, report.id])));
-  const events = procedure.events.map((event) => {
-    const row = toEventRow(event, procedure, { procedureId: id, doseReportId: reports[0]?.id ?? '' });
-    return { ...row, doseReportId: reportOf.get(row.eventKey) ?? row.doseReportId };
-  });
+  const events = procedure.events.map((event) =>
+    toEventRow(event, procedure, { procedureId: id, doseReportId: reportOf.get(eventKeyOf(event)) ?? null }),
+  );
   const year = procedure.startedAtLocal.slice(2, 4);
   const row = toProcedureRow(
     procedure,
@@ -64,23 +58,19 @@ function addToBatch(batch: Batch, procedure: DemoProcedure, caseNumber: number, 
     { reports, events },
     context,
   );
-  batch.identities.push(identity);
-  batch.procedures.push(row);
-  batch.reports.push(...reports);
-  batch.events.push(...events);
+  batch.identities.add([identity]);
+  batch.procedures.add([row]);
+  batch.reports.add(reports);
+  batch.events.add(events);
+  batch.audit.add(toAuditRows(procedure, row, ids));
   if (isRecordUnfinished(procedure)) return;
   const presences = toPresenceRows(procedure, id, ids);
-  batch.presences.push(...presences);
-  batch.estimates.push(...toEstimateRows(row, events, presences, context.registers));
+  batch.presences.add(presences);
+  batch.estimates.add(toEstimateRows(row, events, presences, context.registers));
 }
 
 async function writeBatch(db: Db, batch: Batch): Promise<void> {
-  await copyRows(db, PatientIdentity, batch.identities);
-  await copyRows(db, Procedure, batch.procedures);
-  await copyRows(db, DoseReport, batch.reports);
-  await copyRows(db, IrradiationEvent, batch.events);
-  await copyRows(db, Presence, batch.presences);
-  await copyRows(db, StaffEstimate, batch.estimates);
+  for (const lines of Object.values(batch)) await lines.send(db);
 }
 
 const batchSize = 250;
@@ -100,11 +90,12 @@ export function* inBatches<T>(items: Iterable<T>, size: number): Generator<T[]> 
 
 /** Makes a batch's rows and lets the connection breathe meanwhile: the batch before is being copied. */
 async function makeBatch(
+  db: Db,
   procedures: readonly DemoProcedure[],
   caseNumbers: readonly number[],
   context: DemoContext,
 ): Promise<Batch> {
-  const batch = emptyBatch();
+  const batch = collectBatch(db);
   for (const [index, procedure] of procedures.entries()) {
     addToBatch(batch, procedure, caseNumbers[index] ?? 0, context);
     if (index % 4 === 3) await setImmediate();
@@ -129,7 +120,7 @@ export async function seedGenerated(
   let writing = drawCaseNumbers(db, batchSize);
   let made = 0;
   for (const some of inBatches(procedures, batchSize)) {
-    const batch = await makeBatch(some, caseNumbers, context);
+    const batch = await makeBatch(db, some, caseNumbers, context);
     made += some.length;
     caseNumbers = await writing;
     writing = writeAndDraw(batch, made);
