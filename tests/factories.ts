@@ -1,4 +1,6 @@
 import type { DataSource } from 'typeorm';
+import { Garment } from '../server/garments/garment.entity';
+import { ProcedureType } from '../server/procedure-types/procedure-type.entity';
 import { Hospital } from '../server/hospital/hospital.entity';
 import { newId } from '../server/kernel/new-id';
 import { addDefaultLevels } from '../server/levels/add-default-levels';
@@ -48,5 +50,51 @@ export async function makePerson(
     await saveAccount(dataSource.manager, { personId: id, email, roles });
     await setPassword(dataSource.manager, id, await passwordHash);
   }
+  return id;
+}
+
+export async function makeGarment(
+  dataSource: DataSource,
+  hospitalId: string,
+  overrides: Partial<Garment> = {},
+): Promise<string> {
+  const id = newId();
+  await dataSource.manager.insert(Garment, {
+    id,
+    hospitalId,
+    code: `G-${id.slice(-6)}`,
+    kind: 'one-piece',
+    material: 'lead',
+    frontLeadMm: 0.5,
+    backLeadMm: 0.25,
+    leadKvp: 100,
+    isMeasured: true,
+    ownerId: null,
+    state: 'in-service',
+    lastInspectedOn: '2026-06-01',
+    nextDueOn: '2027-06-01',
+    ...overrides,
+  });
+  return id;
+}
+
+/** A type that is recognised by its own name. */
+export async function makeProcedureType(
+  dataSource: DataSource,
+  hospitalId: string,
+  overrides: Partial<ProcedureType> = {},
+): Promise<string> {
+  const id = newId();
+  const name = overrides.name ?? `Type ${id.slice(-6)}`;
+  await dataSource.manager.insert(ProcedureType, {
+    id,
+    hospitalId,
+    key: `T-${id.slice(-6)}`,
+    name,
+    bodyRegion: 'abdomen',
+    typicalKvp: 80,
+    recognisedBy: [name],
+    ...overrides,
+  });
   return id;
 }
