@@ -1,6 +1,7 @@
 import express, { type Express } from 'express';
 import type { Logger } from 'pino';
 import type { DataSource } from 'typeorm';
+import { putIssuesInOwnWords } from '../shared/issue-words';
 import { poolOf } from './db/pool';
 import type { Environment } from './env';
 import { mountRoutes } from './http/mount-routes';
@@ -32,6 +33,7 @@ export type AppOptions = {
 /** The whole application: what every request passes, in order. */
 export function createApp(options: AppOptions): Express {
   const { dataSource, env, logger, now, isHttps } = options;
+  putIssuesInOwnWords();
   const deps: Deps = { dataSource, db: dataSource.manager, env, logger, now };
   const pool = poolOf(dataSource);
   const authenticator = setUpPassport(deps.db);

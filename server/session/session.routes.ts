@@ -27,14 +27,14 @@ export function sessionRoutes(authenticator: passport.Authenticator, throttle: S
       body: signInSchema,
       response: sessionSchema,
       handle: async ({ request, body, deps }) => {
-        const account = `${request.ip}|${body.email.toLowerCase()}`;
-        await throttle.guard([account]);
+        const attempt = { address: request.ip ?? '', email: body.email };
+        await throttle.guard(attempt);
         const actor = await authenticate(request, authenticator);
         if (!actor) {
-          await throttle.fail([account]);
+          await throttle.fail(attempt);
           throw new Problem('wrong-credentials', 'E-mail or password is not right. Nobody is signed in.');
         }
-        await throttle.forget(account);
+        await throttle.forgive(attempt);
         await startSession(request, actor);
         return describeSession(deps.db, actor);
       },

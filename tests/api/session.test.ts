@@ -67,6 +67,19 @@ test('the eleventh wrong try waits, even with the right password', async () => {
   expect(body.detail).toMatch(/Wait \d+ min/);
 });
 
+test('one address that tries a hundred accounts waits for all of them', async () => {
+  const { body: before } = await request(app.app)
+    .post('/api/session')
+    .send({ email: 'spread@example.org', password: 'no' });
+  expect(before.code).toBe('wrong-credentials');
+  await app.dataSource.query(`update rate_limit set points = 100 where key like 'sign-in-address:%'`);
+  const { status } = await request(app.app)
+    .post('/api/session')
+    .send({ email: 't@example.org', password: testPassword });
+  expect(status).toBe(429);
+  await app.dataSource.query('delete from rate_limit');
+});
+
 test('a request from another site may not change anything; a program without browser headers may', async () => {
   const credentials = { email: 't@example.org', password: testPassword };
   const crossSite = await request(app.app)
