@@ -45,7 +45,7 @@ export function findPoints(
 ): Promise<FoundPoint[]> {
   const { parts, values, bind } = conditions(filter, scope);
   const { nominal, low, high } = quantityColumns[filter.quantity];
-  parts.push(`estimate.duty = ${bind(filter.duty)}`);
+  if (filter.duty !== 'any') parts.push(`estimate.duty = ${bind(filter.duty)}`);
   if (scope.personId) parts.push(`estimate.person_id = ${bind(scope.personId)}`);
   return db.query(
     `select found.* from (
@@ -86,9 +86,9 @@ export async function countIncomplete(
   const { parts, values, bind } = conditions(filter, scope);
   parts.push(`procedure.record_state = 'incomplete'`);
   if (scope.personId) {
-    const column = operatorColumns[filter.duty];
-    if (!column) return 0;
-    parts.push(`${column} = ${bind(scope.personId)}`);
+    const columns = filter.duty === 'any' ? Object.values(operatorColumns) : [operatorColumns[filter.duty]];
+    if (!columns[0]) return 0;
+    parts.push(`${bind(scope.personId)} in (${columns.join(', ')})`);
   }
   const [row] = await db.query(
     `select count(*)::int as incomplete from procedure where ${parts.join(' and ')}`,

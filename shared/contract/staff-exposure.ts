@@ -54,10 +54,14 @@ export const exposureQuantities = [
 ] as const;
 export type ExposureQuantity = (typeof exposureQuantities)[number];
 
+/** `any`: whoever in the room received the most. */
+export const exposureDuties = ['any', ...duties] as const;
+export type ExposureDuty = (typeof exposureDuties)[number];
+
 export const exposureFilterSchema = z.object({
   type: idSchema.optional(),
   room: idSchema.optional(),
-  duty: z.enum(duties).default('primary-operator'),
+  duty: z.enum(exposureDuties).default('primary-operator'),
   quantity: z.enum(exposureQuantities).default('collarHp10USv'),
   period: z.enum(periods).default('12m'),
   person: idSchema.optional(),

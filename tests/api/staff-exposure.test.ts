@@ -66,6 +66,8 @@ test('the physicist sees the operators of all procedures, highest first, with th
   expect(body).toMatchObject({ method: 'scatter-by-event', methodVersion: '1.0.0', isWithheld: false });
   expect(await nominals(physicist, { duty: 'second-operator' })).toEqual([10]);
   expect(await nominals(physicist, { person: ownId })).toEqual([40]);
+  expect(await nominals(physicist, { duty: 'any' })).toEqual([100, 40]);
+  expect(await nominals(physicist, { duty: 'any', person: ownId })).toEqual([40, 10]);
   expect(await nominals(physicist, { quantity: 'underGarmentHp10USv' })).toEqual([10, 4]);
   expect(await nominals(physicist, { period: '30d' })).toEqual([40]);
 });

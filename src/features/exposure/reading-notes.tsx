@@ -1,0 +1,33 @@
+import { fewestUnnamedPeople } from '../../../shared/contract/staff-exposure';
+import { paths } from '../../paths';
+import { Caution } from '../../ui/caution';
+import { MarginNote } from '../../ui/margin-note';
+import { TextLink } from '../../ui/text-link';
+
+/** How to read the chart, and the cautions that belong beside estimates. */
+export const ReadingNotes = ({ isUnnamed }: { isUnnamed: boolean }) => (
+  <>
+    <MarginNote title="Dashed lines">
+      <p className="text-sm text-ink-2">
+        Equal exposure at the median rate of the procedures shown: in bands of 4 kVp with at least 25
+        procedures, the value divided by the band’s median exposure per minute of fluoroscopy. They describe
+        these procedures and predict none; acquisitions, place and screens are in them as they happened.
+      </p>
+    </MarginNote>
+    <MarginNote title="What these figures are">
+      <Caution of="estimate-not-record" />
+      <Caution of="scatter-interval" />
+      <Caution of="displayed-tolerance" />
+      <Caution of="staff-private" />
+      {isUnnamed && (
+        <p className="text-sm text-ink-2">
+          Shown without names, cases and dates; nothing is shown where fewer than {fewestUnnamedPeople} people
+          stand behind it.
+        </p>
+      )}
+      <p className="text-sm">
+        <TextLink to={paths.methods}>Methods, constants and limits</TextLink>
+      </p>
+    </MarginNote>
+  </>
+);
