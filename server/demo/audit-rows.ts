@@ -9,11 +9,11 @@ import { operatorShares } from './staff.table-data';
 const dayMs = 86_400_000;
 
 /** Somebody else of the same specialty: the operator whom the record named at first. */
-function confusedWith(procedure: DemoProcedure): string | null {
+export function confusedWith(procedure: DemoProcedure): string | null {
   const colleagues = Object.values(operatorShares)
     .find((shares) => shares.some(([code]) => code === procedure.operatorCode))
     ?.map(([code]) => code)
-    .filter((code) => code !== procedure.operatorCode);
+    .filter((code) => !procedure.staff.some(({ staffCode }) => staffCode === code));
   if (!colleagues || colleagues.length === 0) return null;
   return createRandom('wrong operator', procedure.studyInstanceUid).pick(colleagues);
 }

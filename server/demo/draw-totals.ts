@@ -22,9 +22,10 @@ function stratifiedNormals(count: number, ...key: string[]): number[] {
   return random.shuffle(deviates);
 }
 
-function quartilesOf(values: readonly number[]): DemoQuartiles {
-  const sorted = [...values].sort((a, b) => a - b);
-  return { median: quantileSorted(sorted, 0.5), p75: quantileSorted(sorted, 0.75) };
+/** ln of median and third quartile of the values themselves: between two values the mean is taken unlogged. */
+function logQuartilesOf(logValues: readonly number[]): DemoQuartiles {
+  const sorted = logValues.map((value) => Math.exp(value)).sort((a, b) => a - b);
+  return { median: Math.log(quantileSorted(sorted, 0.5)), p75: Math.log(quantileSorted(sorted, 0.75)) };
 }
 
 /**
@@ -38,12 +39,12 @@ function fitLogValues(compose: (strength: number) => number[], target: DemoQuart
   let high = 3;
   for (let step = 0; step < 40; step++) {
     const middle = (low + high) / 2;
-    const { median, p75 } = quartilesOf(compose(middle));
+    const { median, p75 } = logQuartilesOf(compose(middle));
     if (p75 - median < wanted) low = middle;
     else high = middle;
   }
   const values = compose(low);
-  const shift = Math.log(target.median) - quartilesOf(values).median;
+  const shift = Math.log(target.median) - logQuartilesOf(values).median;
   return values.map((value) => value + shift);
 }
 

@@ -89,6 +89,19 @@ describe.each(demoProcedureTypes.map((type) => [type.key, type] as const))('%s',
   });
 });
 
+describe('another anchor', () => {
+  it('moves the calendar and keeps number and medians', () => {
+    const kermaMGy: number[] = [];
+    let count = 0;
+    for (const procedure of generateProcedures(new Date('2028-03-01T00:00:00Z'))) {
+      count += 1;
+      if (procedure.type.key === 'IR-PTBD') kermaMGy.push(1000 * totalOf(procedure, 'referenceAirKermaGy'));
+    }
+    expect(count).toBe(7356);
+    expect(Math.abs(quantile(kermaMGy, 0.5) / 160 - 1)).toBeLessThan(0.05);
+  }, 60_000);
+});
+
 describe('irradiation events', () => {
   it('add up to the totals of their plane within 0.5 %, unless the kerma was not reset', () => {
     const sumOf = (rows: DemoIrradiationEvent[], quantity: 'kermaAreaProductGyCm2' | 'referenceAirKermaGy') =>

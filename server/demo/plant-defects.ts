@@ -22,7 +22,7 @@ const fileless: readonly DemoDefect[] = ['manual-entry', 'no-report'];
 
 /** A few spoilt totals would bend the distribution of a type with few procedures. */
 const spoiling: readonly DemoDefect[] = [...fileless, 'kap-unit-slip', 'kerma-not-reset'];
-const rareBelowPerYear = 75;
+const rareBelowPerYear = 140;
 
 interface DefectCarrier {
   month: number;

@@ -25,34 +25,62 @@ export interface DemoContext {
 export const isRecordUnfinished = (procedure: DemoProcedure): boolean =>
   procedure.defect === 'record-incomplete';
 
-/** What a person wrote into the record, or what is still missing of it. */
-export function recordOf(procedure: DemoProcedure, ids: DemoIds) {
-  const isUnfinished = isRecordUnfinished(procedure);
-  const person = (code: string | null) => (code === null || isUnfinished ? null : idOf(ids.people, code));
-  const { heightM, weightKg } = procedure.patient;
+/** What a report of the machine already answers. */
+const answersOfFile = ({ type, patient }: DemoProcedure, ids: DemoIds) => ({
+  procedureTypeId: idOf(ids.types, type.key),
+  isFeetFirst: false,
+  isProne: false,
+  patientHeightM: patient.heightM,
+  patientWeightKg: patient.weightKg,
+});
+
+/** The whole record but for its people: what the file says and what a person added. */
+export function describeAnswers(procedure: DemoProcedure, ids: DemoIds) {
+  const person = (code: string | null) => (code === null ? null : idOf(ids.people, code));
   return {
-    recordState: isUnfinished ? ('incomplete' as const) : ('complete' as const),
-    missing: isUnfinished ? (['operator', 'person'] satisfies MissingPart[] as MissingPart[]) : [],
-    procedureTypeId: idOf(ids.types, procedure.type.key),
+    ...answersOfFile(procedure, ids),
     primaryOperatorId: person(procedure.operatorCode),
     secondOperatorId: person(procedure.secondOperatorCode),
     traineeId: person(procedure.traineeCode),
-    accessSide: isUnfinished ? null : procedure.type.accessSide,
-    isFeetFirst: false,
-    isProne: false,
-    isEmergency: isUnfinished ? null : procedure.isOutOfHours,
-    patientHeightM: heightM,
-    patientWeightKg: weightKg,
-    fromFile: [
-      'procedureTypeId',
-      ...(heightM === null ? [] : ['patientHeightM']),
-      ...(weightKg === null ? [] : ['patientWeightKg']),
-      'isFeetFirst',
-      'isProne',
-    ],
-    completedAt: isUnfinished ? null : new Date(arrivalOf(procedure).getTime() + 25 * 60_000),
-    recordRevision: isUnfinished ? 0 : firstRevision,
-    estimateRevision: isUnfinished ? 0 : firstRevision,
+    accessSide: procedure.type.accessSide,
+    isEmergency: procedure.isOutOfHours,
+  };
+}
+
+const minutesToComplete = 25;
+
+/** When somebody completed a generated procedure's record. */
+export const completionOf = (procedure: DemoProcedure): Date =>
+  new Date(arrivalOf(procedure).getTime() + 60_000 * minutesToComplete);
+
+function recordOf(procedure: DemoProcedure, ids: DemoIds) {
+  const fromFile = Object.entries(answersOfFile(procedure, ids)).flatMap(([field, value]) =>
+    value === null ? [] : [field],
+  );
+  if (!isRecordUnfinished(procedure))
+    return {
+      ...describeAnswers(procedure, ids),
+      fromFile,
+      recordState: 'complete' as const,
+      missing: [],
+      completedAt: completionOf(procedure),
+      recordRevision: firstRevision,
+      estimateRevision: firstRevision,
+    };
+  const missing: MissingPart[] = ['operator', 'person'];
+  return {
+    ...answersOfFile(procedure, ids),
+    fromFile,
+    primaryOperatorId: null,
+    secondOperatorId: null,
+    traineeId: null,
+    accessSide: null,
+    isEmergency: null,
+    recordState: 'incomplete' as const,
+    missing,
+    completedAt: null,
+    recordRevision: 0,
+    estimateRevision: 0,
   };
 }
 
