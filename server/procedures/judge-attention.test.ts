@@ -1,0 +1,58 @@
+import { expect, test } from 'vitest';
+import { judgeAttention } from './judge-attention';
+import type { SummaryInput } from './summary-input';
+import type { Together } from './total-together';
+
+const input = (overrides: Partial<SummaryInput['procedure']> = {}) =>
+  ({
+    procedure: { fieldsOverlap: null, procedureClass: 'clinical', deviceClass: 'fluoroscopy', ...overrides },
+    levels: [
+      { quantity: 'reference-air-kerma', strength: 'notify', value: 3 },
+      { quantity: 'reference-air-kerma', strength: 'act', value: 5 },
+      { quantity: 'fluoroscopy-time', strength: 'act', value: 3600 },
+    ],
+  }) as SummaryInput;
+
+const together = (
+  displayed: number | null,
+  corrected: number | null = null,
+  fluoroscopyTimeS: number | null = 600,
+): Together => ({
+  fluoroscopyTimeS,
+  kermaAreaProduct: { displayed: displayed === null ? null : 50, corrected: null },
+  referenceAirKerma: { displayed, corrected },
+  isUpperBound: false,
+  isCorrected: corrected !== null,
+});
+const levelOf = (figures: Together, of = input()) => judgeAttention(of, figures, []).attentionLevel;
+
+// Own acceptance check: 4,999, 5,000 and 5,001 mGy against a level of 5 Gy: no, yes, yes.
+test.each([
+  [4.999, 'notify'],
+  [5, 'act'],
+  [5.001, 'act'],
+  [2.999, null],
+  [4.9999999, 'act'],
+])('%d Gy reaches %s', (kermaGy, level) => {
+  expect(levelOf(together(kermaGy))).toBe(level);
+});
+
+test('the larger of displayed and corrected triggers, whichever it is', () => {
+  expect(levelOf(together(4.8, 5.376))).toBe('act');
+  expect(levelOf(together(5.2, 4.7))).toBe('act');
+});
+
+test('fluoroscopy time counts only where both kerma figures are missing', () => {
+  expect(levelOf(together(0.5, null, 4000))).toBeNull();
+  expect(levelOf(together(null, null, 4000))).toBe('act');
+});
+
+test('a failed data check is a note and never silences a level', () => {
+  const failed = [{ code: 'mean-field-area', result: 'failed' as const, detail: 'a unit slip?' }];
+  expect(judgeAttention(input(), together(6), failed)).toMatchObject({ attentionLevel: 'act' });
+  expect(judgeAttention(input(), together(1), failed)).toMatchObject({ attentionLevel: 'note' });
+});
+
+test('a phantom exposure calls for nobody', () => {
+  expect(levelOf(together(20), input({ procedureClass: 'phantom' }))).toBeNull();
+});
