@@ -5,6 +5,7 @@ export const paths = {
   signInLink: (token: string) => `/welcome/${token}`,
   procedures: '/procedures',
   procedure: (id: string) => `/procedures/${id}`,
+  procedureRecord: (id: string) => `/procedures/${id}/record`,
   doseReports: '/dose-reports',
   staffExposure: '/staff-exposure',
   myExposure: '/my-exposure',

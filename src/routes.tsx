@@ -10,6 +10,11 @@ import { buildSignInPath, paths } from './paths';
 /** The URL map of what stands behind the sign-in. A page is loaded when it is opened. */
 const pages: RouteObject[] = [
   { path: paths.home, lazy: () => import('./pages/home') },
+  { path: paths.staffExposure, lazy: () => import('./pages/staff-exposure') },
+  { path: paths.myExposure, lazy: () => import('./pages/my-exposure') },
+  { path: paths.methods, lazy: () => import('./pages/methods') },
+  { path: paths.procedure(':id'), lazy: () => import('./pages/procedure') },
+  { path: paths.procedureRecord(':id'), lazy: () => import('./pages/procedure-record') },
   { path: paths.garments, lazy: () => import('./pages/garments') },
   { path: paths.garment(':id'), lazy: () => import('./pages/garment') },
   { path: paths.administration, lazy: () => import('./pages/admin') },

@@ -2,6 +2,7 @@ import type { UseMutationResult } from '@tanstack/react-query';
 import { useCallback, useRef, type FormEvent, type ReactNode } from 'react';
 import type { FieldValues, UseFormReturn } from 'react-hook-form';
 import { ApiProblem } from '../lib/api-problem';
+import { joinClassNames } from '../lib/class-names';
 import { mergeVersions } from '../lib/merge-versions';
 import { placeIssues } from '../lib/place-issues';
 import { Button, ButtonLink } from './button';
@@ -22,6 +23,10 @@ type RecordFormProps<Input extends FieldValues, Output extends object, Saved> = 
   /** The server's newer version as form values; null when it cannot be read. */
   readCurrent: (current: unknown) => Input | null;
   describe: DescribeValues<Input>;
+  /** Takes the whole column instead of a readable measure. */
+  isWide?: boolean;
+  /** The entries are kept elsewhere: leaving the page loses nothing and asks nothing. */
+  isDraftKept?: boolean;
   children: ReactNode;
 };
 
@@ -34,6 +39,8 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
   backTo,
   readCurrent,
   describe,
+  isWide,
+  isDraftKept,
   children,
 }: RecordFormProps<Input, Output, Saved>) {
   const { isDirty, defaultValues } = form.formState;
@@ -62,7 +69,11 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
     submit();
   };
   return (
-    <form noValidate onSubmit={submit} className="flex max-w-3xl flex-col gap-5">
+    <form
+      noValidate
+      onSubmit={submit}
+      className={joinClassNames('flex flex-col gap-5', !isWide && 'max-w-3xl')}
+    >
       {!theirs && <ProblemNote error={save.error} kept="Your entries are still in the form." />}
       {theirs && (
         <ConflictNote
@@ -83,7 +94,7 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
         </Button>
         <ButtonLink to={backTo}>Cancel</ButtonLink>
       </div>
-      <LeaveGuard isGuarding={isGuarding} />
+      {!isDraftKept && <LeaveGuard isGuarding={isGuarding} />}
     </form>
   );
 }
