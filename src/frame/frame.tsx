@@ -5,12 +5,14 @@ import { buildSignInPath } from '../paths';
 import { Toasts } from '../ui/toasts';
 import { DemoBanner } from './demo-banner';
 import { TopBar } from './top-bar';
+import { useIdleLock } from './use-idle-lock';
 import { Waiting } from './waiting';
 
 /** What stands around every page behind the sign-in. */
 export function Frame() {
   const { user, hospital } = useSession();
   const content = useFocusOnNewPage();
+  useIdleLock();
   const navigation = useNavigation();
   const { pathname, search } = useLocation();
   // The session may end while a page is open: the answer to the next request says so.

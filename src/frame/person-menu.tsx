@@ -1,6 +1,6 @@
 import { useLocation, useNavigate } from 'react-router-dom';
 import type { User } from '../../shared/contract/session';
-import type { Role } from '../../shared/permissions';
+import { roleNames } from '../../shared/permissions';
 import { useSignOut } from '../features/session/mutations';
 import { buildSignInPath, paths } from '../paths';
 import { Button } from '../ui/button';
@@ -8,14 +8,6 @@ import { Chevron } from '../ui/chevron';
 import { ProblemNote } from '../ui/problem-note';
 import { dropBelow } from './drop-below';
 import { ThemeSwitch } from './theme-switch';
-
-const roleNames: Record<Role, string> = {
-  technologist: 'technologist',
-  physicist: 'medical physicist',
-  interventionalist: 'interventionalist',
-  committee: 'committee member',
-  administrator: 'administrator',
-};
 
 /** Who is signed in; theme, change of person at a shared computer, sign out. */
 export function PersonMenu({ user }: { user: User }) {

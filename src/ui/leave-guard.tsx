@@ -1,12 +1,14 @@
 import { useEffect } from 'react';
 import { useBlocker } from 'react-router-dom';
+import { isScreenLocking } from '../lib/screen-lock';
 import { Button } from './button';
 import { Dialog } from './dialog';
 
 /** Asks before a change of page or a closed tab takes unsaved entries along. */
 export function LeaveGuard({ isGuarding }: { isGuarding: () => boolean }) {
   const blocker = useBlocker(
-    ({ currentLocation, nextLocation }) => currentLocation.pathname !== nextLocation.pathname && isGuarding(),
+    ({ currentLocation, nextLocation }) =>
+      !isScreenLocking() && currentLocation.pathname !== nextLocation.pathname && isGuarding(),
   );
   useEffect(() => {
     const warn = (event: BeforeUnloadEvent) => {
