@@ -12,7 +12,7 @@ import {
 } from '../../../shared/units';
 import { formatTimeWithSeconds } from '../../lib/clock';
 import { findRate, type RateBasis } from './event-blocks';
-import { namePlane } from './procedure-words';
+import { midSentencePlane } from './procedure-words';
 
 export const nameEventType = (type: string | null): string =>
   type === null ? 'type not told' : type.replaceAll('-', ' ');
@@ -51,9 +51,7 @@ export function describeEvent(event: IrradiationEvent, place: number, basis: Rat
   return [
     `Event ${place + 1}`,
     event.startedAt === null ? null : formatTimeWithSeconds(event.startedAt),
-    event.plane === null || event.plane === 'single'
-      ? null
-      : namePlane(event.plane).toLowerCase().replace(/b$/, 'B').replace(/a$/, 'A'),
+    event.plane === null || event.plane === 'single' ? null : midSentencePlane(event.plane),
     nameEventType(event.type),
     event.kvpMean === null ? 'kVp not told' : `${formatKvp(event.kvpMean)} kVp`,
     rate === null ? 'rate not known' : `${formatRate(rate, basis)} ${rateUnits[basis]}`,

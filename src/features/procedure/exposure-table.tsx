@@ -11,6 +11,7 @@ import {
   evidenceWords,
   exposureQuantities,
   findExposureScale,
+  findRowRemarks,
   nameExposed,
 } from './exposure-words';
 
@@ -63,7 +64,7 @@ const Person = ({ exposure }: { exposure: StaffExposure }) => (
       <span className="text-ink-2 max-md:font-normal">{describeDuty(exposure)}</span>
     </span>
     <span className="text-sm font-normal text-ink-2">{describeProtection(exposure)}</span>
-    {exposure.gaps.map((gap) => (
+    {findRowRemarks(exposure).map((gap) => (
       <span key={gap.code} className="text-sm font-normal text-ink">
         {gap.detail}.
       </span>

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import type { Estimated } from '../../../shared/contract/common';
+import type { Estimated, Remark } from '../../../shared/contract/common';
 import { jobNames } from '../../../shared/contract/person';
 import { dutyNames } from '../../../shared/contract/record';
 import type { StaffExposure } from '../../../shared/contract/staff-exposure';
@@ -17,10 +17,9 @@ export function nameExposed(exposure: StaffExposure): string {
 
 export const describeDuty = (exposure: StaffExposure): string => {
   const duty = dutyNames[exposure.duty];
-  // Where the name is the job title already, it is not said twice.
-  return exposure.job === null || !exposure.person
-    ? duty
-    : `${duty}, ${jobNames[exposure.job].toLowerCase()}`;
+  const job = exposure.job === null ? null : jobNames[exposure.job];
+  // Where the job stands for the name, or equals the duty, it is not said twice.
+  return job === null || !exposure.person || job === duty ? duty : `${duty}, ${job.toLowerCase()}`;
 };
 
 export const evidenceWords: Record<StaffExposure['evidenceGrade'], string> = {
@@ -108,6 +107,12 @@ export const writeFigure = (figure: Estimated | null, unit: string): string =>
   figure === null
     ? 'not estimated'
     : `${formatScatter(figure.nominal)} ${unit}, interval ${formatScatterInterval(figure.low, figure.high)}`;
+
+/** What the row must say at once: why a figure is missing, or why it is nothing. */
+export const findRowRemarks = (exposure: StaffExposure): Remark[] => [
+  ...exposure.warnings.filter(({ code }) => code === 'behind-barrier'),
+  ...exposure.gaps,
+];
 
 /** What stands between the person and the scatter, in words. */
 export const describeProtection = (exposure: StaffExposure): string =>

@@ -3,7 +3,7 @@ import { formatDecimals } from '../../../shared/units';
 import { MarginNote } from '../../ui/margin-note';
 import { TextLink } from '../../ui/text-link';
 import { readPlane, type TotalQuantity } from './combine-planes';
-import { namePlane } from './procedure-words';
+import { midSentencePlane } from './procedure-words';
 import { TotalSign, writeTotal } from './quantity-words';
 
 const corrected = ['reference-air-kerma', 'kerma-area-product'] as const satisfies readonly TotalQuantity[];
@@ -35,10 +35,7 @@ export function FactorsNote({
       <ul>
         {rows.map(({ plane, quantity, factor, figures }) => (
           <li key={`${plane.equipmentId} ${plane.plane} ${quantity}`} className="border-b border-rule py-1.5">
-            <TotalSign of={quantity} />{' '}
-            {namePlane(plane.plane)
-              .toLowerCase()
-              .replace(/ [ab]$/, (end) => end.toUpperCase())}
+            <TotalSign of={quantity} /> {midSentencePlane(plane.plane)}
             <span className="block">
               {writeTotal(figures.displayed, quantity)} × {formatDecimals(factor, 2)} ={' '}
               {writeTotal(figures.corrected, quantity)} †

@@ -25,7 +25,7 @@ export function PresenceList({ procedureId, choices }: PresenceListProps) {
   };
   return (
     <fieldset className="flex min-w-0 flex-col gap-3">
-      <legend className="w-full border-b border-rule pb-1 font-semibold">Staff in the room</legend>
+      <legend className="mb-3 w-full border-b border-rule pb-1 font-semibold">Staff in the room</legend>
       {team && team.presences.length > 0 && (
         <p className="flex flex-wrap items-center gap-3 text-sm text-ink-2">
           <Button

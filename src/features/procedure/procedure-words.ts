@@ -11,14 +11,16 @@ const planeNames: Record<'single' | 'A' | 'B' | 'all', string> = {
 export const namePlane = (plane: PlaneTotals['plane']): string =>
   plane === null ? 'Plane not told' : planeNames[plane];
 
+/** "single plane", "plane A": the name inside a sentence. */
+export const midSentencePlane = (plane: PlaneTotals['plane']): string =>
+  namePlane(plane).replace(/^[A-Z]/, (first) => first.toLowerCase());
+
 /** "single plane", "planes A and B"; null where no plane is known. */
 export function describePlanes(planes: readonly Pick<PlaneTotals, 'plane'>[]): string | null {
   const known = [...new Set(planes.flatMap(({ plane }) => plane ?? []))].sort();
   if (known.length === 0) return null;
   if (known.length === 2 && known.includes('A') && known.includes('B')) return 'planes A and B';
-  return known
-    .map((plane) => planeNames[plane].toLowerCase().replace(/ ([ab])$/, (end) => end.toUpperCase()))
-    .join(', ');
+  return known.map(midSentencePlane).join(', ');
 }
 
 const timeNotes: Record<Procedure['timeBasis'], string> = {

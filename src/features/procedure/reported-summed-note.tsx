@@ -1,8 +1,8 @@
 import type { PlaneTotals } from '../../../shared/contract/procedure';
 import { formatDecimals } from '../../../shared/units';
 import { MarginNote } from '../../ui/margin-note';
-import { findDifference, totalQuantities, type TotalQuantity } from './combine-planes';
-import { namePlane } from './procedure-words';
+import { findDifference, totalQuantities } from './combine-planes';
+import { midSentencePlane } from './procedure-words';
 import { TotalSign, writeTotal } from './quantity-words';
 
 const fields = {
@@ -11,41 +11,52 @@ const fields = {
   'kerma-area-product': 'kermaAreaProductGyCm2',
 } as const;
 
+/** Below this share a difference is rounding. */
+const roundingShare = 0.0005;
+
 function describeDifference(share: number | null): string {
-  if (share === null) return 'cannot be compared';
-  const percent = share * 100;
-  if (Math.abs(percent) < 0.05) return 'no difference';
-  return `${percent > 0 ? '+' : ''}${formatDecimals(percent, 1)} %`;
+  if (share === null) return '';
+  const percent = formatDecimals(share * 100, 1);
+  return `: ${share > 0 ? '+' : ''}${percent} %`;
 }
 
-/** The machine's totals beside the sum of the events, per plane. */
+/** The machine's totals beside the sum of the events: only what is missing or differs, plane by plane. */
 export const ReportedSummedNote = ({ planes }: { planes: readonly PlaneTotals[] }) => (
   <MarginNote title="Reported and summed">
     <ul>
-      {planes.flatMap((plane) =>
-        totalQuantities.map((quantity: TotalQuantity) => {
-          const reported = plane.reported?.[fields[quantity]] ?? null;
-          const summed = plane.summed[fields[quantity]];
-          if (reported === null && summed === null) return null;
-          return (
-            <li
-              key={`${plane.equipmentId} ${plane.plane} ${quantity}`}
-              className="border-b border-rule py-1 text-sm"
-            >
-              <TotalSign of={quantity} />
-              {planes.length > 1 &&
-                ` ${namePlane(plane.plane)
-                  .toLowerCase()
-                  .replace(/ [ab]$/, (end) => end.toUpperCase())}`}
-              <span className="block text-ink-2">
-                {reported === null ? 'not reported' : writeTotal(reported, quantity)}; events{' '}
-                {summed === null ? 'tell none' : writeTotal(summed, quantity)};{' '}
-                {describeDifference(findDifference(plane, quantity))}
-              </span>
-            </li>
-          );
-        }),
-      )}
+      {planes.map((plane) => (
+        <li key={`${plane.equipmentId} ${plane.plane}`} className="border-b border-rule py-1.5 text-sm">
+          <PlaneComparison plane={plane} />
+        </li>
+      ))}
     </ul>
   </MarginNote>
 );
+
+function PlaneComparison({ plane }: { plane: PlaneTotals }) {
+  const name = midSentencePlane(plane.plane);
+  if (plane.reported === null) return <>The {name} has no reported totals: its events are summed.</>;
+  const rows = totalQuantities.flatMap((quantity) => {
+    const reported = plane.reported?.[fields[quantity]] ?? null;
+    const summed = plane.summed[fields[quantity]];
+    const difference = findDifference(plane, quantity);
+    const isSame = difference !== null && Math.abs(difference) < roundingShare;
+    return isSame || (reported === null && summed === null)
+      ? []
+      : [{ quantity, reported, summed, difference }];
+  });
+  if (rows.length === 0) return <>Reported totals of the {name} and the sum of its events agree.</>;
+  return (
+    <>
+      Of the {name}:
+      {rows.map(({ quantity, reported, summed, difference }) => (
+        <span key={quantity} className="block">
+          <TotalSign of={quantity} /> reported{' '}
+          {reported === null ? 'nowhere' : writeTotal(reported, quantity)}, events{' '}
+          {summed === null ? 'tell none' : writeTotal(summed, quantity)}
+          {describeDifference(difference)}
+        </span>
+      ))}
+    </>
+  );
+}
