@@ -1,4 +1,4 @@
-import type { EntityManager } from 'typeorm';
+import type { EntityManager, FindOptionsSelect } from 'typeorm';
 import { IrradiationEvent } from './irradiation-event.entity';
 
 export type NewEvent = Omit<IrradiationEvent, 'procedureId'>;
@@ -63,5 +63,18 @@ export async function addEvents(db: EntityManager, procedureId: string, events: 
   );
 }
 
+const inTime = { startedAt: 'ASC', plane: 'ASC', id: 'ASC' } as const;
+
+/** The events with the file's own strings: for whoever shows them. */
 export const listEvents = (db: EntityManager, procedureId: string): Promise<IrradiationEvent[]> =>
-  db.find(IrradiationEvent, { where: { procedureId }, order: { startedAt: 'ASC', plane: 'ASC', id: 'ASC' } });
+  db.find(IrradiationEvent, { where: { procedureId }, order: inTime });
+
+export type EventFigures = Omit<IrradiationEvent, 'reported'>;
+
+const figures = Object.fromEntries(
+  ['procedureId', ...names.filter((name) => name !== 'reported')].map((name) => [name, true]),
+) as FindOptionsSelect<IrradiationEvent>;
+
+/** The events without the file's own strings, which are most of a row: for whoever computes. */
+export const listEventFigures = (db: EntityManager, procedureId: string): Promise<EventFigures[]> =>
+  db.find(IrradiationEvent, { select: figures, where: { procedureId }, order: inTime });

@@ -3,7 +3,7 @@ import type { Db } from '../db/db';
 import { listReportsOf } from '../dose-reports/dose-report.store';
 import type { Hospital } from '../hospital/hospital.entity';
 import { listLevels } from '../levels/level.store';
-import { listEvents } from './irradiation-event.store';
+import { listEventFigures } from './irradiation-event.store';
 import { updateProcedure } from './procedure.store';
 import type { Procedure } from './procedure.entity';
 import { summariseProcedure } from './summarise-procedure';
@@ -17,7 +17,7 @@ export async function recomputeProcedure(
   now: Date,
 ): Promise<void> {
   const reports = await listReportsOf(db, hospital.id, procedure.id);
-  const events = await listEvents(db, procedure.id);
+  const events = await listEventFigures(db, procedure.id);
   const equipmentIds = [...new Set(reports.flatMap((report) => report.equipmentId ?? []))];
   const summary = summariseProcedure({
     procedure,

@@ -5,7 +5,7 @@ import { scopeOf } from '../../shared/permissions';
 import type { Db } from '../db/db';
 import type { Actor } from '../kernel/actor';
 import { listChoices } from '../people/person.store';
-import { listEvents } from '../procedures/irradiation-event.store';
+import { listEventFigures } from '../procedures/irradiation-event.store';
 import { listPresences } from '../procedures/presence.store';
 import type { Presence } from '../procedures/presence.entity';
 import type { Procedure } from '../procedures/procedure.entity';
@@ -80,7 +80,7 @@ export async function describeExposures(db: Db, actor: Actor, procedure: Procedu
   const presences = await listPresences(db, procedure.id, procedure.recordRevision);
   const registers = await readRegisters(db, procedure.hospitalId);
   const people = new Map((await listChoices(db, procedure.hospitalId)).map((person) => [person.id, person]));
-  const drawn = toEstimateRows(procedure, await listEvents(db, procedure.id), presences, registers, {
+  const drawn = toEstimateRows(procedure, await listEventFigures(db, procedure.id), presences, registers, {
     newId: () => '',
     revision: procedure.estimateRevision,
     computedAt: new Date(),

@@ -8,7 +8,7 @@ import {
   type TubePosition,
 } from '../../shared/dosimetry/estimate-staff-exposure';
 import type { Garment } from '../garments/garment.entity';
-import type { IrradiationEvent } from '../procedures/irradiation-event.entity';
+import type { EventFigures } from '../procedures/irradiation-event.store';
 import type { Presence } from '../procedures/presence.entity';
 import type { Procedure } from '../procedures/procedure.entity';
 import type { StaffEstimate } from './staff-estimate.entity';
@@ -31,7 +31,7 @@ export type EstimateRowOptions = {
   draws?: number;
 };
 
-function toExposureEvent(event: IrradiationEvent, procedure: Procedure): ExposureEvent {
+function toExposureEvent(event: EventFigures, procedure: Procedure): ExposureEvent {
   const copper = event.filters.filter((filter) => filter.type === 'flat' && filter.material === 'Cu');
   const plane =
     procedure.planes.length === 1
@@ -143,7 +143,7 @@ function fluoroscopyShareOf({ byPart }: StaffExposureEstimate): number | null {
  */
 export function toEstimateRows(
   procedure: Procedure,
-  events: readonly IrradiationEvent[],
+  events: readonly EventFigures[],
   presences: readonly Presence[],
   registers: EstimateRegisters,
   { newId, revision, computedAt, reason, draws = 0 }: EstimateRowOptions,

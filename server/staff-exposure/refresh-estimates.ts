@@ -1,7 +1,7 @@
 import { systemClock } from '../kernel/clock';
 import type { Db } from '../db/db';
 import { newId } from '../kernel/new-id';
-import { listEvents } from '../procedures/irradiation-event.store';
+import { listEventFigures } from '../procedures/irradiation-event.store';
 import { listPresences } from '../procedures/presence.store';
 import { updateProcedure } from '../procedures/procedure.store';
 import type { Procedure } from '../procedures/procedure.entity';
@@ -13,7 +13,7 @@ import { appendEstimates } from './staff-estimate.store';
 export async function refreshEstimates(db: Db, procedure: Procedure, reason: string | null): Promise<void> {
   const revision = procedure.estimateRevision + 1;
   const presences = await listPresences(db, procedure.id, procedure.recordRevision);
-  const events = await listEvents(db, procedure.id);
+  const events = await listEventFigures(db, procedure.id);
   const registers = await readRegisters(db, procedure.hospitalId);
   const options = { newId, revision, computedAt: systemClock(), reason };
   await appendEstimates(db, toEstimateRows(procedure, events, presences, registers, options));
