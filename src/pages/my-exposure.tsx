@@ -1,4 +1,4 @@
-import { useSuspenseQuery } from '@tanstack/react-query';
+import { useSuspenseQueries } from '@tanstack/react-query';
 import { explainExposure } from '../features/exposure/explain-exposure';
 import { dropEmptyEnd } from '../features/exposure/month-figures';
 import { MonthsChart } from '../features/exposure/months-chart';
@@ -22,9 +22,13 @@ export function Component() {
   const user = useUser();
   const [filter, changeFilter] = useUrlFilter(ownFilterSchema);
   const own = { ...filter, person: user.id };
-  const { data: months } = useSuspenseQuery(exposureQueries.months(own));
-  const { data: found } = useSuspenseQuery(exposureQueries.points({ ...own, duty: 'any' }));
-  const { data: garments } = useSuspenseQuery(garmentQueries.list());
+  const [{ data: months }, { data: found }, { data: garments }] = useSuspenseQueries({
+    queries: [
+      exposureQueries.months(own),
+      exposureQueries.points({ ...own, duty: 'any' }),
+      garmentQueries.list(),
+    ],
+  });
   const shown = dropEmptyEnd(months.items);
   const mine = garments.filter(({ owner }) => owner?.id === user.id);
   const worn = mine.filter(({ state }) => state === 'in-service');

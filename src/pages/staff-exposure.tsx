@@ -1,4 +1,4 @@
-import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
+import { useQuery, useSuspenseQueries } from '@tanstack/react-query';
 import { useCallback } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { exposureFilterSchema } from '../../shared/contract/staff-exposure';
@@ -22,11 +22,13 @@ export function Component() {
   const navigate = useNavigate();
   const [filter, changeFilter] = useUrlFilter(exposureFilterSchema);
   const scope = scopeOf(user, 'staff-exposure.read');
-  const { data: found } = useSuspenseQuery(exposureQueries.points(filter));
-  const { data: people } = useSuspenseQuery(exposureQueries.people());
-  const { data: months } = useSuspenseQuery(
-    exposureQueries.months({ person: filter.person, period: filter.period === 'all' ? 'all' : '12m' }),
-  );
+  const [{ data: found }, { data: people }, { data: months }] = useSuspenseQueries({
+    queries: [
+      exposureQueries.points(filter),
+      exposureQueries.people(),
+      exposureQueries.months({ person: filter.person, period: filter.period === 'all' ? 'all' : '12m' }),
+    ],
+  });
   const { data: rooms = [] } = useQuery({
     ...roomQueries.list(),
     enabled: scopeOf(user, 'room.list') !== null,

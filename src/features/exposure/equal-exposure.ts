@@ -8,9 +8,9 @@ export type RateBand = {
 };
 export type EqualExposure = { valueUSv: number; points: { x: number; y: number }[] };
 
-const bandKvp = 4;
+export const bandKvp = 4;
 /** Fewer procedures say nothing about a band. */
-const fewestInBand = 25;
+export const fewestInBand = 40;
 /** A line over fewer bands would look like a law. */
 const fewestBands = 3;
 
@@ -22,7 +22,7 @@ const median = (sorted: readonly number[]): number => {
 
 /**
  * The median estimate per minute of fluoroscopy in bands of 4 kVp, of the shown procedures themselves; bands
- * of fewer than 25 procedures are left out.
+ * of fewer than 40 procedures are left out.
  */
 export function findRateBands(points: readonly ExposurePoint[]): RateBand[] {
   const rates = new Map<number, number[]>();
@@ -46,7 +46,8 @@ export function findRateBands(points: readonly ExposurePoint[]): RateBand[] {
 
 /**
  * Where a value is reached at each band's median rate: minutes = value / rate. A description of the shown
- * procedures, no model; none where fewer than three bands are known.
+ * procedures, no model: none where fewer than three bands are known, nothing beyond the longest procedure.
+ * From the highest kVp down.
  */
 export function findEqualExposures(
   points: readonly ExposurePoint[],
@@ -54,8 +55,13 @@ export function findEqualExposures(
 ): EqualExposure[] {
   const bands = findRateBands(points);
   if (bands.length < fewestBands) return [];
+  const longestMin =
+    points.reduce((longest, point) => Math.max(longest, point.fluoroscopyTimeS ?? 0), 0) / 60;
   return valuesUSv.map((valueUSv) => ({
     valueUSv,
-    points: bands.map(({ kvp, medianPerMin }) => ({ x: valueUSv / medianPerMin, y: kvp })).reverse(),
+    points: bands
+      .map(({ kvp, medianPerMin }) => ({ x: valueUSv / medianPerMin, y: kvp }))
+      .filter(({ x }) => x <= longestMin)
+      .reverse(),
   }));
 }

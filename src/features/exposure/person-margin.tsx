@@ -42,10 +42,9 @@ export function PersonMargin({ months, quantity, people, onChoose }: PersonMargi
             : 'No month of this period has an estimate.'}
         </p>
       )}
-      {sum && (
+      {sum && months.person && (
         <p className="text-sm text-ink-2">
-          Together {writeMsv(sum)}
-          {months.person === null && ', over all persons'}.
+          Together {writeMsv(sum)} in {shown.length} months.
         </p>
       )}
     </MarginNote>

@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { isInArea } from '../../charts/scatter.types';
 import type { ExposurePoints, ExposureQuantity } from '../../../shared/contract/staff-exposure';
+import { formatInteger } from '../../../shared/units';
 import { Button } from '../../ui/button';
 import { ExplainPanel, type Explanation } from '../../ui/explain-panel';
 import { Section } from '../../ui/margin-note';
@@ -57,7 +58,7 @@ export function PointsView({ found, quantity, explanation, onOpen }: PointsViewP
         )}
       </Section>
       <Section
-        title={area ? `${chosen.length} chosen` : `All ${items.length}`}
+        title={area ? `${formatInteger(chosen.length)} chosen` : `All ${formatInteger(items.length)}`}
         note={sort.key === 'estimate' && sort.order === 'descending' ? 'highest first' : undefined}
         aside={
           area ? (

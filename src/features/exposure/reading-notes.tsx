@@ -3,15 +3,17 @@ import { paths } from '../../paths';
 import { Caution } from '../../ui/caution';
 import { MarginNote } from '../../ui/margin-note';
 import { TextLink } from '../../ui/text-link';
+import { bandKvp, fewestInBand } from './equal-exposure';
 
 /** How to read the chart, and the cautions that belong beside estimates. */
 export const ReadingNotes = ({ isUnnamed }: { isUnnamed: boolean }) => (
   <>
     <MarginNote title="Dashed lines">
       <p className="text-sm text-ink-2">
-        Equal exposure at the median rate of the procedures shown: in bands of 4 kVp with at least 25
-        procedures, the value divided by the band’s median exposure per minute of fluoroscopy. They describe
-        these procedures and predict none; acquisitions, place and screens are in them as they happened.
+        Equal exposure at the median rate of the procedures shown: in bands of {bandKvp} kVp with at least{' '}
+        {fewestInBand} procedures, the value divided by the band’s median exposure per minute of fluoroscopy.
+        They describe these procedures and predict none; acquisitions, place and screens are in them as they
+        happened.
       </p>
     </MarginNote>
     <MarginNote title="What these figures are">
