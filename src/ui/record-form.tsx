@@ -44,6 +44,7 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
   children,
 }: RecordFormProps<Input, Output, Saved>) {
   const { isDirty, defaultValues } = form.formState;
+  const frame = useRef<HTMLFormElement>(null);
   const isDone = useRef(false);
   const isGuarding = useCallback(() => isDirty && !isDone.current, [isDirty]);
 
@@ -53,11 +54,14 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
         isDone.current = true;
         onSaved(saved);
       },
-      onError: (error) => placeIssues(error, form.setError),
+      onError: (error) => {
+        placeIssues(error, form.setError);
+        focusInvalid(frame.current);
+      },
     });
   const submit = (event?: FormEvent) => {
     event?.preventDefault();
-    if (!save.isPending) void form.handleSubmit(send)();
+    if (!save.isPending) void form.handleSubmit(send, () => focusInvalid(frame.current))();
   };
 
   const isConflict = save.error instanceof ApiProblem && save.error.code === 'conflict';
@@ -70,6 +74,7 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
   };
   return (
     <form
+      ref={frame}
       noValidate
       onSubmit={submit}
       className={joinClassNames('flex flex-col gap-5', !isWide && 'max-w-3xl')}
@@ -97,6 +102,11 @@ export function RecordForm<Input extends FieldValues, Output extends object, Sav
       {!isDraftKept && <LeaveGuard isGuarding={isGuarding} />}
     </form>
   );
+}
+
+/** Comboboxes and the like hold no reference of the form's: the first field in error is found on the page. */
+function focusInvalid(frame: HTMLFormElement | null): void {
+  requestAnimationFrame(() => frame?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus());
 }
 
 function compareVersions(mine: { name: string; value: string }[], theirs: { name: string; value: string }[]) {

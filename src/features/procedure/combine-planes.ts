@@ -18,6 +18,8 @@ export function readPlane(plane: PlaneTotals, quantity: TotalQuantity): Figures 
 }
 
 const add = (one: number, other: number): number => one + other;
+// Not Math.max itself: a fold hands over place and list as well.
+const takeLarger = (one: number, other: number): number => Math.max(one, other);
 
 function fold(values: (number | null)[], combine: (one: number, other: number) => number): number | null {
   const known = values.filter((value) => value !== null);
@@ -35,7 +37,7 @@ export function combinePlanes(
 ): Figures {
   const figures = planes.map((plane) => readPlane(plane, quantity));
   const isLarger = quantity === 'reference-air-kerma' && fieldsOverlap === false;
-  const combine = isLarger ? Math.max : add;
+  const combine = isLarger ? takeLarger : add;
   const hasFactor = figures.some(({ corrected }) => corrected !== null);
   return {
     displayed: fold(

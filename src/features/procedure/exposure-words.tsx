@@ -110,7 +110,9 @@ export const writeFigure = (figure: Estimated | null, unit: string): string =>
 
 /** What the row must say at once: why a figure is missing, or why it is nothing. */
 export const findRowRemarks = (exposure: StaffExposure): Remark[] => [
-  ...exposure.warnings.filter(({ code }) => code === 'behind-barrier'),
+  ...(exposure.collarAirKermaUGy?.high === 0
+    ? exposure.warnings.filter(({ code }) => code === 'behind-barrier')
+    : []),
   ...exposure.gaps,
 ];
 

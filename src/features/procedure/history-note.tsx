@@ -5,11 +5,15 @@ import { Button } from '../../ui/button';
 import { MarginNote } from '../../ui/margin-note';
 
 const firstShown = 6;
+const lookAction = 'patient shown';
 
 /** Who did what, when, and why; newest first. */
 export function HistoryNote({ history, timeZone }: { history: Procedure['history']; timeZone: string }) {
   const [isWhole, setIsWhole] = useState(false);
-  const newestFirst = [...history].sort((one, other) => other.at.localeCompare(one.at));
+  // Looks at the patient's identity change nothing: they are counted, not listed among the changes.
+  const changes = history.filter(({ action }) => action !== lookAction);
+  const looks = history.length - changes.length;
+  const newestFirst = [...changes].sort((one, other) => other.at.localeCompare(one.at));
   const shown = isWhole ? newestFirst : newestFirst.slice(0, firstShown);
   if (history.length === 0) return null;
   return (
@@ -25,10 +29,15 @@ export function HistoryNote({ history, timeZone }: { history: Procedure['history
           </li>
         ))}
       </ol>
-      {history.length > firstShown && !isWhole && (
+      {changes.length > firstShown && !isWhole && (
         <Button isSmall onClick={() => setIsWhole(true)}>
-          All {history.length} entries
+          All {changes.length} entries
         </Button>
+      )}
+      {looks > 0 && (
+        <p className="text-sm text-ink-2">
+          The patient’s identity was shown {looks === 1 ? 'once' : `${looks} times`}.
+        </p>
       )}
     </MarginNote>
   );

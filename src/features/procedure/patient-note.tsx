@@ -6,6 +6,9 @@ import { ProblemNote } from '../../ui/problem-note';
 import { DefinitionList, DefinitionRow } from '../../ui/definition-row';
 import { procedureQueries } from './queries';
 
+/** DICOM parts a name by carets; people read "family, given". */
+const writeName = (name: string): string => name.split('^').filter(Boolean).join(', ');
+
 type PatientNoteProps = {
   procedureId: string;
   /** Shown at once to those who match files with patients all day; on request to others. */
@@ -35,7 +38,9 @@ export function PatientNote({ procedureId, isShownAtOnce }: PatientNoteProps) {
       )}
       {data && (
         <DefinitionList>
-          <DefinitionRow name="Name">{data.name ?? 'not reported'}</DefinitionRow>
+          <DefinitionRow name="Name">
+            {data.name === null ? 'not reported' : writeName(data.name)}
+          </DefinitionRow>
           <DefinitionRow name="Patient ID">{data.id ?? 'not reported'}</DefinitionRow>
           <DefinitionRow name="Born">{data.birthDate ?? 'not reported'}</DefinitionRow>
           <DefinitionRow name="Sex">{data.sex ?? 'not reported'}</DefinitionRow>

@@ -1,9 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
+import { useRef } from 'react';
+import { flushSync } from 'react-dom';
 import { useFieldArray, useFormContext } from 'react-hook-form';
 import type { RecordInput } from '../../../shared/contract/record';
 import { Button } from '../../ui/button';
 import { FieldError } from '../../ui/field';
-import { newPresence } from './presence-values';
+import { newPresence, type PresenceInput } from './presence-values';
 import { PresenceRow } from './presence-row';
 import { procedureQueries } from './queries';
 import type { RecordChoices } from './record-choices';
@@ -18,6 +20,11 @@ export function PresenceList({ procedureId, choices }: PresenceListProps) {
   const { data: team } = useQuery(procedureQueries.suggestedTeam(procedureId));
   const { accessSide } = getValues();
   const listError = formState.errors.presences?.root?.message ?? formState.errors.presences?.message;
+  const list = useRef<HTMLOListElement>(null);
+  const enter = (presence: PresenceInput) => {
+    flushSync(() => append(presence, { shouldFocus: false }));
+    list.current?.querySelector<HTMLElement>(':scope > li:last-child input')?.focus();
+  };
   const leave = (place: number) => {
     remove(place);
     // The last row is gone: the field must know, for an empty list is an answer too.
@@ -44,34 +51,19 @@ export function PresenceList({ procedureId, choices }: PresenceListProps) {
       {fields.length === 0 && (
         <p className="text-ink-2">Nobody is listed yet. Choosing the operator above lists them here.</p>
       )}
-      <ol className="flex flex-col">
+      <ol ref={list} className="flex flex-col">
         {fields.map((field, place) => (
           <PresenceRow key={field.rowKey} place={place} choices={choices} onLeave={() => leave(place)} />
         ))}
       </ol>
       <div className="flex flex-wrap gap-3">
-        <Button
-          isSmall
-          onClick={() => append(newPresence('other', accessSide), focusOf(fields.length, 'personId'))}
-        >
+        <Button isSmall onClick={() => enter(newPresence('other', accessSide))}>
           Add a person
         </Button>
-        <Button
-          isSmall
-          onClick={() =>
-            append(
-              { ...newPresence('other', accessSide), visitorName: '' },
-              focusOf(fields.length, 'visitorName'),
-            )
-          }
-        >
+        <Button isSmall onClick={() => enter({ ...newPresence('other', accessSide), visitorName: '' })}>
           Add a visitor
         </Button>
       </div>
     </fieldset>
   );
 }
-
-const focusOf = (place: number, field: 'personId' | 'visitorName') => ({
-  focusName: `presences.${place}.${field}`,
-});

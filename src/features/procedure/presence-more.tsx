@@ -1,24 +1,21 @@
 import { useFormContext } from 'react-hook-form';
 import type { Place, RecordInput } from '../../../shared/contract/record';
-import { SelectField } from '../../ui/select-field';
 import { DecimalField } from './decimal-field';
-import { placeChoices, readPlaceChoice, writePlaceChoice } from './place-choices';
 import type { PresenceInput } from './presence-values';
 
 type PresenceMoreProps = {
   place: number;
   presence: PresenceInput;
   onChange: (next: PresenceInput) => void;
-  accessSide: RecordInput['accessSide'];
 };
 
-/** What most cases do not need: another place for acquisitions, exact coordinates, part of the time. */
-export function PresenceMore({ place, presence, onChange, accessSide }: PresenceMoreProps) {
+/** What most cases do not need: exact coordinates, part of the time. */
+export function PresenceMore({ place, presence, onChange }: PresenceMoreProps) {
   const { formState } = useFormContext<RecordInput>();
   const errors = formState.errors.presences?.[place];
   const { fluoroscopyPlace, acquisitionPlace } = presence;
   const hasMore =
-    acquisitionPlace !== null ||
+    acquisitionPlace?.preset === null ||
     fluoroscopyPlace?.preset === null ||
     (presence.presentFromS ?? null) !== null ||
     (presence.presentToS ?? null) !== null;
@@ -28,24 +25,9 @@ export function PresenceMore({ place, presence, onChange, accessSide }: Presence
   return (
     <details open={hasMore || undefined}>
       <summary className="target w-fit text-sm text-lee underline underline-offset-3">
-        More: acquisitions elsewhere, exact place, part of the time
+        More: exact place, part of the time
       </summary>
       <div className="grid gap-x-6 gap-y-3 pt-2 sm:grid-cols-2 xl:grid-cols-4">
-        <SelectField
-          label="Place during acquisitions"
-          choices={[{ value: 'same', label: 'Same' }, ...placeChoices]}
-          value={writePlaceChoice(acquisitionPlace, 'same')}
-          onChange={({ target }) =>
-            onChange({
-              ...presence,
-              acquisitionPlace: readPlaceChoice(
-                target.value,
-                acquisitionPlace ?? fluoroscopyPlace,
-                accessSide,
-              ),
-            })
-          }
-        />
         {fluoroscopyPlace && (
           <Coordinates
             name="Place"

@@ -31,7 +31,7 @@ export function PresenceRow({ place, choices, onLeave }: PresenceRowProps) {
     <li className="border-b border-rule py-3 first:pt-1">
       <fieldset className="flex min-w-0 flex-col gap-2.5">
         <legend className="sr-only">{name || `Person ${place + 1}`}</legend>
-        <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[1.3fr_1fr_1.1fr_1.5fr_auto]">
+        <div className="grid items-start gap-x-4 gap-y-3 sm:grid-cols-2 lg:grid-cols-[1.1fr_1fr_1.1fr_1.1fr_1.4fr]">
           {isVisitor ? (
             <TextField
               label="Visitor"
@@ -80,6 +80,22 @@ export function PresenceRow({ place, choices, onLeave }: PresenceRowProps) {
             }
             error={errors?.fluoroscopyPlace?.message}
           />
+          <SelectField
+            label="During acquisitions"
+            choices={[{ value: 'same', label: 'Same place' }, ...placeChoices]}
+            value={writePlaceChoice(presence.acquisitionPlace, 'same')}
+            onChange={({ target }) =>
+              change({
+                ...presence,
+                acquisitionPlace: readPlaceChoice(
+                  target.value,
+                  presence.acquisitionPlace ?? presence.fluoroscopyPlace,
+                  accessSide,
+                ),
+              })
+            }
+            error={errors?.acquisitionPlace?.message}
+          />
           <ComboboxField
             label="Garment"
             placeholder="Code, owner, none, not known"
@@ -93,17 +109,18 @@ export function PresenceRow({ place, choices, onLeave }: PresenceRowProps) {
             }
             error={errors?.garmentId?.message}
           />
+        </div>
+        <PresenceShields presence={presence} onChange={change}>
           <Button
             isSmall
-            className="sm:mt-7"
+            className="ml-auto"
             aria-label={`Remove ${name || `person ${place + 1}`}`}
             onClick={onLeave}
           >
             Remove
           </Button>
-        </div>
-        <PresenceShields presence={presence} onChange={change} />
-        <PresenceMore place={place} presence={presence} onChange={change} accessSide={accessSide} />
+        </PresenceShields>
+        <PresenceMore place={place} presence={presence} onChange={change} />
       </fieldset>
     </li>
   );

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { Checkbox } from '../../ui/checkbox';
 import type { PresenceInput } from './presence-values';
 
@@ -16,10 +17,15 @@ const collarAnswers = [
   { value: '', label: 'Collar not known' },
 ];
 
-type PresenceShieldsProps = { presence: PresenceInput; onChange: (next: PresenceInput) => void };
+type PresenceShieldsProps = {
+  presence: PresenceInput;
+  onChange: (next: PresenceInput) => void;
+  /** Stands at the end of the line. */
+  children: ReactNode;
+};
 
 /** What stood between the person and the beam, as ticks in one line. */
-export const PresenceShields = ({ presence, onChange }: PresenceShieldsProps) => (
+export const PresenceShields = ({ presence, onChange, children }: PresenceShieldsProps) => (
   <div className="flex flex-wrap items-center gap-x-5 gap-y-1.5 text-sm">
     <select
       aria-label="Thyroid collar"
@@ -43,5 +49,6 @@ export const PresenceShields = ({ presence, onChange }: PresenceShieldsProps) =>
         onChange={({ target }) => onChange({ ...presence, [field]: target.checked })}
       />
     ))}
+    {children}
   </div>
 );

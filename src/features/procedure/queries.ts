@@ -37,13 +37,14 @@ export const procedureQueries = {
       queryFn: ({ signal }) =>
         request(`${pathOf(id)}/suggested-team`, { schema: suggestedTeamSchema, signal }),
     }),
-  /** Every answer is written into the audit: asked for once, never again by itself, and not kept. */
+  /** Every answer is written into the audit: asked for once, never again by itself, and soon forgotten. */
   patient: (id: string) =>
     queryOptions({
       queryKey: ['procedure-patient', id],
-      queryFn: ({ signal }) => request(`${pathOf(id)}/patient`, { schema: patientSchema, signal }),
+      // Without the signal: a request that is given up and sent anew would be written down twice.
+      queryFn: () => request(`${pathOf(id)}/patient`, { schema: patientSchema }),
       staleTime: Infinity,
-      gcTime: 0,
+      gcTime: 60_000,
       refetchOnWindowFocus: false,
       refetchOnReconnect: false,
       retry: false,

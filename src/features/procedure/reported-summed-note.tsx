@@ -2,7 +2,7 @@ import type { PlaneTotals } from '../../../shared/contract/procedure';
 import { formatDecimals } from '../../../shared/units';
 import { MarginNote } from '../../ui/margin-note';
 import { findDifference, totalQuantities } from './combine-planes';
-import { midSentencePlane } from './procedure-words';
+import { midSentencePlane, namePlane } from './procedure-words';
 import { TotalSign, writeTotal } from './quantity-words';
 
 const fields = {
@@ -48,7 +48,7 @@ function PlaneComparison({ plane }: { plane: PlaneTotals }) {
   if (rows.length === 0) return <>Reported totals of the {name} and the sum of its events agree.</>;
   return (
     <>
-      Of the {name}:
+      {namePlane(plane.plane)}:
       {rows.map(({ quantity, reported, summed, difference }) => (
         <span key={quantity} className="block">
           <TotalSign of={quantity} /> reported{' '}

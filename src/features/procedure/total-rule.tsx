@@ -3,7 +3,7 @@ import { LevelRule } from '../../charts/level-rule';
 import { findLogRange } from '../../lib/log-scale';
 import type { TotalQuantity } from './combine-planes';
 import { keepComparable, leastComparableCases, nameQuarter } from './level-position';
-import { quantityNames, toScale, writeTotal } from './quantity-words';
+import { formatTotal, quantityNames, toScale, writeTotal } from './quantity-words';
 
 type TotalRuleProps = {
   quantity: TotalQuantity;
@@ -24,7 +24,7 @@ export function TotalRule({ quantity, value, comparison, isMarked, hasType }: To
     : [null, null, null];
   const range = findLogRange([scaled(value), scaled(level), ...quartiles].filter((at) => at !== null));
   const words = describe();
-  if (!range) return <span className="text-sm text-ink-2">{words}</span>;
+  if (!range || (!comparable && level === null)) return <span className="text-sm text-ink-2">{words}</span>;
   return (
     <div className="flex flex-col gap-0.5">
       <LevelRule
@@ -49,11 +49,11 @@ export function TotalRule({ quantity, value, comparison, isMarked, hasType }: To
       const n = comparison?.n ?? 0;
       return `Too few of this type for quartiles: n = ${n}, needed ${leastComparableCases}.${levelWords}`;
     }
-    const [lower, upper] = [comparable.lowerQuartile, comparable.upperQuartile].map((at) =>
-      writeTotal(at, quantity),
-    );
+    const lower = formatTotal(comparable.lowerQuartile, quantity);
+    const upper = formatTotal(comparable.upperQuartile, quantity);
+    const from = lower.unit === upper.unit ? lower.value : `${lower.value} ${lower.unit}`;
     const quarter = nameQuarter(value, comparison);
     const place = quarter === null ? '' : `${quarter.charAt(0).toUpperCase()}${quarter.slice(1)}; `;
-    return `${place}middle half ${lower} to ${upper}, n = ${comparable.n}.${levelWords}`;
+    return `${place}middle half ${from} to ${upper.value} ${upper.unit}, n = ${comparable.n}.${levelWords}`;
   }
 }
