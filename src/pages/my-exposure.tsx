@@ -1,6 +1,7 @@
 import { useSuspenseQueries } from '@tanstack/react-query';
 import { explainExposure } from '../features/exposure/explain-exposure';
 import { dropEmptyEnd } from '../features/exposure/month-figures';
+import { ExposureLead } from '../features/exposure/exposure-lead';
 import { MonthsChart } from '../features/exposure/months-chart';
 import { ownFilterSchema } from '../features/exposure/own-filter';
 import { OwnNotes } from '../features/exposure/own-notes';
@@ -37,6 +38,7 @@ export function Component() {
     <Page
       title="My exposure"
       heading={<OwnSentence filter={filter} onChange={changeFilter} />}
+      lead={<ExposureLead found={found} />}
       margin={<OwnNotes garmentsConfirmedOn={findOldest(worn.map((garment) => garment.lastInspectedOn))} />}
     >
       {hasFigures ? (

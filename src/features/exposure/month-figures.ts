@@ -1,21 +1,31 @@
 import type { MonthInterval } from '../../charts/month-intervals';
 import type { ExposureMonth, ExposureQuantity } from '../../../shared/contract/staff-exposure';
-import { convertUSvToMsv, formatMsv, formatSignificant, MISSING } from '../../../shared/units';
+import {
+  convertUSvToMsv,
+  formatDecimals,
+  formatScatterInterval,
+  formatSignificant,
+  MISSING,
+} from '../../../shared/units';
 import { formatMonth } from '../../lib/clock';
 
 export type Range = { nominal: number; low: number; high: number };
 
-/** Monthly and yearly figures in mSv: two decimals, below 0.1 two significant digits, so that small is not zero. */
-export const formatSmallMsv = (valueMsv: number | null): string => {
+/**
+ * Monthly and yearly estimates in mSv: two decimals, from 10 on one, from 100 on none; below 0.1 two
+ * significant digits, so that small is not zero. An estimate carries no more.
+ */
+export function formatSmallMsv(valueMsv: number | null): string {
   if (valueMsv === null) return MISSING;
-  return valueMsv >= 0.0995 ? formatMsv(valueMsv) : formatSignificant(valueMsv, 2);
-};
+  if (valueMsv < 0.0995) return formatSignificant(valueMsv, 2);
+  return formatDecimals(valueMsv, valueMsv < 9.995 ? 2 : valueMsv < 99.95 ? 1 : 0);
+}
 
-/** "0.12–1.40", in mSv. */
+/** "0.40–3.1", in mSv: both ends to two significant digits. */
 export const formatMsvRange = ({ low, high }: Range): string =>
-  `${formatSmallMsv(convertUSvToMsv(low))}–${formatSmallMsv(convertUSvToMsv(high))}`;
+  formatScatterInterval(convertUSvToMsv(low), convertUSvToMsv(high)) ?? MISSING;
 
-/** "1.24 mSv (0.40–3.10)". */
+/** "1.24 mSv (0.40–3.1)". */
 export const writeMsv = (range: Range): string =>
   `${formatSmallMsv(convertUSvToMsv(range.nominal))} mSv (${formatMsvRange(range)})`;
 
@@ -25,13 +35,14 @@ const countProcedures = (count: number): string => (count === 1 ? '1 procedure' 
 export const toIntervals = (months: readonly ExposureMonth[], quantity: ExposureQuantity): MonthInterval[] =>
   months.map((month) => {
     const figure = month[quantity];
-    const value = figure ? writeMsv(figure) : month.procedures > 0 ? 'not estimable' : 'no procedures';
+    const value = figure ? writeMsv(figure) : 'not estimable';
+    const text = month.procedures > 0 ? `${value}, ${countProcedures(month.procedures)}` : 'no procedures';
     return {
       month: month.month,
       nominal: figure && convertUSvToMsv(figure.nominal),
       low: figure && convertUSvToMsv(figure.low),
       high: figure && convertUSvToMsv(figure.high),
-      text: `${formatMonth(month.month)}: ${value}, ${countProcedures(month.procedures)}`,
+      text: `${formatMonth(month.month)}: ${text}`,
     };
   });
 

@@ -9,7 +9,8 @@ export const OwnNotes = ({ garmentsConfirmedOn }: { garmentsConfirmedOn: string 
     <MarginNote title="What this means">
       <p className="text-sm text-ink-2">
         Computed from the dose reports of the procedures whose record names you: each event’s KAP, kVp and
-        C-arm angle, where you were said to stand, and what you were said to wear.
+        C-arm angle, where you were said to stand, and what you were said to wear. The scatter model errs on
+        the high side beside the patient; a badge worn as it should be often reads less.
       </p>
       <Caution of="estimate-not-record" />
       <Caution of="scatter-interval" />
