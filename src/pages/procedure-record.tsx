@@ -1,5 +1,6 @@
 import { useSuspenseQueries } from '@tanstack/react-query';
 import { useNavigate, useParams } from 'react-router-dom';
+import { idSchema } from '../../shared/contract/common';
 import type { Procedure } from '../../shared/contract/procedure';
 import { garmentQueries } from '../features/garments/queries';
 import { personQueries } from '../features/people/queries';
@@ -7,6 +8,7 @@ import { procedureTypeQueries } from '../features/procedure-types/queries';
 import { describePlace, nameProcedure } from '../features/procedure/procedure-words';
 import { procedureQueries } from '../features/procedure/queries';
 import { ProcedureRecordForm } from '../features/procedure/record-form';
+import { NotFound } from '../frame/not-found';
 import { Page } from '../frame/page';
 import { paths } from '../paths';
 import { Caution } from '../ui/caution';
@@ -15,6 +17,10 @@ import { showToast } from '../ui/toast-store';
 
 export function Component() {
   const { id = '' } = useParams();
+  return idSchema.safeParse(id).success ? <OpenedRecord key={id} id={id} /> : <NotFound />;
+}
+
+function OpenedRecord({ id }: { id: string }) {
   const navigate = useNavigate();
   const [{ data: procedure }, { data: people }, { data: types }, { data: garments }] = useSuspenseQueries({
     queries: [
@@ -41,7 +47,6 @@ export function Component() {
       margin={<Margin />}
     >
       <ProcedureRecordForm
-        key={id}
         procedure={procedure}
         choices={{ people, types, garments }}
         backTo={paths.procedure(id)}

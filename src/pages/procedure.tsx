@@ -1,5 +1,6 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useParams } from 'react-router-dom';
+import { idSchema } from '../../shared/contract/common';
 import type { Procedure } from '../../shared/contract/procedure';
 import { can, scopeOf } from '../../shared/permissions';
 import { AttentionReasons } from '../features/procedure/attention-reasons';
@@ -16,14 +17,19 @@ import { ReportedSummedNote } from '../features/procedure/reported-summed-note';
 import { ReportsNote } from '../features/procedure/reports-note';
 import { TotalsSection } from '../features/procedure/totals-section';
 import { useSession, useUser } from '../features/session/queries';
+import { NotFound } from '../frame/not-found';
 import { Page } from '../frame/page';
 import { paths } from '../paths';
 import { ButtonLink } from '../ui/button';
 
 export function Component() {
   const { id = '' } = useParams();
+  return idSchema.safeParse(id).success ? <OpenedProcedure key={id} id={id} /> : <NotFound />;
+}
+
+function OpenedProcedure({ id }: { id: string }) {
   const { data: procedure } = useSuspenseQuery(procedureQueries.detail(id));
-  return <ProcedurePage key={id} procedure={procedure} />;
+  return <ProcedurePage procedure={procedure} />;
 }
 
 function ProcedurePage({ procedure }: { procedure: Procedure }) {

@@ -74,21 +74,23 @@ export function ComboboxField({
             hidden={!box.isOpen}
             className="absolute inset-x-0 top-full z-30 mt-1 max-h-72 overflow-y-auto border border-edge bg-surface py-1 shadow-lg"
           >
-            {box.shown.map((choice, index) => (
-              <li
-                key={choice.value}
-                id={`${control.id}-${index}`}
-                role="option"
-                aria-selected={index === box.active}
-                // The field keeps the focus; a blur would close the list before the click.
-                onMouseDown={(event) => event.preventDefault()}
-                onClick={() => box.choose(choice)}
-                className="min-h-8 border-l-3 border-transparent px-3 py-1 hover:bg-paper aria-selected:border-lee aria-selected:bg-paper"
-              >
-                {choice.label}
-                {choice.detail && <span className="ml-2 text-sm text-ink-2">{choice.detail}</span>}
-              </li>
-            ))}
+            {/* Closed, there is nothing to build: a form may hold twenty such fields. */}
+            {box.isOpen &&
+              box.shown.map((choice, index) => (
+                <li
+                  key={choice.value}
+                  id={`${control.id}-${index}`}
+                  role="option"
+                  aria-selected={index === box.active}
+                  // The field keeps the focus; a blur would close the list before the click.
+                  onMouseDown={(event) => event.preventDefault()}
+                  onClick={() => box.choose(choice)}
+                  className="min-h-8 border-l-3 border-transparent px-3 py-1 hover:bg-paper aria-selected:border-lee aria-selected:bg-paper"
+                >
+                  {choice.label}
+                  {choice.detail && <span className="ml-2 text-sm text-ink-2">{choice.detail}</span>}
+                </li>
+              ))}
             {box.shown.length === 0 && (
               <li role="option" aria-selected={false} aria-disabled="true" className="px-3 py-1 text-ink-2">
                 Nobody and nothing fits these letters.

@@ -1,10 +1,15 @@
+import type { ReactNode } from 'react';
 import type { IrradiationEvent } from '../../../shared/contract/irradiation-event';
 import { formatDecimals, formatSignificant } from '../../../shared/units';
-import { namePointer } from '../../ui/problem-note';
 import { CloseButton } from '../../ui/close-button';
 import { describeAngles, describeFilters, nameEventType } from './event-words';
+import { nameReported } from './reported-names';
 
-const withUnit = (text: string, unit: string | null): string => (unit === null ? text : `${text} ${unit}`);
+/** The file's own unit: a bare count has none, and UCUM's braces only annotate. */
+const writeUnit = (unit: string | null): string =>
+  unit === null || unit === '1' ? '' : ` ${unit.replace(/[{}]/g, '')}`;
+
+const withUnit = (text: string, unit: string | null): string => text + writeUnit(unit);
 
 function writeReported(text: readonly string[], unit: string | null): string {
   if (text.length <= 6) return withUnit(text.join(', '), unit);
@@ -42,7 +47,7 @@ export const EventDetail = ({ event, place, onClose }: EventDetailProps) => (
         <h4 className="condensed font-semibold text-ink-2">As the file says it</h4>
         <dl className="grid gap-x-8 gap-y-1 sm:grid-cols-2 xl:grid-cols-3">
           {Object.entries(event.reported).map(([name, { text, unit }]) => (
-            <Pair key={name} name={namePointer(`/${name}`)}>
+            <Pair key={name} name={nameReported(name)}>
               <span className="break-all">{writeReported(text, unit)}</span>
             </Pair>
           ))}
@@ -52,7 +57,7 @@ export const EventDetail = ({ event, place, onClose }: EventDetailProps) => (
   </section>
 );
 
-const Pair = ({ name, children }: { name: string; children: React.ReactNode }) => (
+const Pair = ({ name, children }: { name: string; children: ReactNode }) => (
   <div className="flex justify-between gap-3 border-b border-rule py-0.5">
     <dt className="text-ink-2">{name}</dt>
     <dd className="min-w-0 text-right">{children}</dd>

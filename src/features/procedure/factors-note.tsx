@@ -1,5 +1,5 @@
 import type { PlaneTotals } from '../../../shared/contract/procedure';
-import { formatDecimals } from '../../../shared/units';
+import { formatDecimals, THIN_SPACE } from '../../../shared/units';
 import { MarginNote } from '../../ui/margin-note';
 import { TextLink } from '../../ui/text-link';
 import { readPlane, type TotalQuantity } from './combine-planes';
@@ -38,7 +38,8 @@ export function FactorsNote({
             <TotalSign of={quantity} /> {midSentencePlane(plane.plane)}
             <span className="block">
               {writeTotal(figures.displayed, quantity)} × {formatDecimals(factor, 2)} ={' '}
-              {writeTotal(figures.corrected, quantity)} †
+              {writeTotal(figures.corrected, quantity)}
+              {THIN_SPACE}†
             </span>
             <span className="block text-sm text-ink-2">factor valid from {plane.factors.validFrom}</span>
           </li>

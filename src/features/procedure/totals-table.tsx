@@ -1,4 +1,5 @@
 import type { PlaneTotals, Procedure } from '../../../shared/contract/procedure';
+import { formatKermaAreaProduct } from '../../../shared/units';
 import { DataTable } from '../../ui/data-table';
 import type { Column } from '../../ui/data-table.types';
 import { combinePlanes, readPlane, totalQuantities, type TotalQuantity } from './combine-planes';
@@ -20,6 +21,7 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
     cell: (quantity) => (
       <span className={isOne ? 'font-semibold' : undefined}>
         <TotalFigure figures={readPlane(plane, quantity)} quantity={quantity} />
+        {quantity === 'kerma-area-product' && <Parts plane={plane} />}
       </span>
     ),
   }));
@@ -54,7 +56,7 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
       key: 'rule',
       head: 'Among its kind: middle half, median, dashed the notification level',
       phone: 'wide',
-      className: 'md:w-[44%]',
+      className: isOne ? 'md:w-[56%]' : 'md:w-[44%]',
       cell: (quantity) => {
         const { displayed, corrected } = combinePlanes(procedure, quantity);
         return (
@@ -78,6 +80,18 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
       hasStickyHead={false}
       footer={<TotalsBasis procedure={procedure} />}
     />
+  );
+}
+
+/** How much of it was fluoroscopy and how much acquisition, as displayed; nothing where neither is known. */
+function Parts({ plane }: { plane: PlaneTotals }) {
+  const { fluoroscopyKermaAreaProductGyCm2: seen, acquisitionKermaAreaProductGyCm2: acquired } = plane;
+  if (seen === null && acquired === null) return null;
+  return (
+    <span className="block text-sm font-normal text-ink-2">
+      fluoroscopy {formatKermaAreaProduct(seen)}
+      <span className="md:block"> acquisition {formatKermaAreaProduct(acquired)}</span>
+    </span>
   );
 }
 
