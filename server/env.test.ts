@@ -32,7 +32,6 @@ describe('readEnvironment', () => {
     ['DATABASE_URL', 'mysql://db'],
     ['LEEWARD_DEMO', 'maybe'],
     ['DEMO_ANCHOR', '2026-02-30'],
-    ['HOSPITAL_TIME_ZONE', 'Mars/Olympus'],
     ['LOG_LEVEL', 'loud'],
     ['TLS_CERT_FILE', 'cert.pem'],
   ])('refuses %s=%s and names the variable', (name, value) => {

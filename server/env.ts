@@ -9,16 +9,6 @@ const optionalText = z
   .optional()
   .transform((text) => (text ? text : null));
 
-function isTimeZone(zone: string): boolean {
-  try {
-    return Boolean(new Intl.DateTimeFormat('en', { timeZone: zone }));
-  } catch {
-    return false;
-  }
-}
-
-const timeZone = z.string().refine(isTimeZone, { error: 'must be an IANA time zone such as America/Denver' });
-
 /** A calendar date that exists, as YYYY-MM-DD. */
 const calendarDate = z.iso.date({ error: 'must be a date as YYYY-MM-DD' });
 
@@ -43,7 +33,6 @@ const variables = z.object({
   DEMO_ANCHOR: calendarDate.optional(),
   TLS_CERT_FILE: optionalText,
   TLS_KEY_FILE: optionalText,
-  HOSPITAL_TIME_ZONE: timeZone.optional(),
   LOG_LEVEL: z.enum(logLevels, { error: `must be one of ${logLevels.join(', ')}` }).default('info'),
 });
 
@@ -74,8 +63,6 @@ const environmentSchema = variables
       given.TLS_CERT_FILE && given.TLS_KEY_FILE
         ? { certificate: given.TLS_CERT_FILE, key: given.TLS_KEY_FILE }
         : null,
-    /** IANA zone of a new hospital that is not the demo's. */
-    hospitalTimeZone: given.HOSPITAL_TIME_ZONE ?? Intl.DateTimeFormat().resolvedOptions().timeZone,
     logLevel: given.LOG_LEVEL,
   }));
 

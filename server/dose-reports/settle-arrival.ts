@@ -14,7 +14,7 @@ export async function settleArrival(
   now: Date,
 ): Promise<ReceivedFile> {
   const read = readDoseReport(bytes);
-  if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, read.reason);
+  if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, inWords(read.reason));
   try {
     return await store(db, arrival, read, now);
   } catch (error) {
@@ -22,6 +22,12 @@ export async function settleArrival(
     throw error;
   }
 }
+
+/** The sentence for a person, then what the reader stumbled over, for whoever is asked for help. */
+const inWords = ({ code, detail }: { code: ReasonCode; detail: string }) => ({
+  code,
+  detail: `${sentenceOfReason(code)} (${detail})`,
+});
 
 const reasonOf = (code: ReasonCode) => ({ code, detail: sentenceOfReason(code) });
 

@@ -5,6 +5,7 @@ import type { Actor } from '../kernel/actor';
 import { fieldProblem } from '../kernel/field-problem';
 import { newId } from '../kernel/new-id';
 import { Problem } from '../kernel/problem';
+import { recomputeSince } from '../procedures/recompute-since';
 import { addCalibrationFactor, listCalibrationFactors } from './calibration-factor.store';
 import { findEquipment } from './equipment.store';
 
@@ -17,12 +18,24 @@ export async function listFactorsOfEquipment(
   return listCalibrationFactors(db, actor.hospitalId, equipmentId);
 }
 
-/** Appends a factor; earlier ones stay as they are, so that every corrected value can be retraced. */
-export const enterCalibrationFactor = (
+/**
+ * Enters a factor and recomputes what it concerns: the machine's procedures from its day on. Estimates made with the
+ * factor before stay readable as earlier revisions.
+ */
+export async function enterCalibrationFactor(
   db: Db,
   actor: Actor,
   input: CalibrationFactorInput,
-): Promise<CalibrationFactor> =>
+  now: Date,
+): Promise<CalibrationFactor> {
+  const entered = await appendFactor(db, actor, input);
+  const reason = `calibration factor ${entered.factor} from ${entered.validFrom}`;
+  await recomputeSince(db, actor.hospitalId, entered.equipmentId, entered.validFrom, reason, now);
+  return entered;
+}
+
+/** Appends a factor; earlier ones stay as they are, so that every corrected value can be retraced. */
+const appendFactor = (db: Db, actor: Actor, input: CalibrationFactorInput): Promise<CalibrationFactor> =>
   db.transaction(async (tx) => {
     if (!(await findEquipment(tx, actor.hospitalId, input.equipmentId)))
       throw fieldProblem({ pointer: '/equipmentId', detail: 'There is no such machine.' });

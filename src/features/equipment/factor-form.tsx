@@ -50,7 +50,7 @@ export function FactorForm({ equipmentId }: { equipmentId: string }) {
       <ProblemNote error={enter.error} kept="Your entries are still in the form." />
       <FieldGroup
         legend="Add a factor"
-        note="True value divided by displayed value. It holds from its day on, until a later one follows; a procedure that is already computed gets it with its next recomputation, such as a further report or a corrected record."
+        note="True value divided by displayed value. It holds from its day on, until a later one follows. Procedures of this machine from that day on are computed again at once: with a year of them, that takes a minute."
       >
         <SelectField
           label="Plane"
