@@ -41,7 +41,7 @@ const toChoice = (garment: Garment, whose: string): ComboboxChoice => ({
 });
 
 const answers: ComboboxChoice[] = [
-  { value: 'none', label: 'No garment' },
+  { value: 'none', label: 'None worn' },
   { value: 'unknown', label: 'Not known', detail: 'nothing is estimated behind it' },
 ];
 

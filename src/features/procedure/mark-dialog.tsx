@@ -1,4 +1,5 @@
 import { zodResolver } from '@hookform/resolvers/zod';
+import { useQueryClient } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import { useForm } from 'react-hook-form';
 import { procedureMarkSchema, type Procedure, type ProcedureMark } from '../../../shared/contract/procedure';
@@ -9,6 +10,7 @@ import { ProblemNote } from '../../ui/problem-note';
 import { TextArea } from '../../ui/text-field';
 import { showToast } from '../../ui/toast-store';
 import { useMarkProcedure } from './mutations';
+import { procedureKey } from './queries';
 
 type MarkDialogProps = {
   procedure: Procedure;
@@ -39,6 +41,7 @@ function MarkForm({
   doneText,
   onClose,
 }: Omit<MarkDialogProps, 'isOpen' | 'title'>) {
+  const queryClient = useQueryClient();
   const save = useMarkProcedure(procedure.id);
   const form = useForm({
     resolver: zodResolver(procedureMarkSchema.pick({ reason: true })),
@@ -52,7 +55,11 @@ function MarkForm({
           showToast({ text: doneText });
           onClose();
         },
-        onError: (error) => placeIssues(error, form.setError),
+        onError: (error) => {
+          placeIssues(error, form.setError);
+          // Somebody was faster: the page shows what they did, and a second press builds on it.
+          void queryClient.invalidateQueries({ queryKey: procedureKey(procedure.id) });
+        },
       },
     ),
   );
