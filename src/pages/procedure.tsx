@@ -54,7 +54,7 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
       <ExposureSection
         procedureId={procedure.id}
         next={
-          canComplete && !isComplete ? recordLink : 'A technologist or the physicist completes the record.'
+          !isComplete && (canComplete ? recordLink : 'A technologist or the physicist completes the record.')
         }
       />
     </Page>
