@@ -1,4 +1,5 @@
 import { Foundation1764547200000 } from './1764547200000-foundation';
+import { ExposureIndexes1796083200000 } from './1796083200000-exposure-indexes';
 
 /** In the order they run. */
-export const migrations = [Foundation1764547200000];
+export const migrations = [Foundation1764547200000, ExposureIndexes1796083200000];

@@ -5,10 +5,11 @@ import type { ScatterArea } from '../../charts/scatter.types';
 import type { ExposurePoint, ExposureQuantity } from '../../../shared/contract/staff-exposure';
 import { formatDecimals, formatScatter, formatScatterInterval } from '../../../shared/units';
 import { formatDate } from '../../lib/clock';
+import { useMediaQuery } from '../../lib/media-query';
 import { placePoint } from './chosen-area';
 import { findEqualExposures } from './equal-exposure';
 import { quantityWords } from './exposure-words';
-import { findToneLimits, nameTones } from './tone-limits';
+import { findToneLimits, nameLimit, nameTones } from './tone-limits';
 
 type ExposureChartProps = {
   points: readonly ExposurePoint[];
@@ -33,6 +34,7 @@ function describePoint(point: ExposurePoint): string {
 
 /** Fluoroscopy time across, kVp up, the estimate as tone and size; dashed: equal exposure at the median rate. */
 export function ExposureChart({ points, quantity, area, onArea, onOpen }: ExposureChartProps) {
+  const isNarrow = useMediaQuery('(max-width: 47.99rem)');
   const drawn = useMemo(() => {
     const limits = findToneLimits(points.map((point) => point.estimate.nominal));
     const placed = points.flatMap((point) => {
@@ -48,11 +50,12 @@ export function ExposureChart({ points, quantity, area, onArea, onOpen }: Exposu
         text: describePoint(point),
       })),
       guides: findEqualExposures(points, limits.slice(1)).map((guide) => ({
-        name: `${formatScatter(guide.valueUSv)} µSv`,
+        // On a phone the names would run into each other; the unit stands in the legend.
+        name: isNarrow ? nameLimit(guide.valueUSv) : `${nameLimit(guide.valueUSv)} µSv`,
         points: guide.points,
       })),
     };
-  }, [points]);
+  }, [points, isNarrow]);
   const openPoint = useCallback(
     (index: number) => {
       const procedureId = drawn.procedureIds[index];

@@ -28,7 +28,8 @@ export const MethodsLead = () => (
       is read {heavyCopperShiftKv} kV higher (at 80 kVp, 0.35 mm:{' '}
       {formatPercent(garmentTransmission({ ...example, copperMm: heavyCopperMm }))} instead of{' '}
       {formatPercent(garmentTransmission({ ...example, copperMm: null }))}); lead-free material known by
-      narrow beam counts × {leadFreeFactor}. A defect of area share f gives T′ = (1 − f) T + f.
+      narrow beam counts × {leadFreeFactor}. A defect of area share f gives{' '}
+      <span className="whitespace-nowrap">T′ = (1 − f) T + f</span>.
     </p>
     <PlotWithTable
       lines={kvps.map((kvp) => ({

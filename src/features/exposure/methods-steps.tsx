@@ -25,7 +25,7 @@ const steps = [
   },
   {
     name: 'Interval',
-    text: 'About 95 %, from every uncertain input; closed form, and 2 000 draws when a procedure is opened. A correction of the record adds a new estimate; earlier ones stay readable.',
+    text: 'About 95 %, from every uncertain input; closed form, and 2 000 draws when a procedure is opened. A correction of the record adds a new estimate; earlier ones stay readable.',
   },
 ];
 

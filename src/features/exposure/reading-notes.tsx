@@ -13,7 +13,7 @@ export const ReadingNotes = ({ isUnnamed }: { isUnnamed: boolean }) => (
         Equal exposure at the median rate of the procedures shown: in bands of {bandKvp} kVp with at least{' '}
         {fewestInBand} procedures, the value divided by the band’s median exposure per minute of fluoroscopy.
         They describe these procedures and predict none; acquisitions, place and screens are in them as they
-        happened.
+        happened. Where fewer than three bands are known there are none.
       </p>
     </MarginNote>
     <MarginNote title="What these figures are">

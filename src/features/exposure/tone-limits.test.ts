@@ -18,9 +18,9 @@ test('rounding looks at ratios', () => {
 
 test('the legend names every tone', () => {
   expect(nameTones([2, 5, 10, 1000])).toEqual([
-    'below 2.0',
-    '2.0–5.0',
-    '5.0–10',
+    'below 2',
+    '2–5',
+    '5–10',
     '10–1\u202f000',
     '1\u202f000 and above',
   ]);

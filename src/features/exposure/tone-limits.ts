@@ -1,4 +1,4 @@
-import { formatScatter } from '../../../shared/units';
+import { groupThousands } from '../../../shared/units';
 
 /** Shares of the procedures below each limit, before rounding: a few stand out, most are told apart. */
 const shares = [0.2, 0.5, 0.8, 0.96];
@@ -27,13 +27,14 @@ export function findToneLimits(values: readonly number[]): number[] {
   return limits;
 }
 
+/** A round limit as it is printed: 0.2, 5, 1 000. */
+export const nameLimit = (limit: number): string => groupThousands(String(limit));
+
 /** Five names for the legend: "below 5", "5–20", …, "200 and above". */
 export function nameTones(limits: readonly number[]): string[] {
   return [...limits, Infinity].map((limit, tone) => {
     const from = limits[tone - 1];
-    if (from === undefined) return `below ${formatScatter(limit)}`;
-    return limit === Infinity
-      ? `${formatScatter(from)} and above`
-      : `${formatScatter(from)}–${formatScatter(limit)}`;
+    if (from === undefined) return `below ${nameLimit(limit)}`;
+    return limit === Infinity ? `${nameLimit(from)} and above` : `${nameLimit(from)}–${nameLimit(limit)}`;
   });
 }
