@@ -10,6 +10,8 @@ import { buildSignInPath, paths } from './paths';
 /** The URL map of what stands behind the sign-in. A page is loaded when it is opened. */
 const pages: RouteObject[] = [
   { path: paths.home, lazy: () => import('./pages/home') },
+  { path: paths.procedures, lazy: () => import('./pages/procedures') },
+  { path: paths.doseReports, lazy: () => import('./pages/dose-reports') },
   { path: paths.staffExposure, lazy: () => import('./pages/staff-exposure') },
   { path: paths.myExposure, lazy: () => import('./pages/my-exposure') },
   { path: paths.methods, lazy: () => import('./pages/methods') },

@@ -2,9 +2,7 @@ import type { IrradiationEvent } from '../../../shared/contract/irradiation-even
 import { convertGyPerSToMgyPerMin } from '../../../shared/units';
 import type { StripBlock } from '../../charts/strip.types';
 import { findShadeStep } from '../../charts/shade-step';
-
-/** Limits between the five shades of kVp. */
-export const kvpShadeLimits = [65, 75, 85, 95] as const;
+import { kvpShadeLimits } from '../../lib/kvp-shades';
 
 export type RateBasis = 'reference-air-kerma' | 'kerma-area-product';
 

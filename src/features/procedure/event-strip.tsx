@@ -2,7 +2,8 @@ import { useMemo, useState } from 'react';
 import type { IrradiationEvent } from '../../../shared/contract/irradiation-event';
 import { StripExplorer } from '../../charts/strip-explorer';
 import { StripLegend } from '../../charts/strip-legend';
-import { buildEventBlocks, findSpanS, kvpShadeLimits, type RateBasis } from './event-blocks';
+import { buildEventBlocks, findSpanS, type RateBasis } from './event-blocks';
+import { kvpShadeLimits } from '../../lib/kvp-shades';
 import { EventDetail } from './event-detail';
 import { describeEvent, describeRateBasis, formatRate, rateUnits } from './event-words';
 

@@ -1,0 +1,38 @@
+import type { DoseReport } from '../../../shared/contract/dose-report';
+import { Button } from '../../ui/button';
+import { ProblemNote } from '../../ui/problem-note';
+import { showToast } from '../../ui/toast-store';
+import { useReadAgain } from './mutations';
+import { outcomeWords } from './report-words';
+
+/** What can be done with a kept file: take the original, read it again. */
+export function ReportDeeds({ report }: { report: DoseReport }) {
+  const readAgain = useReadAgain();
+  const isUnread = ['held', 'refused', 'received'].includes(report.outcome);
+  if (!report.hasOriginal) return null;
+  return (
+    <div className="flex flex-col items-start gap-1 text-sm">
+      <a className="link-line" href={`/api/dose-reports/${report.id}/original`} download>
+        Download the original
+      </a>
+      {isUnread && (
+        <Button
+          isSmall
+          isBusy={readAgain.isPending}
+          onClick={() =>
+            readAgain.mutate(report.id, {
+              onSuccess: ({ outcome, reason }) =>
+                showToast({
+                  text: `Read again: ${outcomeWords[outcome]}. ${reason?.detail ?? ''}`,
+                  isProblem: reason !== null,
+                }),
+            })
+          }
+        >
+          Read again
+        </Button>
+      )}
+      <ProblemNote error={readAgain.error} />
+    </div>
+  );
+}

@@ -1,0 +1,28 @@
+import type { DoseReport } from '../../../shared/contract/dose-report';
+import type { Choice } from '../../ui/select-field';
+
+export const outcomeWords: Record<DoseReport['outcome'], string> = {
+  stored: 'stored',
+  duplicate: 'already here',
+  held: 'held',
+  refused: 'refused',
+  received: 'received, not read yet',
+};
+
+export const outcomeChoices: Choice[] = [
+  { value: 'any', label: 'with any outcome' },
+  { value: 'stored', label: 'that were stored' },
+  { value: 'duplicate', label: 'that were here already' },
+  { value: 'held', label: 'that are held' },
+  { value: 'refused', label: 'that were refused' },
+  { value: 'received', label: 'that wait to be read' },
+];
+
+/** "7 344 stored, 2 held, 1 refused." */
+export function describeCounts(counts: Record<string, number>): string {
+  const parts = Object.entries(outcomeWords).flatMap(([outcome, name]) => {
+    const count = counts[outcome] ?? 0;
+    return count === 0 ? [] : [`${count} ${name}`];
+  });
+  return parts.length === 0 ? 'No file has come yet.' : `${parts.join(', ')}.`;
+}

@@ -1,0 +1,151 @@
+import type { ProcedureRow } from '../../../shared/contract/procedure';
+import {
+  formatFluoroscopyTime,
+  formatKermaAreaProduct,
+  formatKvp,
+  formatReferenceAirKermaMgy,
+} from '../../../shared/units';
+import { formatDate, formatTime } from '../../lib/clock';
+import { AttentionMark } from '../../ui/attention-mark';
+import type { Column } from '../../ui/data-table.types';
+import { Quantity } from '../../ui/quantity';
+import { QuantitySign } from '../../ui/quantity-sign';
+import { LedgerStrip } from './ledger-strip';
+import { describeRecordState } from './ledger-words';
+
+const started: Column<ProcedureRow> = {
+  key: 'started',
+  head: 'Started',
+  sortKey: 'started',
+  firstOrder: 'descending',
+  cell: ({ startedAt, timeBasis }) => (
+    <span className="whitespace-nowrap">
+      {formatDate(startedAt)} <span className="text-ink-2">{formatTime(startedAt)}</span>
+      {timeBasis !== 'event' && (
+        <span className="block text-xs text-ink-2">
+          {timeBasis === 'study' ? 'time of the study' : 'time of receipt'}
+        </span>
+      )}
+    </span>
+  ),
+};
+
+const procedure: Column<ProcedureRow> = {
+  key: 'procedure',
+  head: 'Procedure',
+  phone: 'title',
+  className: 'md:min-w-44',
+  cell: ({ procedureType, studyDescription, caseNumber, procedureClass }) => (
+    <>
+      {procedureType?.name ?? studyDescription ?? 'Type not recorded'}
+      <span className="block text-sm font-normal text-ink-2">
+        {caseNumber}
+        {procedureClass !== 'clinical' && ` · ${procedureClass.replace('-', ' ')}`}
+      </span>
+    </>
+  ),
+};
+
+const patient: Column<ProcedureRow> = {
+  key: 'patient',
+  head: 'Patient',
+  cell: ({ patient: shown }) =>
+    shown ? (
+      <span className="break-words">
+        {shown.name?.replaceAll('^', ' ').trim() || 'no name'}
+        <span className="block text-sm text-ink-2">{shown.id ?? 'no ID'}</span>
+      </span>
+    ) : (
+      <span className="text-ink-2">not kept</span>
+    ),
+};
+
+const figures: Column<ProcedureRow>[] = [
+  {
+    key: 'room',
+    head: 'Room',
+    cell: ({ room }) => room?.name ?? <span className="text-ink-2">no room</span>,
+  },
+  {
+    key: 'operator',
+    head: 'Operator',
+    cell: ({ primaryOperator }) => primaryOperator?.name ?? <span className="text-ink-2">–</span>,
+  },
+  {
+    key: 'time',
+    head: <QuantitySign of="fluoroscopyTime" />,
+    unit: 'min',
+    align: 'end',
+    sortKey: 'fluoroscopy-time',
+    cell: ({ fluoroscopyTimeS }) => <Quantity value={formatFluoroscopyTime(fluoroscopyTimeS)} />,
+  },
+  {
+    key: 'kerma',
+    head: <QuantitySign of="referenceAirKerma" />,
+    unit: 'mGy',
+    align: 'end',
+    sortKey: 'reference-air-kerma',
+    cell: (row) => (
+      <Quantity
+        value={formatReferenceAirKermaMgy(row.referenceAirKermaGy)}
+        isUpperBound={row.isReferenceAirKermaUpperBound}
+        isCorrected={row.isCorrected}
+      />
+    ),
+  },
+  {
+    key: 'area-product',
+    head: <QuantitySign of="kermaAreaProduct" />,
+    unit: 'Gy·cm²',
+    align: 'end',
+    sortKey: 'kerma-area-product',
+    cell: (row) => (
+      <Quantity value={formatKermaAreaProduct(row.kermaAreaProductGyCm2)} isCorrected={row.isCorrected} />
+    ),
+  },
+  {
+    key: 'kvp',
+    head: 'kVp',
+    align: 'end',
+    sortKey: 'kvp',
+    cell: ({ kvpMean }) => <Quantity value={formatKvp(kvpMean)} />,
+  },
+];
+
+const strip: Column<ProcedureRow> = {
+  key: 'strip',
+  head: 'Procedure strip',
+  unit: 'time along, kerma rate up, kVp as shade',
+  phone: 'wide',
+  cell: (row) => <LedgerStrip strip={row.strip} />,
+};
+
+const attention: Column<ProcedureRow> = {
+  key: 'attention',
+  head: 'Attention',
+  cell: ({ attention: flagged }) => flagged && <AttentionMark strength={flagged.level} />,
+};
+
+const record: Column<ProcedureRow> = {
+  key: 'record',
+  head: 'Record',
+  className: 'md:min-w-28',
+  cell: (row) => (
+    <span
+      className={row.recordState === 'complete' ? 'text-sm text-ink-2' : 'text-sm font-semibold text-lee'}
+    >
+      {describeRecordState(row)}
+    </span>
+  ),
+};
+
+/** The columns of the ledger; patients only where the answer names them. */
+export const listLedgerColumns = (hasPatients: boolean): Column<ProcedureRow>[] => [
+  started,
+  procedure,
+  ...(hasPatients ? [patient] : []),
+  ...figures,
+  strip,
+  attention,
+  record,
+];

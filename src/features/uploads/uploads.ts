@@ -1,0 +1,11 @@
+import { useSyncExternalStore } from 'react';
+import { queryClient } from '../../lib/query-client';
+import { createUploadStore, sendFile } from './upload-store';
+
+/** Lives as long as the page: looking elsewhere does not stop an upload. */
+export const uploads = createUploadStore(sendFile, () => {
+  void queryClient.invalidateQueries({ queryKey: ['procedures'] });
+  void queryClient.invalidateQueries({ queryKey: ['dose-reports'] });
+});
+
+export const useUploads = () => useSyncExternalStore(uploads.subscribe, uploads.read);
