@@ -30,34 +30,28 @@ const started: Column<ProcedureRow> = {
   ),
 };
 
+/** Who it was, for those whose answer names the patient. */
+const PatientLine = ({ patient }: Required<Pick<ProcedureRow, 'patient'>>) => (
+  <span className="block text-sm font-normal text-ink-2">
+    {patient.name?.replaceAll('^', ' ').trim() || 'no name'} · {patient.id ?? 'no ID'}
+  </span>
+);
+
 const procedure: Column<ProcedureRow> = {
   key: 'procedure',
   head: 'Procedure',
   phone: 'title',
-  className: 'md:min-w-44',
-  cell: ({ procedureType, studyDescription, caseNumber, procedureClass }) => (
+  className: 'md:min-w-52',
+  cell: ({ procedureType, studyDescription, caseNumber, procedureClass, patient }) => (
     <>
       {procedureType?.name ?? studyDescription ?? 'Type not recorded'}
       <span className="block text-sm font-normal text-ink-2">
         {caseNumber}
         {procedureClass !== 'clinical' && ` · ${procedureClass.replace('-', ' ')}`}
       </span>
+      {patient && <PatientLine patient={patient} />}
     </>
   ),
-};
-
-const patient: Column<ProcedureRow> = {
-  key: 'patient',
-  head: 'Patient',
-  cell: ({ patient: shown }) =>
-    shown ? (
-      <span className="break-words">
-        {shown.name?.replaceAll('^', ' ').trim() || 'no name'}
-        <span className="block text-sm text-ink-2">{shown.id ?? 'no ID'}</span>
-      </span>
-    ) : (
-      <span className="text-ink-2">not kept</span>
-    ),
 };
 
 const figures: Column<ProcedureRow>[] = [
@@ -115,7 +109,7 @@ const figures: Column<ProcedureRow>[] = [
 const strip: Column<ProcedureRow> = {
   key: 'strip',
   head: 'Procedure strip',
-  unit: 'time along, kerma rate up, kVp as shade',
+  unit: 'time along, rate up',
   phone: 'wide',
   cell: (row) => <LedgerStrip strip={row.strip} />,
 };
@@ -139,11 +133,9 @@ const record: Column<ProcedureRow> = {
   ),
 };
 
-/** The columns of the ledger; patients only where the answer names them. */
-export const listLedgerColumns = (hasPatients: boolean): Column<ProcedureRow>[] => [
+export const ledgerColumns: readonly Column<ProcedureRow>[] = [
   started,
   procedure,
-  ...(hasPatients ? [patient] : []),
   ...figures,
   strip,
   attention,

@@ -27,6 +27,7 @@ export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
       blocks={strip.bins.map(toBlock)}
       span={strip.spanS}
       peak={strip.peakRate}
+      width={170}
       label={describe(strip)}
     />
   ) : (

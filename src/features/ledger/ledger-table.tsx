@@ -4,7 +4,7 @@ import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/cont
 import { paths } from '../../paths';
 import { DataTable } from '../../ui/data-table';
 import { MoreButton } from '../../ui/more-button';
-import { listLedgerColumns } from './ledger-columns';
+import { ledgerColumns } from './ledger-columns';
 import { ledgerQueries } from './queries';
 
 type LedgerTableProps = {
@@ -26,7 +26,7 @@ export function LedgerTable({ filter, onChange, total, empty }: LedgerTableProps
     <div>
       <DataTable
         caption="Procedures, each a link to its page"
-        columns={listLedgerColumns(rows.some((row) => row.patient))}
+        columns={ledgerColumns}
         rows={rows}
         rowKey={(row) => row.id}
         rowHref={(row) => paths.procedure(row.id)}
