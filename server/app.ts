@@ -43,13 +43,13 @@ export function createApp(options: AppOptions): Express {
   app.disable('x-powered-by');
   app.set('trust proxy', 'loopback');
   app.set('query parser', 'simple');
+  app.use(logRequests(logger));
   app.use(securityHeaders(isHttps));
   if (options.clientFolder) app.use(serveClient(options.clientFolder));
   app.use('/api', (_request, response, next) => {
     response.set('Cache-Control', 'no-store');
     next();
   });
-  app.use(logRequests(logger));
   app.use(refuseCrossSite);
   app.use(keepSessions(pool, options.sessionSecret, isHttps));
   app.use(authenticator.session());

@@ -16,9 +16,10 @@ function toProblem(error: unknown): Problem | null {
           'malformed-request',
           'The upload could not be read: send the files in the field "files".',
         );
-  const { type, code } = error as { type?: string; code?: string };
+  const { type, code, status } = error as { type?: string; code?: string; status?: number };
   if (type === 'entity.too.large') return new Problem('too-large');
   if (type?.startsWith('entity.') || type === 'charset.unsupported') return new Problem('malformed-request');
+  if (status === 404) return new Problem('not-found');
   if (code === 'ECONNREFUSED' || code === '57P01' || code === '57P03') return new Problem('unavailable');
   return null;
 }
