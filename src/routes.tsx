@@ -1,5 +1,6 @@
 import { createBrowserRouter, redirect, type LoaderFunctionArgs, type RouteObject } from 'react-router-dom';
 import { sessionQueries } from './features/session/queries';
+import { uploads } from './features/uploads/uploads';
 import { Frame } from './frame/frame';
 import { NotFound } from './frame/not-found';
 import { RouteError } from './frame/route-error';
@@ -44,6 +45,7 @@ async function requirePerson({ request }: LoaderFunctionArgs): Promise<null> {
 /** At the sign-in page nothing of the person before may remain. */
 async function fetchSession(): Promise<null> {
   queryClient.clear();
+  uploads.forget();
   await queryClient.ensureQueryData(sessionQueries.current());
   return null;
 }

@@ -5,14 +5,16 @@ import { can } from '../../shared/permissions';
 import { StripLegend } from '../charts/strip-legend';
 import { FindBox } from '../features/ledger/find-box';
 import { LedgerEmpty } from '../features/ledger/ledger-empty';
+import { LedgerLead } from '../features/ledger/ledger-lead';
 import { LedgerSentence } from '../features/ledger/ledger-sentence';
 import { LedgerTable } from '../features/ledger/ledger-table';
-import { describeCount } from '../features/ledger/ledger-words';
+import { listOperators } from '../features/ledger/ledger-words';
 import { ledgerQueries } from '../features/ledger/queries';
 import { personQueries } from '../features/people/queries';
 import { procedureTypeQueries } from '../features/procedure-types/queries';
 import { roomQueries } from '../features/rooms/queries';
 import { useUser } from '../features/session/queries';
+import { UploadBrief } from '../features/uploads/upload-brief';
 import { UploadPanel } from '../features/uploads/upload-panel';
 import { uploads } from '../features/uploads/uploads';
 import { Page } from '../frame/page';
@@ -41,12 +43,20 @@ export function Component() {
           onChange={changeFilter}
           types={types.map(({ id, name }) => ({ value: id, label: name }))}
           rooms={rooms.map(({ id, code }) => ({ value: id, label: code }))}
-          operators={people
-            .filter(({ job }) => /physician|iologist|interventionalist/.test(job))
-            .map(({ id, name }) => ({ value: id, label: name }))}
+          operators={listOperators(people)}
         />
       }
-      lead={describeCount(count)}
+      lead={
+        <div className="flex flex-col gap-2">
+          <LedgerLead
+            count={count}
+            onShowIncomplete={
+              shown.record === 'incomplete' ? null : () => changeFilter({ record: 'incomplete' })
+            }
+          />
+          {openPicker && <UploadBrief onChoose={openPicker} />}
+        </div>
+      }
       deeds={
         <FindBox
           key={filter.find ?? ''}
@@ -83,7 +93,7 @@ const LedgerMargin = ({ upload }: { upload: ReactNode }) => (
         patternedName="acquisition"
         shadeTitle="kVp"
         shadeLimits={kvpShadeLimits}
-        sidesNote="Plane B hangs below the line. Each strip fills its row: compare shapes, not heights."
+        sidesNote="Plane B hangs below the line. Each strip has its own scale, printed below it; height by square root."
       />
     </MarginNote>
     <MarginNote title="What these figures are">

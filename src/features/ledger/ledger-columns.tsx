@@ -18,9 +18,10 @@ const started: Column<ProcedureRow> = {
   head: 'Started',
   sortKey: 'started',
   firstOrder: 'descending',
-  cell: ({ startedAt, timeBasis }) => (
+  cell: ({ startedAt, timeBasis, caseNumber }) => (
     <span className="whitespace-nowrap">
       {formatDate(startedAt)} <span className="text-ink-2">{formatTime(startedAt)}</span>
+      <span className="text-sm text-ink-2 max-md:ml-3 md:block">{caseNumber}</span>
       {timeBasis !== 'event' && (
         <span className="block text-xs text-ink-2">
           {timeBasis === 'study' ? 'time of the study' : 'time of receipt'}
@@ -42,13 +43,12 @@ const procedure: Column<ProcedureRow> = {
   head: 'Procedure',
   phone: 'title',
   className: 'md:min-w-52',
-  cell: ({ procedureType, studyDescription, caseNumber, procedureClass, patient }) => (
+  cell: ({ procedureType, studyDescription, procedureClass, patient }) => (
     <>
       {procedureType?.name ?? studyDescription ?? 'Type not recorded'}
-      <span className="block text-sm font-normal text-ink-2">
-        {caseNumber}
-        {procedureClass !== 'clinical' && ` · ${procedureClass.replace('-', ' ')}`}
-      </span>
+      {procedureClass !== 'clinical' && (
+        <span className="block text-sm font-normal text-ink-2">{procedureClass.replace('-', ' ')}</span>
+      )}
       {patient && <PatientLine patient={patient} />}
     </>
   ),
@@ -109,7 +109,7 @@ const figures: Column<ProcedureRow>[] = [
 const strip: Column<ProcedureRow> = {
   key: 'strip',
   head: 'Procedure strip',
-  unit: 'time along, rate up',
+  unit: 'time along, rate up, own scale',
   phone: 'wide',
   cell: (row) => <LedgerStrip strip={row.strip} />,
 };

@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/contract/procedure';
 import { Sentence } from '../../ui/sentence';
 import { SentenceSelect } from '../../ui/sentence-select';
@@ -19,6 +20,14 @@ type LedgerSentenceProps = {
   /** Empty: the reader sees own procedures only. */
   operators: readonly Choice[];
 };
+
+/** A comma or full stop never begins a line. */
+const WithMark = ({ mark, children }: { mark: string; children: ReactNode }) => (
+  <span className="inline-block max-w-full">
+    {children}
+    {mark}
+  </span>
+);
 
 /** "Procedures of any type in any room by any operator in the last 90 days, flagged or not, complete or not, newest first." */
 export const LedgerSentence = ({ filter, onChange, types, rooms, operators }: LedgerSentenceProps) => (
@@ -55,36 +64,40 @@ export const LedgerSentence = ({ filter, onChange, types, rooms, operators }: Le
       </>
     )}
     {' in '}
-    <SentenceSelect
-      label="period"
-      value={filter.period}
-      choices={periodChoices}
-      onChange={(period) => onChange({ period: period as ProcedureFilter['period'] })}
-    />
-    {', '}
-    <SentenceSelect
-      label="attention"
-      value={filter.attention}
-      choices={attentionChoices}
-      onChange={(attention) => onChange({ attention: attention as ProcedureFilter['attention'] })}
-    />
-    {', '}
-    <SentenceSelect
-      label="record"
-      value={filter.record}
-      choices={recordChoices}
-      onChange={(record) => onChange({ record: record as ProcedureFilter['record'] })}
-    />
-    {', '}
-    <SentenceSelect
-      label="order"
-      value={findOrder(filter)}
-      choices={orderChoices}
-      onChange={(value) => {
-        const chosen = orderChoices.find((choice) => choice.value === value);
-        if (chosen) onChange({ sort: chosen.sort, order: chosen.order });
-      }}
-    />
-    .
+    <WithMark mark=",">
+      <SentenceSelect
+        label="period"
+        value={filter.period}
+        choices={periodChoices}
+        onChange={(period) => onChange({ period: period as ProcedureFilter['period'] })}
+      />
+    </WithMark>{' '}
+    <WithMark mark=",">
+      <SentenceSelect
+        label="attention"
+        value={filter.attention}
+        choices={attentionChoices}
+        onChange={(attention) => onChange({ attention: attention as ProcedureFilter['attention'] })}
+      />
+    </WithMark>{' '}
+    <WithMark mark=",">
+      <SentenceSelect
+        label="record"
+        value={filter.record}
+        choices={recordChoices}
+        onChange={(record) => onChange({ record: record as ProcedureFilter['record'] })}
+      />
+    </WithMark>{' '}
+    <WithMark mark=".">
+      <SentenceSelect
+        label="order"
+        value={findOrder(filter)}
+        choices={orderChoices}
+        onChange={(value) => {
+          const chosen = orderChoices.find((choice) => choice.value === value);
+          if (chosen) onChange({ sort: chosen.sort, order: chosen.order });
+        }}
+      />
+    </WithMark>
   </Sentence>
 );

@@ -3,6 +3,7 @@ import { findShadeStep } from '../../charts/shade-step';
 import { StripChart } from '../../charts/strip-chart';
 import type { StripBlock } from '../../charts/strip.types';
 import { kvpShadeLimits } from '../../lib/kvp-shades';
+import { describePeak, describeSpan } from './strip-words';
 
 const toBlock = (bin: Strip['bins'][number]): StripBlock => ({
   from: bin.fromS,
@@ -13,23 +14,33 @@ const toBlock = (bin: Strip['bins'][number]): StripBlock => ({
   isPatterned: bin.part === 'acquisition',
 });
 
-function describe({ spanS, bins }: Strip): string {
+function describe(strip: Strip): string {
+  const { spanS, bins } = strip;
   const runs = bins.filter((bin) => bin.part === 'acquisition').length;
   const kvps = bins.flatMap(({ kvp }) => kvp ?? []);
   const range = kvps.length === 0 ? 'kVp not reported' : `${Math.min(...kvps)} to ${Math.max(...kvps)} kVp`;
-  return `Strip over ${Math.max(1, Math.round(spanS / 60))} min: ${bins.length - runs} fluoroscopy and ${runs} acquisition parts, ${range}`;
+  return `Strip over ${describeSpan(spanS)}: ${bins.length - runs} fluoroscopy and ${runs} acquisition parts, ${range}, ${describePeak(strip)}`;
 }
 
-/** A procedure in one picture, each at its own height: its shape, not its size, is compared. */
+/** A procedure in one picture, drawn to its own scale, which stands below it. */
 export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
   strip ? (
-    <StripChart
-      blocks={strip.bins.map(toBlock)}
-      span={strip.spanS}
-      peak={strip.peakRate}
-      width={170}
-      label={describe(strip)}
-    />
+    <>
+      <StripChart
+        blocks={strip.bins.map(toBlock)}
+        span={strip.spanS}
+        peak={strip.peakRate}
+        width={170}
+        label={describe(strip)}
+      />
+      <span
+        aria-hidden="true"
+        className="condensed flex justify-between gap-2 text-xs text-ink-2 md:w-[170px]"
+      >
+        <span>{describePeak(strip)}</span>
+        <span>{describeSpan(strip.spanS)}</span>
+      </span>
+    </>
   ) : (
     <span className="text-sm text-ink-2">no events with a rate</span>
   );

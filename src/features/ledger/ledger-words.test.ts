@@ -1,5 +1,13 @@
 import { expect, test } from 'vitest';
-import { describeCount, describeRecordState, findOrder } from './ledger-words';
+import { procedureSorts } from '../../../shared/contract/procedure';
+import {
+  describeIncomplete,
+  describeRecordState,
+  describeTotal,
+  findOrder,
+  listOperators,
+  orderChoices,
+} from './ledger-words';
 
 test('an incomplete record says what it needs', () => {
   expect(describeRecordState({ recordState: 'incomplete', missing: ['operator', 'person'] })).toBe(
@@ -8,12 +16,30 @@ test('an incomplete record says what it needs', () => {
   expect(describeRecordState({ recordState: 'complete', missing: [] })).toBe('complete');
 });
 
-test('the count speaks of one as of one', () => {
-  expect(describeCount({ total: 1, incomplete: 1 })).toBe('1 procedure. 1 lacks details.');
-  expect(describeCount({ total: 0, incomplete: 0 })).toBe('0 procedures.');
+test('the count speaks of one as of one and groups thousands', () => {
+  expect([0, 1, 7356].map(describeTotal)).toEqual([
+    '0 procedures.',
+    '1 procedure.',
+    '7\u202f356 procedures.',
+  ]);
+  expect([0, 1, 2].map(describeIncomplete)).toEqual([null, '1 needs details', '2 need details']);
 });
 
-test('an order that no choice stands for is still told', () => {
-  expect(findOrder({ sort: 'started', order: 'descending' })).toBe('newest');
-  expect(findOrder({ sort: 'kvp', order: 'ascending' })).toBe('as the column says');
+test('every order that a column head can ask for has words in the sentence', () => {
+  for (const sort of procedureSorts)
+    for (const order of ['ascending', 'descending'] as const)
+      expect(orderChoices.find(({ value }) => value === findOrder({ sort, order }))).toMatchObject({
+        sort,
+        order,
+      });
+});
+
+test('only those who perform procedures are offered as operators', () => {
+  const people = (['nurse', 'electrophysiologist', 'anaesthetist'] as const).map((job) => ({
+    id: job,
+    name: job,
+    job,
+    isActive: true,
+  }));
+  expect(listOperators(people).map(({ value }) => value)).toEqual(['electrophysiologist']);
 });

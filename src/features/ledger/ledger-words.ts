@@ -4,7 +4,9 @@ import {
   type ProcedureFilter,
   type ProcedureRow,
 } from '../../../shared/contract/procedure';
+import type { Job, PersonChoice } from '../../../shared/contract/person';
 import { missingPartNames } from '../../../shared/contract/record';
+import { formatInteger } from '../../../shared/units';
 import type { Choice } from '../../ui/select-field';
 
 export const kindChoices: Choice[] = [
@@ -33,25 +35,37 @@ export const recordChoices: Choice[] = [
   { value: 'complete', label: 'complete' },
 ];
 
-/** An order as one choice: what it sorts by and which way. */
-export const orderChoices: (Choice & Pick<ProcedureFilter, 'sort' | 'order'>)[] = [
-  { value: 'newest', label: 'newest first', sort: 'started', order: 'descending' },
-  { value: 'oldest', label: 'oldest first', sort: 'started', order: 'ascending' },
-  { value: 'kerma', label: 'highest air kerma first', sort: 'reference-air-kerma', order: 'descending' },
-  {
-    value: 'area-product',
-    label: 'highest area product first',
-    sort: 'kerma-area-product',
-    order: 'descending',
-  },
-  { value: 'time', label: 'longest fluoroscopy first', sort: 'fluoroscopy-time', order: 'descending' },
-  { value: 'kvp', label: 'highest kVp first', sort: 'kvp', order: 'descending' },
+type OrderChoice = Choice & Pick<ProcedureFilter, 'sort' | 'order'>;
+
+const bothWays = (sort: ProcedureFilter['sort'], highest: string, lowest: string): OrderChoice[] => [
+  { value: `${sort} descending`, label: highest, sort, order: 'descending' },
+  { value: `${sort} ascending`, label: lowest, sort, order: 'ascending' },
 ];
 
-/** The choice that stands for an order; one reached by a column's head has none of its own. */
+/** An order as one choice: what it sorts by and which way. */
+export const orderChoices: OrderChoice[] = [
+  ...bothWays('started', 'newest first', 'oldest first'),
+  ...bothWays('reference-air-kerma', 'highest air kerma first', 'lowest air kerma first'),
+  ...bothWays('kerma-area-product', 'highest area product first', 'lowest area product first'),
+  ...bothWays('fluoroscopy-time', 'longest fluoroscopy first', 'shortest fluoroscopy first'),
+  ...bothWays('kvp', 'highest kVp first', 'lowest kVp first'),
+];
+
+/** The choice that stands for an order. */
 export const findOrder = ({ sort, order }: Pick<ProcedureFilter, 'sort' | 'order'>): string =>
-  orderChoices.find((choice) => choice.sort === sort && choice.order === order)?.value ??
-  'as the column says';
+  `${sort} ${order}`;
+
+/** Who performs procedures, and can be asked for as operator. */
+const operatorJobs: readonly Job[] = [
+  'interventional-radiologist',
+  'interventional-cardiologist',
+  'electrophysiologist',
+  'neuro-interventionalist',
+  'other-physician',
+];
+
+export const listOperators = (people: readonly PersonChoice[]): Choice[] =>
+  people.filter(({ job }) => operatorJobs.includes(job)).map(({ id, name }) => ({ value: id, label: name }));
 
 /** "needs operator, staff in the room", or that nothing is outstanding. */
 export function describeRecordState({
@@ -64,11 +78,10 @@ export function describeRecordState({
     : `needs ${missing.map((part) => missingPartNames[part]).join(', ')}`;
 }
 
-const counted = (count: number, one: string, many: string) => `${count} ${count === 1 ? one : many}`;
+/** "7 356 procedures." */
+export const describeTotal = (total: number): string =>
+  `${formatInteger(total)} ${total === 1 ? 'procedure' : 'procedures'}.`;
 
-/** The line under the filter sentence. */
-export function describeCount({ total, incomplete }: { total: number; incomplete: number }): string {
-  const found = `${counted(total, 'procedure', 'procedures')}.`;
-  if (incomplete === 0) return found;
-  return `${found} ${counted(incomplete, 'lacks', 'lack')} details.`;
-}
+/** "17 need details"; null when nothing is outstanding. */
+export const describeIncomplete = (incomplete: number): string | null =>
+  incomplete === 0 ? null : `${formatInteger(incomplete)} ${incomplete === 1 ? 'needs' : 'need'} details`;

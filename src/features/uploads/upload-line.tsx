@@ -1,10 +1,12 @@
+import { memo } from 'react';
 import { paths } from '../../paths';
 import { ProgressBar } from '../../ui/progress-bar';
 import { TextLink } from '../../ui/text-link';
 import { outcomeNames } from './describe-uploads';
 import type { Upload } from './upload-store';
 
-const isTrouble = (item: Upload) =>
+/** Not sent, held or refused: somebody has to look. */
+export const isTrouble = (item: Upload) =>
   item.state === 'failed' || item.result?.outcome === 'held' || item.result?.outcome === 'refused';
 
 function Consequence({ item: { state, share, result, failure, file } }: { item: Upload }) {
@@ -12,17 +14,20 @@ function Consequence({ item: { state, share, result, failure, file } }: { item: 
     return <p className="text-sm text-ink-2">{failure} The file was not kept: send it again.</p>;
   if (state === 'waiting') return <p className="text-sm text-ink-2">waiting</p>;
   if (state === 'sending') return <ProgressBar share={share} label={`${file.name} under way`} />;
-  if (result?.reason) return <p className="text-sm text-ink-2">{result.reason.detail}</p>;
-  if (!result?.procedureId) return null;
   return (
-    <TextLink to={paths.procedure(result.procedureId)} className="text-sm">
-      {result.outcome === 'duplicate' ? 'Nothing changed. Open the procedure' : 'Open the procedure'}
-    </TextLink>
+    <>
+      {result?.reason && <p className="text-sm text-ink-2">{result.reason.detail}</p>}
+      {result?.procedureId && (
+        <TextLink to={paths.procedure(result.procedureId)} className="self-start text-sm">
+          Open the procedure
+        </TextLink>
+      )}
+    </>
   );
 }
 
-/** One file: its name, its outcome, and what follows from it. */
-export const UploadLine = ({ item }: { item: Upload }) => (
+/** One file: its name, its outcome, and what follows from it. Hundreds stand below each other: only what changes is drawn. */
+export const UploadLine = memo(({ item }: { item: Upload }) => (
   <li className="flex flex-col gap-1 border-b border-rule pb-2">
     <div className="flex items-baseline justify-between gap-3">
       <span className="min-w-0 truncate" title={item.file.name}>
@@ -38,4 +43,5 @@ export const UploadLine = ({ item }: { item: Upload }) => (
     </div>
     <Consequence item={item} />
   </li>
-);
+));
+UploadLine.displayName = 'UploadLine';

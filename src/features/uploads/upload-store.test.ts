@@ -59,3 +59,22 @@ test('clearing leaves what is under way', () => {
   store.clear();
   expect(store.read()).toHaveLength(5);
 });
+
+test('once forgotten, nothing waiting is sent and a late answer does not bring a file back', async () => {
+  const answers: (() => void)[] = [];
+  let sent = 0;
+  const store = createUploadStore(
+    (file) => {
+      sent += 1;
+      return new Promise((resolve) => answers.push(() => resolve(stored(file))));
+    },
+    () => undefined,
+  );
+  store.add(files(5));
+  store.forget();
+  for (const answer of answers) answer();
+  await new Promise((done) => setTimeout(done, 1));
+  expect(store.read()).toEqual([]);
+  expect(store.isBusy()).toBe(false);
+  expect(sent).toBe(3);
+});

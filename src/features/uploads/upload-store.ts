@@ -14,6 +14,8 @@ export type Upload = {
 
 const inFlight = 3;
 
+const isUnderWay = ({ state }: Upload) => state === 'waiting' || state === 'sending';
+
 type Send = (file: File, onProgress: (share: number) => void) => Promise<ReceivedFile>;
 
 /** One file a request, so that each has its outcome as soon as it is read. */
@@ -50,7 +52,7 @@ export function createUploadStore(send: Send, onSettled: () => void) {
       });
     }
     start();
-    if (!uploads.some(({ state }) => state === 'waiting' || state === 'sending')) onSettled();
+    if (!uploads.some(isUnderWay)) onSettled();
   }
 
   function start(): void {
@@ -84,9 +86,14 @@ export function createUploadStore(send: Send, onSettled: () => void) {
       publish(uploads.map((item) => (item.state === 'failed' ? { ...item, state: 'waiting' } : item)));
       start();
     },
+    isBusy: () => uploads.some(isUnderWay),
+    /** Whoever signs in next sees no names of files, and nothing is sent in another's name. */
+    forget() {
+      publish([]);
+    },
     /** Takes away what is done; what is under way stays. */
     clear() {
-      publish(uploads.filter(({ state }) => state === 'waiting' || state === 'sending'));
+      publish(uploads.filter(isUnderWay));
     },
   };
 }

@@ -9,3 +9,8 @@ export const uploads = createUploadStore(sendFile, () => {
 });
 
 export const useUploads = () => useSyncExternalStore(uploads.subscribe, uploads.read);
+
+// Files still on their way exist only here: closing the tab would lose them without a word.
+window.addEventListener('beforeunload', (event) => {
+  if (uploads.isBusy()) event.preventDefault();
+});
