@@ -11,9 +11,9 @@ export function ReportDeeds({ report }: { report: DoseReport }) {
   const isUnread = ['held', 'refused', 'received'].includes(report.outcome);
   if (!report.hasOriginal) return null;
   return (
-    <div className="flex flex-col items-start gap-1 text-sm">
+    <div className="flex flex-wrap items-center gap-x-4 gap-y-1 text-sm whitespace-nowrap md:flex-col md:items-start">
       <a className="link-line" href={`/api/dose-reports/${report.id}/original`} download>
-        Download the original
+        Download<span className="sr-only"> the original of {report.fileName}</span>
       </a>
       {isUnread && (
         <Button

@@ -1,4 +1,5 @@
 import type { DoseReport } from '../../../shared/contract/dose-report';
+import { formatInteger } from '../../../shared/units';
 import type { Choice } from '../../ui/select-field';
 
 export const outcomeWords: Record<DoseReport['outcome'], string> = {
@@ -18,11 +19,11 @@ export const outcomeChoices: Choice[] = [
   { value: 'received', label: 'that wait to be read' },
 ];
 
-/** "7 344 stored, 2 held, 1 refused." */
+/** "344 stored, 2 held, 1 refused." */
 export function describeCounts(counts: Record<string, number>): string {
   const parts = Object.entries(outcomeWords).flatMap(([outcome, name]) => {
     const count = counts[outcome] ?? 0;
-    return count === 0 ? [] : [`${count} ${name}`];
+    return count === 0 ? [] : [`${formatInteger(count)} ${name}`];
   });
   return parts.length === 0 ? 'No file has come yet.' : `${parts.join(', ')}.`;
 }

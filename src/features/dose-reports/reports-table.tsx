@@ -24,8 +24,9 @@ const listColumns = (timeZone: string, canHandle: boolean, isNamed: boolean): Co
     key: 'file',
     head: 'File',
     phone: 'title',
+    className: 'md:min-w-44',
     cell: (report) => (
-      <span className="break-all">
+      <span className="wrap-anywhere">
         {report.fileName ?? `File ${report.id.slice(-6)}`}
         {report.channel === 'generated' && (
           <span className="block text-sm font-normal text-ink-2">generated, no original</span>
@@ -120,7 +121,7 @@ export function ReportsTable({ filter, timeZone, canHandle }: ReportsTableProps)
           hasMore={hasNextPage}
           isBusy={isFetchingNextPage}
           onMore={() => void fetchNextPage()}
-          shownText={`${rows.length} shown`}
+          shownText={`${formatInteger(rows.length)} shown`}
         />
       )}
     </div>

@@ -17,7 +17,7 @@ export function describeUploads(uploads: readonly Upload[]): string {
   });
   const failed = done.filter(({ state }) => state === 'failed').length;
   if (failed > 0) parts.push(`${failed} not sent`);
-  const head =
-    done.length === uploads.length ? `${uploads.length} read` : `${done.length} of ${uploads.length} read`;
+  const readCount = done.length - failed;
+  const head = readCount === uploads.length ? `${readCount} read` : `${readCount} of ${uploads.length} read`;
   return parts.length === 0 ? `${head}.` : `${head}: ${parts.join(', ')}.`;
 }

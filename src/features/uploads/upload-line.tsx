@@ -11,7 +11,7 @@ export const isTrouble = (item: Upload) =>
 
 function Consequence({ item: { state, share, result, failure, file } }: { item: Upload }) {
   if (state === 'failed')
-    return <p className="text-sm text-ink-2">{failure} The file was not kept: send it again.</p>;
+    return <p className="text-sm text-ink-2">{failure} Send it again: nothing is stored twice.</p>;
   if (state === 'waiting') return <p className="text-sm text-ink-2">waiting</p>;
   if (state === 'sending') return <ProgressBar share={share} label={`${file.name} under way`} />;
   return (

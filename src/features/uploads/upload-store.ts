@@ -18,6 +18,9 @@ const isUnderWay = ({ state }: Upload) => state === 'waiting' || state === 'send
 
 type Send = (file: File, onProgress: (share: number) => void) => Promise<ReceivedFile>;
 
+/** Without an answer nobody knows whether the file arrived. */
+const describeFailure = ({ status, detail }: ApiProblem) => (status === 0 ? 'No answer came.' : detail);
+
 /** One file a request, so that each has its outcome as soon as it is read. */
 export const sendFile: Send = async (file, onProgress) => {
   const form = new FormData();
@@ -48,7 +51,7 @@ export function createUploadStore(send: Send, onSettled: () => void) {
     } catch (error) {
       change(item.key, {
         state: 'failed',
-        failure: error instanceof ApiProblem ? error.detail : String(error),
+        failure: error instanceof ApiProblem ? describeFailure(error) : String(error),
       });
     }
     start();
