@@ -1,3 +1,4 @@
+import { buildStripPaths } from './strip-paths';
 import { findShadeFill, type StripBlock } from './strip.types';
 
 type StripChartProps = {
@@ -14,15 +15,11 @@ type StripChartProps = {
 const height = 28;
 
 /**
- * The strip of a list row, 28 px high: along is time, up is rate (square-root scale, so that the long,
- * faint parts stay in sight), shade is a class, caps tell the second kind.
+ * The strip of a list row, 28 px high: along is time, up is rate (square-root scale), shade is a class,
+ * caps tell the second kind.
  */
 export function StripChart({ blocks, span, peak, label, width = 220 }: StripChartProps) {
-  const hasBelow = blocks.some((block) => block.side === 'below');
-  const base = hasBelow ? 16.5 : height - 1.5;
-  const room = { above: base - 2.5, below: height - base - 2.5 };
-  const placeX = (value: number) => (span > 0 ? (value / span) * width : 0);
-
+  const { base, shades, caps } = buildStripPaths(blocks, { width, height, span, peak });
   return (
     <svg
       role="img"
@@ -33,28 +30,15 @@ export function StripChart({ blocks, span, peak, label, width = 220 }: StripChar
       className="block max-md:w-full"
       preserveAspectRatio="none"
     >
-      {blocks.map((block, place) => {
-        const x = placeX(block.from);
-        const breadth = Math.max(1.4, placeX(block.to) - x);
-        const tall = Math.max(1, Math.sqrt(Math.min(1, block.height / (peak || 1))) * room[block.side]);
-        const y = block.side === 'above' ? base - tall : base;
-        const capY = block.side === 'above' ? y - 2 : y + tall;
-        return (
-          <g key={place}>
-            <rect
-              x={x}
-              y={y}
-              width={breadth}
-              height={tall}
-              className={`${findShadeFill(block.shade)} ${block.shade === null ? 'stroke-edge' : 'stroke-ramp-3'}`}
-              strokeWidth={block.shade === null || block.shade < 2 ? 0.5 : 0}
-            />
-            {block.isPatterned && (
-              <rect x={x - 0.3} y={capY} width={breadth + 0.6} height="2" className="fill-sounding" />
-            )}
-          </g>
-        );
-      })}
+      {shades.map(({ shade, path }) => (
+        <path
+          key={shade}
+          d={path}
+          className={`${findShadeFill(shade)} ${shade === null ? 'stroke-edge' : 'stroke-ramp-3'}`}
+          strokeWidth={shade === null || shade < 2 ? 0.5 : 0}
+        />
+      ))}
+      {caps && <path d={caps} className="fill-sounding" />}
       <path d={`M0 ${base}H${width}`} className="stroke-edge" strokeWidth="0.8" />
     </svg>
   );

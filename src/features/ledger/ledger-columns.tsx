@@ -13,6 +13,9 @@ import { QuantitySign } from '../../ui/quantity-sign';
 import { LedgerStrip } from './ledger-strip';
 import { describeRecordState } from './ledger-words';
 
+// An upright tablet has no room for them; they stand on the procedure's own page.
+const tooWideForTablets = 'md:max-lg:hidden';
+
 const started: Column<ProcedureRow> = {
   key: 'started',
   head: 'Started',
@@ -34,7 +37,8 @@ const started: Column<ProcedureRow> = {
 /** Who it was, for those whose answer names the patient. */
 const PatientLine = ({ patient }: Required<Pick<ProcedureRow, 'patient'>>) => (
   <span className="block text-sm font-normal text-ink-2">
-    {patient.name?.replaceAll('^', ' ').trim() || 'no name'} · {patient.id ?? 'no ID'}
+    {patient.name?.replaceAll('^', ' ').trim() || 'no name'} ·{' '}
+    <span className="whitespace-nowrap">{patient.id ?? 'no ID'}</span>
   </span>
 );
 
@@ -42,7 +46,7 @@ const procedure: Column<ProcedureRow> = {
   key: 'procedure',
   head: 'Procedure',
   phone: 'title',
-  className: 'md:min-w-52',
+  className: 'md:min-w-36 margin:min-w-52',
   cell: ({ procedureType, studyDescription, procedureClass, patient }) => (
     <>
       {procedureType?.name ?? studyDescription ?? 'Type not recorded'}
@@ -63,6 +67,7 @@ const figures: Column<ProcedureRow>[] = [
   {
     key: 'operator',
     head: 'Operator',
+    className: tooWideForTablets,
     cell: ({ primaryOperator }) => primaryOperator?.name ?? <span className="text-ink-2">–</span>,
   },
   {
@@ -99,6 +104,7 @@ const figures: Column<ProcedureRow>[] = [
   },
   {
     key: 'kvp',
+    className: tooWideForTablets,
     head: 'kVp',
     align: 'end',
     sortKey: 'kvp',
@@ -109,8 +115,9 @@ const figures: Column<ProcedureRow>[] = [
 const strip: Column<ProcedureRow> = {
   key: 'strip',
   head: 'Procedure strip',
-  unit: 'time along, rate up, own scale',
+  unit: 'time along, rate up',
   phone: 'wide',
+  className: tooWideForTablets,
   cell: (row) => <LedgerStrip strip={row.strip} />,
 };
 
@@ -123,7 +130,7 @@ const attention: Column<ProcedureRow> = {
 const record: Column<ProcedureRow> = {
   key: 'record',
   head: 'Record',
-  className: 'md:min-w-28',
+  className: 'lg:min-w-28',
   cell: (row) => (
     <span
       className={row.recordState === 'complete' ? 'text-sm text-ink-2' : 'text-sm font-semibold text-lee'}

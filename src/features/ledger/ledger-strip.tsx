@@ -25,22 +25,20 @@ function describe(strip: Strip): string {
 /** A procedure in one picture, drawn to its own scale, which stands below it. */
 export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
   strip ? (
-    <>
+    // Narrower where the page has no margin column yet.
+    <div className="md:w-[7.5rem] margin:w-[10.5rem] [&>svg]:w-full">
       <StripChart
         blocks={strip.bins.map(toBlock)}
         span={strip.spanS}
         peak={strip.peakRate}
-        width={170}
+        width={168}
         label={describe(strip)}
       />
-      <span
-        aria-hidden="true"
-        className="condensed flex justify-between gap-2 text-xs text-ink-2 md:w-[170px]"
-      >
+      <span aria-hidden="true" className="condensed flex justify-between gap-2 text-xs text-ink-2">
         <span>{describePeak(strip)}</span>
         <span>{describeSpan(strip.spanS)}</span>
       </span>
-    </>
+    </div>
   ) : (
     <span className="text-sm text-ink-2">no events with a rate</span>
   );
