@@ -46,7 +46,7 @@ function Received({ items }: { items: readonly Upload[] }) {
       {done < items.length && <ProgressBar share={done / items.length} label="All files" />}
       {troubles.length > 0 && troubles.length < items.length && (
         <Checkbox
-          label="Only what needs a look"
+          label="Only what was not stored"
           checked={isTroubleOnly}
           onChange={(event) => setTroubleOnly(event.target.checked)}
         />
