@@ -1,5 +1,6 @@
 import { randomBytes } from 'node:crypto';
 import { readdirSync, rmSync } from 'node:fs';
+import { availableParallelism, loadavg } from 'node:os';
 import { join } from 'node:path';
 import type { Bench, BenchContext, Measurement } from './bench/bench';
 import { copyTree } from './bench/copied-tree';
@@ -46,6 +47,7 @@ async function prepareContext(stopper: Stopper): Promise<BenchContext> {
     databaseUrl: cluster.url,
     clientFolder: join(folder, 'dist'),
     startTimes: { freshS: isFresh ? fresh.startS : null, warmS: warm.startS },
+    demoS: fresh.demoS,
     report,
   };
 }
@@ -78,11 +80,18 @@ function printTable(rows: Row[]): void {
   }
 }
 
+/** What else the machine did before we began: above its processors, the figures are somebody else's too. */
+const describeLoad = () =>
+  `Load beforehand: ${loadavg()[0]?.toFixed(1)} on ${availableParallelism()} processors`;
+
 await runCommand(async (stopper) => {
+  const load = describeLoad();
+  report(load);
   const context = await prepareContext(stopper);
   const rows: Row[] = [];
   for (const file of listModules()) rows.push(await runBench(file, context));
   await stopper.stop();
   printTable(rows);
+  console.log(load);
   process.exit();
 }, 130);

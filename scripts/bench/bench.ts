@@ -10,6 +10,8 @@ export interface BenchContext {
   clientFolder: string;
   /** Seconds from the command to a served page; `freshS` is null unless everything was installed anew. */
   startTimes: { freshS: number | null; warmS: number };
+  /** Seconds the first start took to write the demo hospital, as it says itself; null if it said nothing. */
+  demoS: number | null;
   /** Takes one line of progress. */
   report: (line: string) => void;
 }

@@ -7,10 +7,13 @@ export interface StartedLeeward {
   url: string;
   /** Seconds from the command to the first served page. */
   startS: number;
+  /** Seconds it said that writing the demo hospital took; null if it wrote none. */
+  demoS: number | null;
   stop(): Promise<void>;
 }
 
 const readyLine = /^Leeward is ready at (\S+)$/;
+const demoLine = /Demo hospital written in (\d+) s/;
 
 /** Runs `npm start` in a folder, as a person would, until it serves its page. */
 export async function startLeewardIn(
@@ -38,8 +41,11 @@ export async function startLeewardIn(
     await ended;
   };
   stopper.add(stop);
+  let demoS: number | null = null;
   const url = await new Promise<string>((resolve, reject) => {
     createInterface({ input: child.stdout }).on('line', (line) => {
+      const demo = demoLine.exec(line)?.[1];
+      if (demo) demoS = Number(demo);
       const ready = readyLine.exec(line)?.[1];
       if (ready) resolve(ready);
       else report(`  ${line}`);
@@ -49,5 +55,5 @@ export async function startLeewardIn(
   const response = await fetch(url);
   if (!response.ok) throw new Error(`The page answered ${response.status}.`);
   await response.text();
-  return { url, startS: (performance.now() - startedMs) / 1000, stop };
+  return { url, startS: (performance.now() - startedMs) / 1000, demoS, stop };
 }
