@@ -26,7 +26,7 @@ function describe(strip: Strip): string {
 export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
   strip ? (
     // Narrower where the page has no margin column yet.
-    <div className="md:w-[7.5rem] margin:w-[10.5rem] [&>svg]:w-full">
+    <div className="md:w-[8.5rem] margin:w-[10.5rem] [&>svg]:w-full">
       <StripChart
         blocks={strip.bins.map(toBlock)}
         span={strip.spanS}
@@ -34,7 +34,7 @@ export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
         width={168}
         label={describe(strip)}
       />
-      <span aria-hidden="true" className="condensed flex justify-between gap-2 text-xs text-ink-2">
+      <span aria-hidden="true" className="condensed flex justify-between gap-1 text-xs whitespace-nowrap text-ink-2">
         <span>{describePeak(strip)}</span>
         <span>{describeSpan(strip.spanS)}</span>
       </span>
