@@ -104,7 +104,7 @@ const figures: Column<ProcedureRow>[] = [
   },
   {
     key: 'kvp',
-    className: tooWideForTablets,
+    className: 'md:max-margin:hidden',
     head: 'kVp',
     align: 'end',
     sortKey: 'kvp',

@@ -34,7 +34,10 @@ export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
         width={168}
         label={describe(strip)}
       />
-      <span aria-hidden="true" className="condensed flex justify-between gap-1 text-xs whitespace-nowrap text-ink-2">
+      <span
+        aria-hidden="true"
+        className="condensed flex justify-between gap-1 text-xs whitespace-nowrap text-ink-2"
+      >
         <span>{describePeak(strip)}</span>
         <span>{describeSpan(strip.spanS)}</span>
       </span>
