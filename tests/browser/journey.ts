@@ -5,22 +5,13 @@ import { pino } from 'pino';
 import { chromium, type Browser, type BrowserContextOptions, type Page } from 'playwright-core';
 import type { DataSource } from 'typeorm';
 import { buildClient } from '../../scripts/build-client';
+import { chromiumFlags, chromiumPath } from '../../scripts/chromium';
 import { createApp } from '../../server/app';
 import { createDataSource } from '../../server/db/data-source';
 import { readEnvironment } from '../../server/env';
 import { systemClock } from '../../server/kernel/clock';
 import { testPassword } from '../factories';
 import { createTestDatabase } from '../test-db';
-
-const flags = [
-  '--no-sandbox',
-  '--disable-gpu',
-  '--disable-quic',
-  '--no-first-run',
-  '--disable-background-networking',
-  '--disable-component-update',
-  '--disable-sync',
-];
 
 /** The built page on a real server and database, in a real browser. */
 export type Journey = {
@@ -30,6 +21,8 @@ export type Journey = {
   open(email?: string, options?: BrowserContextOptions): Promise<Page>;
   /** Errors of the console and requests to other hosts, over all pages opened. */
   complaints: string[];
+  /** Closes every profile opened so far: what no test looks at any more need not be drawn. */
+  closePages(): Promise<void>;
   close(): Promise<void>;
 };
 
@@ -65,7 +58,7 @@ export async function startJourney(): Promise<Journey> {
   const server: Server = createServer(app);
   await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
   const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
-  const browser: Browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: flags });
+  const browser: Browser = await chromium.launch({ executablePath: chromiumPath, args: chromiumFlags });
   const complaints: string[] = [];
   return {
     url,
@@ -81,6 +74,9 @@ export async function startJourney(): Promise<Journey> {
       watch(page, url, complaints);
       if (email) await signInOnPage(page, email);
       return page;
+    },
+    async closePages() {
+      for (const context of browser.contexts()) await context.close();
     },
     async close() {
       await browser.close();
