@@ -7,14 +7,19 @@ export type ListedProcedure = Omit<ProcedureRow, 'patient'> & {
   sortKey: string | number;
 };
 
-/** What a sort orders by; a missing quantity comes last when the largest is first. */
-const sortColumns: Record<ProcedureFilter['sort'], { sql: string; type: string }> = {
-  started: { sql: 'procedure.started_at', type: 'timestamptz' },
-  'fluoroscopy-time': { sql: 'coalesce(procedure.fluoroscopy_time_s, -1)', type: 'float8' },
-  'reference-air-kerma': { sql: 'coalesce(procedure.reference_air_kerma_gy, -1)', type: 'float8' },
-  'kerma-area-product': { sql: 'coalesce(procedure.kerma_area_product_gy_cm2, -1)', type: 'float8' },
-  kvp: { sql: 'coalesce(procedure.kvp_mean, -1)', type: 'float8' },
+const sortColumns: Record<Exclude<ProcedureFilter['sort'], 'started'>, string> = {
+  'fluoroscopy-time': 'procedure.fluoroscopy_time_s',
+  'reference-air-kerma': 'procedure.reference_air_kerma_gy',
+  'kerma-area-product': 'procedure.kerma_area_product_gy_cm2',
+  kvp: 'procedure.kvp_mean',
 };
+
+/** What a list orders by; a missing quantity comes last, whichever end comes first. */
+function sortKeyOf({ sort, order }: Pick<ProcedureFilter, 'sort' | 'order'>): { sql: string; type: string } {
+  if (sort === 'started') return { sql: 'procedure.started_at', type: 'timestamptz' };
+  const last = order === 'descending' ? '-1' : `'Infinity'::float8`;
+  return { sql: `coalesce(${sortColumns[sort]}, ${last})`, type: 'float8' };
+}
 
 const kinds: Record<ProcedureFilter['kind'], string> = {
   fluoroscopy: `procedure.device_class = 'fluoroscopy' and procedure.procedure_class = 'clinical' and not procedure.is_withdrawn`,
@@ -100,7 +105,7 @@ export async function listProcedures(
   cursor: Cursor | null,
 ): Promise<ListedProcedure[]> {
   const { parts, values, bind } = conditions(filter, scope);
-  const { sql, type } = sortColumns[filter.sort];
+  const { sql, type } = sortKeyOf(filter);
   const [direction, comparison] = filter.order === 'descending' ? ['desc', '<'] : ['asc', '>'];
   if (cursor)
     parts.push(
