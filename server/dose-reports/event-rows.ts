@@ -1,7 +1,7 @@
 import type { Report } from '../../shared/contract/report';
 import type { ReportEvent } from '../../shared/contract/report-event';
 import { newId } from '../kernel/new-id';
-import { toInstant } from '../procedures/place-in-time';
+import { createInstantReader } from '../procedures/place-in-time';
 import type { NewEvent } from '../procedures/irradiation-event.store';
 
 /** Irradiation event UID and plane; an event without UID is known by its place in its report. */
@@ -20,6 +20,7 @@ export function toEventRows(
   timeZone: string,
   fallback: Date,
 ): NewEvent[] {
+  const readInstant = createInstantReader(timeZone);
   const rows = new Map<string, NewEvent>();
   report.events.forEach((event, index) => {
     const eventKey = keyOf(event, report.sopInstanceUid, index);
@@ -31,7 +32,7 @@ export function toEventRows(
       id: newId(),
       doseReportId,
       eventKey,
-      startedAt: (localStartedAt && toInstant(localStartedAt, timeZone)) || fallback,
+      startedAt: (localStartedAt && readInstant(localStartedAt)) || fallback,
       localStartedAt,
       irradiationEventUid,
       plane,

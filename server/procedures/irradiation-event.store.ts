@@ -54,7 +54,7 @@ export async function addEvents(db: EntityManager, procedureId: string, events: 
   await db.query(
     `insert into irradiation_event (procedure_id, ${targets})
      select $1, ${names.map((name) => `given."${name}"`).join(', ')}
-       from jsonb_to_recordset($2::jsonb) as given(${shape})
+       from json_to_recordset($2::json) as given(${shape})
      on conflict (procedure_id, event_key, started_at) do nothing`,
     [
       procedureId,

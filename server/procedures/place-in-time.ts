@@ -7,6 +7,23 @@ export function toInstant(local: string, timeZone: string): Date | null {
   return moment.isValid ? moment.toJSDate() : null;
 }
 
+/** The same for many texts: those of one wall-clock minute share its instant, and a zone's offset never changes within one. */
+export function createInstantReader(timeZone: string): (local: string) => Date | null {
+  const minutes = new Map<string, number | null>();
+  return (local) => {
+    const parts = /^(\d{4}-\d\d-\d\dT\d\d:\d\d):(\d\d(?:\.\d{1,6})?)$/.exec(local);
+    if (!parts) return toInstant(local, timeZone);
+    const [, minute = '', second = ''] = parts;
+    let startMs = minutes.get(minute);
+    if (startMs === undefined) {
+      startMs = toInstant(minute, timeZone)?.getTime() ?? null;
+      minutes.set(minute, startMs);
+    }
+    const seconds = Number(second);
+    return startMs === null || seconds >= 60 ? null : new Date(startMs + Math.trunc(seconds * 1000 + 1e-6));
+  };
+}
+
 export type PlacedInTime = {
   startedAt: Date;
   endedAt: Date | null;

@@ -24,11 +24,12 @@ async function walk(query: string): Promise<(number | null)[]> {
   const seen: (number | null)[] = [];
   let cursor: string | null = '';
   while (cursor !== null) {
-    const { body } = await technologist
-      .get(`/api/procedures?period=all&limit=2&${query}${cursor && `&cursor=${cursor}`}`)
-      .expect(200);
-    seen.push(...body.items.map((item: { kvpMean: number | null }) => item.kvpMean));
-    cursor = body.nextCursor;
+    const page: { body: { items: { kvpMean: number | null }[]; nextCursor: string | null } } =
+      await technologist
+        .get(`/api/procedures?period=all&limit=2&${query}${cursor && `&cursor=${cursor}`}`)
+        .expect(200);
+    seen.push(...page.body.items.map((item) => item.kvpMean));
+    cursor = page.body.nextCursor;
   }
   return seen;
 }
