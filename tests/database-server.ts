@@ -17,3 +17,16 @@ export async function runStatements(serverUrl: string, statements: string[]): Pr
     await client.end();
   }
 }
+
+/**
+ * Drops a database with whoever is still connected. A vacuum of the server's own may not be ended by this role:
+ * then the plain statement, which has the server end it.
+ */
+export async function dropDatabase(serverUrl: string, name: string): Promise<void> {
+  try {
+    await runStatements(serverUrl, [`DROP DATABASE IF EXISTS ${name} WITH (FORCE)`]);
+  } catch (error) {
+    if ((error as { code?: string }).code !== '42501') throw error;
+    await runStatements(serverUrl, [`DROP DATABASE IF EXISTS ${name}`]);
+  }
+}

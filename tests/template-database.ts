@@ -1,6 +1,6 @@
 import { startCluster } from '../scripts/database-cluster/start-cluster';
 import { createDataSource } from '../server/db/data-source';
-import { runStatements, withDatabase } from './database-server';
+import { dropDatabase, runStatements, withDatabase } from './database-server';
 
 /** Where test files make their databases, and the migrated database they copy. */
 export interface TemplateDatabase {
@@ -42,7 +42,6 @@ export async function makeTemplateDatabase(): Promise<TemplateDatabase & { remov
     await cluster?.stop();
     throw error;
   }
-  const dropTemplate = () =>
-    runStatements(serverUrl, [`DROP DATABASE IF EXISTS ${templateName} WITH (FORCE)`]);
+  const dropTemplate = () => dropDatabase(serverUrl, templateName);
   return { serverUrl, templateName, remove: () => (cluster ? cluster.stop() : dropTemplate()) };
 }

@@ -1,6 +1,6 @@
 import { randomBytes } from 'node:crypto';
 import { inject } from 'vitest';
-import { runStatements, withDatabase } from './database-server';
+import { dropDatabase, runStatements, withDatabase } from './database-server';
 
 export interface TestDatabase {
   url: string;
@@ -17,6 +17,6 @@ export async function createTestDatabase(): Promise<TestDatabase> {
   await runStatements(serverUrl, [`CREATE DATABASE ${name} TEMPLATE ${templateName}`]);
   return {
     url: withDatabase(serverUrl, name),
-    drop: () => runStatements(serverUrl, [`DROP DATABASE IF EXISTS ${name} WITH (FORCE)`]),
+    drop: () => dropDatabase(serverUrl, name),
   };
 }
