@@ -38,6 +38,8 @@ export const importDoseReport = (
     const events = toEventRows(report, arrival.id, hospital.timeZone, procedure.startedAt);
     await settle(tx, arrival.id, {
       outcome: 'stored',
+      reasonCode: null,
+      reasonDetail: null,
       sopInstanceUid,
       contentHash,
       contentAt: report.contentAt,

@@ -18,8 +18,10 @@ export async function settleArrival(
   try {
     return await store(db, arrival, read, now);
   } catch (error) {
-    await giveUp(db, arrival, 'held', reasonOf('reader-failure'));
-    throw error;
+    // One file's failure is told as its outcome: the files after it, or a start, must not stop for it.
+    const { name, code } = error as Error & { code?: string };
+    console.error(`Dose report ${arrival.id} is held: storing it failed with ${code ?? name}`);
+    return giveUp(db, arrival, 'held', reasonOf('reader-failure'));
   }
 }
 

@@ -111,3 +111,18 @@ test('a report left "received" by a crash is taken up at the next start', async 
   expect(['stored', 'duplicate']).toContain(row.outcome);
   expect(row.procedure_id).not.toBeNull();
 });
+
+test('a failure while storing holds that file, keeps it, and it can be read again', async () => {
+  await app.dataSource.query('alter table irradiation_event rename to irradiation_event_away');
+  const { body } = await send(technologist, '17-snomed-rt.dcm', '43-text.txt').expect(200);
+  await app.dataSource.query('alter table irradiation_event_away rename to irradiation_event');
+  expect(body.results.map((result: { outcome: string }) => result.outcome)).toEqual(['held', 'refused']);
+  expect(body.results[0].reason.code).toBe('reader-failure');
+  const again = await technologist
+    .post(`/api/dose-reports/${body.results[0].doseReportId}/read-again`)
+    .expect(200);
+  expect(again.body).toMatchObject({ outcome: 'stored', reason: null });
+  const { body: list } = await technologist.get('/api/dose-reports?outcome=stored').expect(200);
+  const stored = list.items.find((item: { id: string }) => item.id === body.results[0].doseReportId);
+  expect(stored.reasonCode).toBeNull();
+});
