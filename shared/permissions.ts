@@ -36,6 +36,11 @@ const grants = {
   'procedure.read-patient': { technologist: 'all', physicist: 'all', interventionalist: 'own' },
   'procedure.complete': { technologist: 'all', physicist: 'all' },
   'procedure.classify': { physicist: 'all' },
+  'procedure.regroup': { physicist: 'all' },
+  'procedure.enter-by-hand': { technologist: 'all', physicist: 'all' },
+  'data-check.settle': { physicist: 'all' },
+  'data-check.list': { physicist: 'all', administrator: 'all' },
+  'data-check.edit': { physicist: 'all' },
   'procedure.read-exposure': {
     technologist: 'by-job',
     physicist: 'all',
@@ -44,6 +49,7 @@ const grants = {
   },
   'dose-report.receive': { technologist: 'all', physicist: 'all' },
   'dose-report.list': { technologist: 'all', physicist: 'all', administrator: 'masked' },
+  'dose-report.decide': { physicist: 'all' },
   'dose-report.download': { technologist: 'all', physicist: 'all' },
   'staff-exposure.read': {
     technologist: 'own',

@@ -26,5 +26,6 @@ export function toEventRow(
     sourceToReferencePointMm: event.sourceToIsocenterMm - 150,
     filters,
     reported: {},
+    details: {},
   };
 }

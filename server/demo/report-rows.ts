@@ -17,10 +17,13 @@ const toReportPlane = (plane: DemoPlaneTotals, procedure: DemoProcedure): Report
   planeCode: null,
   sourceToReferencePointMm: procedure.equipment.sourceToIsocenterMm - 150,
   frameCount: null,
+  detectorType: null,
   referencePointDefinition: referencePoint,
   calibrations: [],
   devices: [],
   reported: {},
+  qualifiers: {},
+  furtherItems: [],
 });
 
 /** Minutes from the last irradiation to the report's arrival. */
@@ -48,6 +51,8 @@ export function toReportRows(
       ...refer,
       originalFileId: null,
       fileName: isManual ? 'entered by hand' : `${procedure.accessionNumber}-${part.number}.dcm`,
+      archiveName: null,
+      uploadKey: null,
       channel: 'generated',
       receivedById: null,
       receivedAt,
@@ -64,6 +69,9 @@ export function toReportRows(
       warnings: isManual
         ? [{ code: 'events-missing', detail: 'Typed from the machine’s screen: totals without exposures' }]
         : [],
+      readerVersion: null,
+      context: null,
+      purgedAt: null,
     };
   });
 }

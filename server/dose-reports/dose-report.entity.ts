@@ -5,6 +5,7 @@ import {
   documents,
   now,
   optionalCount,
+  optionalDocument,
   optionalMoment,
   optionalText,
   optionalUuid,
@@ -18,11 +19,16 @@ import { Person } from '../people/person.entity';
 import { Procedure } from '../procedures/procedure.entity';
 import { OriginalFile } from './original-file.entity';
 
+/** A report without patient, planes and events, which stand in tables and columns of their own. */
+export type ReportContext = Omit<Report, 'patient' | 'planes' | 'events'>;
+
 /** One file that came, from "received" to its outcome. */
 @Entity()
 @Index(['hospitalId', 'sopInstanceUid'], { unique: true, where: "outcome = 'stored'" })
 @Index(['hospitalId', 'receivedAt', 'id'])
 @Index(['procedureId'])
+@Index(['equipmentId'])
+@Index(['hospitalId', 'uploadKey'], { unique: true, where: 'upload_key is not null' })
 export class DoseReport {
   @PrimaryColumn(uuid) id: string;
   @ForeignKey(() => Hospital)
@@ -32,7 +38,11 @@ export class DoseReport {
   @Column(optionalUuid)
   originalFileId: string | null;
   @Column(text) fileName: string;
-  @Column(text) channel: 'page' | 'generated';
+  /** The folder path inside an archive, where it came in one, stands in `fileName`. */
+  @Column(optionalText) archiveName: string | null;
+  /** The sender's own key for this file: a repeated sending finds the first. */
+  @Column(optionalUuid) uploadKey: string | null;
+  @Column(text) channel: 'page' | 'generated' | 'manual';
   @ForeignKey(() => Person)
   @Column(optionalUuid)
   receivedById: string | null;
@@ -56,4 +66,9 @@ export class DoseReport {
   @Column(texts) eventKeys: string[];
   @Column(documents) reportedPlanes: Report['planes'];
   @Column(documents) warnings: Remark[];
+  @Column(optionalText) readerVersion: string | null;
+  /** What the report says beside patient, planes and events; may carry names. */
+  @Column(optionalDocument) context: ReportContext | null;
+  /** When the bytes of a refused file were deleted, its time of keeping being over. */
+  @Column(optionalMoment) purgedAt: Date | null;
 }

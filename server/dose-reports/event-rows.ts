@@ -13,6 +13,49 @@ const keyOf = (event: ReportEvent, sopInstanceUid: string | null, index: number)
 const withOffset = (local: string | null, offset: string | null) =>
   local === null ? null : offset && !/[zZ]|[+-]\d\d:?\d\d$/.test(local) ? `${local}${offset}` : local;
 
+/** Fields of an event that have a column; `kvpMean` and the like are among them. */
+const inColumns = new Set<string>([
+  'irradiationEventUid',
+  'plane',
+  'type',
+  'protocol',
+  'startedAt',
+  'utcOffset',
+  'kvpValues',
+  'kvpMean',
+  'tubeCurrentMa',
+  'pulseWidthMs',
+  'pulseCount',
+  'pulseRatePerS',
+  'exposureTimeS',
+  'irradiationDurationS',
+  'kermaAreaProductGyCm2',
+  'referenceAirKermaGy',
+  'primaryAngleDeg',
+  'secondaryAngleDeg',
+  'primaryEndAngleDeg',
+  'secondaryEndAngleDeg',
+  'sourceToDetectorMm',
+  'sourceToIsocenterMm',
+  'sourceToReferencePointMm',
+  'tableLongitudinalMm',
+  'tableLateralMm',
+  'tableHeightMm',
+  'fieldAreaCm2',
+  'filters',
+  'reported',
+]);
+
+/** Everything else that the event says; nulls and empty lists stay out. */
+function detailsOf(event: ReportEvent): Record<string, unknown> {
+  const details: Record<string, unknown> = {};
+  for (const [field, value] of Object.entries(event)) {
+    const isEmpty = value === null || (Array.isArray(value) && value.length === 0);
+    if (!isEmpty && !inColumns.has(field)) details[field] = value;
+  }
+  return details;
+}
+
 /** The events of a report as rows; the same UID and plane twice counts once. */
 export function toEventRows(
   report: Report,
@@ -66,6 +109,7 @@ export function toEventRows(
         maxThicknessMm,
       })),
       reported: event.reported,
+      details: detailsOf(event),
     });
   });
   return [...rows.values()];

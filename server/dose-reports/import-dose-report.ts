@@ -8,7 +8,8 @@ import { addEvents } from '../procedures/irradiation-event.store';
 import { findProcedure } from '../procedures/procedure.store';
 import { recomputeProcedure } from '../procedures/recompute-procedure';
 import { refreshEstimates } from '../staff-exposure/refresh-estimates';
-import type { DoseReport } from './dose-report.entity';
+import { readerVersion } from '../dicom/reader-version';
+import type { DoseReport, ReportContext } from './dose-report.entity';
 import { findStoredInstance, settle } from './dose-report.store';
 import { toEventRows } from './event-rows';
 import { matchProcedure } from './match-procedure';
@@ -17,6 +18,11 @@ export type ReadReport = { report: Report; warnings: ReportWarning[]; contentHas
 
 export type Imported =
   { outcome: 'stored' | 'duplicate'; procedureId: string | null } | { outcome: 'held'; code: ReasonCode };
+
+/** What a report says beside patient, planes and events. */
+function contextOf({ patient: _, planes: __, events: ___, ...context }: Report): ReportContext {
+  return context;
+}
 
 /** The second commit: report, procedure, events, totals, audit line, all or nothing. */
 export const importDoseReport = (
@@ -49,6 +55,8 @@ export const importDoseReport = (
       eventKeys: events.map((event) => event.eventKey),
       reportedPlanes: report.planes,
       warnings,
+      readerVersion,
+      context: contextOf(report),
     });
     await addEvents(tx, procedure.id, events);
     await recomputeProcedure(tx, hospital, procedure, report.startedAt ?? report.studyAt, now);

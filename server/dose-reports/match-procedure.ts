@@ -3,7 +3,7 @@ import type { Report } from '../../shared/contract/report';
 import type { Db } from '../db/db';
 import type { Equipment } from '../equipment/equipment.entity';
 import type { Hospital } from '../hospital/hospital.entity';
-import { addPatientIdentity, patientKeyOf } from '../procedures/patient-identity.store';
+import { accessionKeyOf, addPatientIdentity, patientKeyOf } from '../procedures/patient-identity.store';
 import { toInstant } from '../procedures/place-in-time';
 import {
   addProcedure,
@@ -40,6 +40,7 @@ export async function matchProcedure(
     caseNumber: await nextCaseNumber(tx, day.year),
     studyInstanceUid,
     patientKey,
+    accessionKey: accessionKeyOf(patientKey, accessionNumber),
     patientIdentityId: await addPatientIdentity(tx, hospital.id, { ...patient, accessionNumber }),
     roomId: equipment.roomId,
     equipmentId: equipment.id,

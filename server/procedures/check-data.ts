@@ -1,9 +1,7 @@
-import type { z } from 'zod';
-import type { dataCheckSchema, PlaneTotals } from '../../shared/contract/procedure';
+import type { DataCheck } from '../../shared/contract/data-check';
+import type { PlaneTotals } from '../../shared/contract/procedure';
 import type { SummaryInput } from './summary-input';
 import type { Together } from './total-together';
-
-export type DataCheck = z.infer<typeof dataCheckSchema>;
 
 type Facts = { input: SummaryInput; planes: PlaneTotals[]; together: Together };
 type Verdict = Omit<DataCheck, 'code'>;

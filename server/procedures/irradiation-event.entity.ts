@@ -16,6 +16,7 @@ import { Procedure } from './procedure.entity';
 /** One irradiation event of one plane. The key holds the start time so that the table can be cut by time. */
 @Entity()
 @Index(['procedureId', 'eventKey', 'startedAt'], { unique: true })
+@Index(['irradiationEventUid'])
 export class IrradiationEvent {
   @PrimaryColumn(uuid) id: string;
   /** The device's start by the hospital's zone; the procedure's where the event has none. */
@@ -57,4 +58,6 @@ export class IrradiationEvent {
   @Column(documents) filters: EventContract['filters'];
   /** The decimal strings and units of the file, to the letter. */
   @Column({ type: 'jsonb', default: () => "'{}'" }) reported: EventContract['reported'];
+  /** Everything else that the report says of the event; what it does not say is absent. */
+  @Column({ type: 'jsonb', default: () => "'{}'" }) details: EventContract['details'];
 }

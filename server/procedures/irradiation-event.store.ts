@@ -37,6 +37,7 @@ const columns = {
   fieldAreaCm2: 'double precision',
   filters: 'jsonb',
   reported: 'jsonb',
+  details: 'jsonb',
 } as const satisfies Record<keyof NewEvent, string>;
 
 const names = Object.keys(columns) as (keyof typeof columns)[];
@@ -69,10 +70,13 @@ const inTime = { startedAt: 'ASC', plane: 'ASC', id: 'ASC' } as const;
 export const listEvents = (db: EntityManager, procedureId: string): Promise<IrradiationEvent[]> =>
   db.find(IrradiationEvent, { where: { procedureId }, order: inTime });
 
-export type EventFigures = Omit<IrradiationEvent, 'reported'>;
+export type EventFigures = Omit<IrradiationEvent, 'reported' | 'details'>;
 
 const figures = Object.fromEntries(
-  ['procedureId', ...names.filter((name) => name !== 'reported')].map((name) => [name, true]),
+  ['procedureId', ...names.filter((name) => name !== 'reported' && name !== 'details')].map((name) => [
+    name,
+    true,
+  ]),
 ) as FindOptionsSelect<IrradiationEvent>;
 
 /** The events without the file's own strings, which are most of a row: for whoever computes. */

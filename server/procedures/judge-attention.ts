@@ -1,5 +1,5 @@
+import type { DataCheck } from '../../shared/contract/data-check';
 import type { AttentionLevel } from '../../shared/contract/procedure';
-import type { DataCheck } from './check-data';
 import type { SummaryInput } from './summary-input';
 import type { Together } from './total-together';
 

@@ -11,6 +11,12 @@ export const patientKeyOf = (hospitalId: string, patientId: string | null): stri
     .digest('hex')
     .slice(0, 32);
 
+/** Stands for one order of one patient; null without an accession number. */
+export const accessionKeyOf = (patientKey: string, accessionNumber: string | null): string | null =>
+  accessionNumber === null
+    ? null
+    : createHash('sha256').update(`${patientKey}|${accessionNumber}`).digest('hex').slice(0, 32);
+
 export async function addPatientIdentity(
   db: EntityManager,
   hospitalId: string,

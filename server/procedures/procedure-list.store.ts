@@ -91,11 +91,14 @@ const rowColumns = `
             case when procedure.attention_level is not null then
               json_build_object('level', procedure.attention_level, 'reasons', procedure.attention_reasons) end as attention,
             procedure.record_state as "recordState", procedure.missing, procedure.is_withdrawn as "isWithdrawn",
+            case when heir.id is not null then json_build_object('id', heir.id, 'caseNumber', heir.case_number) end as "mergedInto",
+            procedure.is_manual as "isManual", procedure.is_quarantined as "isInDoubt",
             not procedure.is_generated as "hasOriginal", procedure.patient_identity_id as "patientIdentityId"`;
 
 const rowJoins = `       left join procedure_type kind on kind.id = procedure.procedure_type_id
        left join room on room.id = procedure.room_id
-       left join person operator on operator.id = procedure.primary_operator_id`;
+       left join person operator on operator.id = procedure.primary_operator_id
+       left join procedure heir on heir.id = procedure.merged_into_id`;
 
 /** One page of the ledger by keyset; one row more than asked for tells whether there is a next page. */
 export async function listProcedures(

@@ -41,6 +41,8 @@ import { PatientIdentity } from './patient-identity.entity';
 @Index(['hospitalId', 'caseNumber'], { unique: true })
 @Index(['procedureTypeId', 'startedAt'])
 @Index(['primaryOperatorId', 'startedAt'])
+@Index(['hospitalId', 'accessionKey'])
+@Index(['equipmentId', 'startedAt'])
 // Partial, with further columns, which a decorator cannot say: made by its migration.
 @Index('ix_procedure_exposure', { synchronize: false })
 export class Procedure {
@@ -52,6 +54,8 @@ export class Procedure {
   @Column(text) studyInstanceUid: string;
   /** Hash of the patient ID: the same study UID of another patient is another procedure. */
   @Column(text) patientKey: string;
+  /** Hash of accession number and patient ID: a case that a restart split in two studies. */
+  @Column(optionalText) accessionKey: string | null;
   @ForeignKey(() => PatientIdentity)
   @Column(optionalUuid)
   patientIdentityId: string | null;
@@ -121,6 +125,12 @@ export class Procedure {
   @Column(count) recordRevision: number;
   @Column(count) estimateRevision: number;
   @Column(yesNo) isWithdrawn: boolean;
+  /** The procedure that took over all of its reports; it is withdrawn then. */
+  @ForeignKey(() => Procedure)
+  @Column(optionalUuid)
+  mergedIntoId: string | null;
+  /** Its totals were typed from the machine's screen: no report came. */
+  @Column(yesNo) isManual: boolean;
   /** Made by the demo's generator: no original file exists. */
   @Column(yesNo) isGenerated: boolean;
   @Column(version) version: number;

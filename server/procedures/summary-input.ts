@@ -10,7 +10,7 @@ export type SummaryReport = Pick<
   'id' | 'equipmentId' | 'receivedAt' | 'contentAt' | 'eventKeys' | 'reportedPlanes' | 'warnings'
 >;
 
-export type SummaryEvent = Omit<IrradiationEvent, 'procedureId' | 'reported' | 'filters'>;
+export type SummaryEvent = Omit<IrradiationEvent, 'procedureId' | 'reported' | 'details' | 'filters'>;
 
 export type SummaryFactor = Pick<
   CalibrationFactor,

@@ -21,7 +21,7 @@ export const doseReportSchema = z.object({
   id: idSchema,
   receivedAt: z.string(),
   receivedBy: z.string().nullable(),
-  channel: z.enum(['page', 'generated']),
+  channel: z.enum(['page', 'generated', 'manual']),
   outcome: z.enum([...outcomes, 'received']),
   reasonCode: z.string().nullable(),
   byteCount: z.int().nullable(),

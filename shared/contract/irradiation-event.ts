@@ -40,6 +40,8 @@ export const irradiationEventSchema = z.object({
   fieldAreaCm2: measured,
   filters: z.array(filterSchema),
   reported: z.record(z.string(), z.object({ text: z.array(z.string()), unit: z.string().nullable() })),
+  /** What else the report says of the event, by the names of the report's contract; absent where it says nothing. */
+  details: z.record(z.string(), z.unknown()),
 });
 export type IrradiationEvent = z.infer<typeof irradiationEventSchema>;
 

@@ -1,5 +1,6 @@
 import { z } from 'zod';
-import { idSchema, localDateTimeSchema, namedSchema, remarkSchema } from './common';
+import { idSchema, localDateTimeSchema, namedSchema } from './common';
+import { dataCheckSchema } from './data-check';
 import { missingParts, recordSchema } from './record';
 
 const measured = z.number().nullable();
@@ -64,6 +65,12 @@ export const procedureRowSchema = z.object({
   recordState: z.enum(['incomplete', 'complete']),
   missing: z.array(z.enum(missingParts)),
   isWithdrawn: z.boolean(),
+  /** Where a withdrawn procedure's reports went. */
+  mergedInto: z.object({ id: idSchema, caseNumber: z.string() }).nullable(),
+  /** Typed from the machine's screen: no report came. */
+  isManual: z.boolean(),
+  /** A value failed a hard check and nobody settled it: outside every statistic. */
+  isInDoubt: z.boolean(),
   hasOriginal: z.boolean(),
   patient: patientSchema.optional(),
 });
@@ -146,10 +153,6 @@ export const comparisonSchema = z.object({
   notifyLevel: measured,
 });
 export type Comparison = z.infer<typeof comparisonSchema>;
-
-export const dataCheckSchema = remarkSchema.extend({
-  result: z.enum(['passed', 'noted', 'failed', 'not-checked']),
-});
 
 export const procedureSchema = procedureRowSchema.omit({ patient: true, strip: true }).extend({
   endedAt: localDateTimeSchema.nullable(),

@@ -32,6 +32,7 @@ const event = (over: Partial<IrradiationEvent>): IrradiationEvent => ({
   fieldAreaCm2: null,
   filters: [],
   reported: {},
+  details: {},
   ...over,
 });
 
