@@ -73,6 +73,13 @@ export const observerValues: ValueTable<'person' | 'device'> = {
   device: ['DCM', '121007', 'Device'],
 };
 
+/** CID 230. */
+export const availabilityValues: ValueTable<'yes' | 'no' | 'undetermined'> = {
+  yes: ['SCT', '373066001', 'Yes', 'R-0038D'],
+  no: ['SCT', '373067005', 'No', 'R-00339'],
+  undetermined: ['SCT', '373068000', 'Undetermined', 'R-0038A'],
+};
+
 /** CID 3629, CID 7445 and CID 10020: the single values that change what the reader does. */
 export const singleValues: ValueTable<'qualityControl' | 'irradiatingDevice' | 'ppsContent'> = {
   qualityControl: ['DCM', '113680', 'Quality Control Intent'],

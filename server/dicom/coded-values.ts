@@ -10,4 +10,5 @@ export const materialOf = createValueLookup(tables.materialValues);
 export const procedureOf = createValueLookup(tables.procedureValues);
 export const deviceTypeOf = createValueLookup(tables.deviceTypeValues);
 export const observerTypeOf = createValueLookup(tables.observerValues);
+export const availabilityOf = createValueLookup(tables.availabilityValues);
 export const singleValueOf = createValueLookup(tables.singleValues);

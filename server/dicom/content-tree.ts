@@ -1,4 +1,4 @@
-import type { Code } from '../../shared/contract/report-parts';
+import type { Code, ImageReference } from '../../shared/contract/report-parts';
 import { createTextReader, type CharacterSetNotice, type TextReader } from './character-set';
 import { conceptNameOf } from './concepts';
 import type { ConceptName } from './concepts.table-data';
@@ -20,6 +20,7 @@ export interface ContentItem {
   code: Code | null;
   text: string | null;
   measurement: Measurement | null;
+  image: ImageReference | null;
   children: ContentItem[];
 }
 
@@ -66,6 +67,7 @@ export class ContentTreeReader {
       code: valueType === 'CODE' ? this.codeOf(firstItemOf(dataSet, 'x0040a168'), text) : null,
       text: textTag === undefined ? null : readText(dataSet, textTag, text),
       measurement: valueType === 'NUM' ? this.readMeasurement(dataSet, text) : null,
+      image: valueType === 'IMAGE' ? readImageReference(firstItemOf(dataSet, 'x00081199')) : null,
       children: children.length === 0 ? none : children.map((child) => this.readItem(child, text)),
     };
   }
@@ -99,6 +101,17 @@ export class ContentTreeReader {
       qualifier: this.codeOf(firstItemOf(dataSet, 'x0040a301'), reader),
     };
   }
+}
+
+/** A Referenced SOP Sequence item of an IMAGE (PS3.3 C.17.3). */
+function readImageReference(item: DicomDataSet | undefined): ImageReference | null {
+  if (!item) return null;
+  const frames = asciiOf(item, 'x00081160')?.split('\\') ?? [];
+  return {
+    sopClassUid: asciiOf(item, 'x00081150'),
+    sopInstanceUid: asciiOf(item, 'x00081155'),
+    frameNumbers: frames.map(Number).filter((frame) => Number.isInteger(frame) && frame > 0),
+  };
 }
 
 /** Text of an attribute in the character set of its data set; null if absent or blank. */

@@ -2,12 +2,15 @@ import type { ReportPlane } from '../../shared/contract/report';
 import { planeOf } from './coded-values';
 import type { ContentItem } from './content-tree';
 import { parseDateTime } from './date-time';
+import { fieldsByConcept, readFurther } from './further-items';
 import { ItemIndex } from './item-index';
 import { readDevices } from './participants';
 import { planeQuantities } from './quantity-fields.table-data';
 import { readQuantityFields } from './read-quantity-fields';
 import { readQuantity, type Reported } from './read-quantity';
 import type { WarningCollector } from './warning-collector';
+
+const fields = fieldsByConcept(planeQuantities);
 
 const expected = ['plane', 'kermaAreaProductGyCm2', 'referenceAirKermaGy'] as const;
 const expectedOfFluoroscopy = [
@@ -21,13 +24,18 @@ const expectedOfFluoroscopy = [
 
 function parseCalibration(
   item: ContentItem,
+  defaultOffset: string | null,
   warnings: WarningCollector,
 ): ReportPlane['calibrations'][number] {
   const index = new ItemIndex(item);
   const reported: Reported = {};
   const at = index.text('calibrationDateTime');
+  const calibratedAt = at === null ? null : (parseDateTime(at, defaultOffset)?.text ?? null);
+  if (at !== null && calibratedAt === null)
+    warnings.add('date-time-unreadable', `calibratedAt ${JSON.stringify(at.slice(0, 40))}`);
   return {
-    calibratedAt: at === null ? null : (parseDateTime(at, null)?.text ?? null),
+    measurementDevice: index.code('doseMeasurementDevice'),
+    calibratedAt,
     factor: readQuantity(index.all('calibrationFactor'), 'factor', 'count', reported, warnings),
     uncertaintyPercent: readQuantity(
       index.all('calibrationUncertainty'),
@@ -43,7 +51,11 @@ function parseCalibration(
 }
 
 /** What the file reports as accumulated in one plane (TID 10002 with 10004, 10006 or 10007), in canonical units. */
-export function parseAccumulated(item: ContentItem, warnings: WarningCollector): ReportPlane {
+export function parseAccumulated(
+  item: ContentItem,
+  defaultOffset: string | null,
+  warnings: WarningCollector,
+): ReportPlane {
   const index = new ItemIndex(item);
   const reported: Reported = {};
   const planeCode = index.code('acquisitionPlane');
@@ -53,10 +65,14 @@ export function parseAccumulated(item: ContentItem, warnings: WarningCollector):
     plane,
     planeCode,
     ...readQuantityFields(index, planeQuantities, reported, warnings),
+    detectorType: index.code('detectorType'),
     referencePointDefinition: index.referencePoint(),
-    calibrations: (index.all('calibration') ?? []).map((one) => parseCalibration(one, warnings)),
+    calibrations: (index.all('calibration') ?? []).map((one) =>
+      parseCalibration(one, defaultOffset, warnings),
+    ),
     devices: readDevices(index.all('deviceRole')),
     reported,
+    ...readFurther(item, fields),
   };
 }
 

@@ -1,12 +1,15 @@
 import type { Report, ReportWarning } from '../../shared/contract/report';
-import { procedureOf, singleValueOf } from './coded-values';
+import { availabilityOf, procedureOf, singleValueOf } from './coded-values';
 import type { ContentItem } from './content-tree';
+import type { ConceptName } from './concepts.table-data';
 import { classifyDevice } from './device-class';
+import { readFurther } from './further-items';
 import { findContainers, ItemIndex } from './item-index';
 import { parseAccumulated, warnOfMissingTotals } from './parse-accumulated';
 import type { Header } from './parse-header';
 import { parseIrradiationEvent } from './parse-irradiation-event';
 import { readObservers, readPersons } from './participants';
+import { readImages } from './read-images';
 import type { WarningCollector } from './warning-collector';
 
 function parseEvents(
@@ -59,6 +62,23 @@ function completeEquipment(
   };
 }
 
+const noFields = new Map<ConceptName, string>();
+
+/** What the machine says it could state at all (TID 10001, CID 230). */
+function readAvailabilities(index: ItemIndex, warnings: WarningCollector) {
+  const read = (name: 'detectorDataAvailable' | 'sourceDataAvailable' | 'mechanicalDataAvailable') => {
+    const code = index.code(name);
+    const value = availabilityOf(code);
+    if (code && !value) warnings.add('code-unknown', `${name} ${JSON.stringify(code.meaning)}`);
+    return value;
+  };
+  return {
+    detectorDataAvailable: read('detectorDataAvailable'),
+    sourceDataAvailable: read('sourceDataAvailable'),
+    mechanicalDataAvailable: read('mechanicalDataAvailable'),
+  };
+}
+
 function parseScope(index: ItemIndex): Report['scopeOfAccumulation'] {
   const item = index.all('scopeOfAccumulation')?.[0];
   if (!item) return null;
@@ -95,7 +115,9 @@ export function parseDoseReport(
   warnings: WarningCollector,
 ): { report: Report; warnings: ReportWarning[] } {
   const index = new ItemIndex(root);
-  const planes = findContainers(root, 'accumulated').map((item) => parseAccumulated(item, warnings));
+  const planes = findContainers(root, 'accumulated').map((item) =>
+    parseAccumulated(item, header.utcOffset, warnings),
+  );
   const events = parseEvents(root, header.utcOffset, warnings);
   const start = findStart(events) ?? {
     startedAt: header.studyAt,
@@ -115,7 +137,8 @@ export function parseDoseReport(
     isQualityControl: singleValueOf(intent) === 'qualityControl',
     acquisitionDeviceType,
     deviceClass: classifyDevice({ acquisitionDeviceType, planes, events }),
-    detectorType: planeDetectorType(root),
+    detectorType: planes.find((plane) => plane.detectorType !== null)?.detectorType ?? null,
+    ...readAvailabilities(index, warnings),
     scopeOfAccumulation: parseScope(index),
     sourcesOfInformation: (index.all('sourceOfDoseInformation') ?? []).flatMap(({ code }) =>
       code ? [code] : [],
@@ -123,13 +146,12 @@ export function parseDoseReport(
     observers: readObservers(root),
     persons: readPersons(index.all('personName')),
     comment: index.text('comment'),
+    language: index.code('language'),
+    country: index.below('language')?.code('country') ?? index.code('country'),
+    doseImages: readImages(index.all('doseImage')),
+    furtherItems: readFurther(root, noFields).furtherItems,
   };
   for (const plane of planes) warnOfMissingTotals(plane, report.deviceClass === 'radiography', warnings);
   warnOfGaps(report, warnings);
   return { report, warnings: warnings.list() };
-}
-
-function planeDetectorType(root: ContentItem): Report['detectorType'] {
-  const accumulated = findContainers(root, 'accumulated').map((item) => new ItemIndex(item));
-  return accumulated.map((one) => one.code('detectorType')).find((code) => code !== null) ?? null;
 }

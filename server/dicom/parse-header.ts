@@ -3,6 +3,7 @@ import { createTextReader } from './character-set';
 import { readText } from './content-tree';
 import { formatUtcOffset, joinDateAndTime, parseDate } from './date-time';
 import { parseDecimal } from './decimal';
+import { readHeaderCodes, readRequests } from './read-requests';
 import { asciiOf, firstItemOf, itemsOf, type DicomDataSet } from './read-dicom';
 import type { Reported } from './read-quantity';
 import type { WarningCollector } from './warning-collector';
@@ -20,6 +21,10 @@ export type Header = Pick<
   | 'contentAt'
   | 'instanceNumber'
   | 'completionFlag'
+  | 'verificationFlag'
+  | 'templateId'
+  | 'requests'
+  | 'procedureCodes'
   | 'predecessors'
   | 'patient'
   | 'equipment'
@@ -78,6 +83,13 @@ export function parseHeader(dataSet: DicomDataSet, warnings: WarningCollector): 
     contentAt: dateTime('x00080023', 'x00080033', 'contentAt'),
     instanceNumber: ascii('x00200013'),
     completionFlag: ascii('x0040a491'),
+    verificationFlag: ascii('x0040a493'),
+    templateId: readTemplateId(dataSet),
+    requests: readRequests(dataSet, reader),
+    procedureCodes: [
+      ...readHeaderCodes(dataSet, 'x00081032', reader),
+      ...readHeaderCodes(dataSet, 'x0040a372', reader),
+    ],
     predecessors: readPredecessors(dataSet),
     patient: {
       name: text('x00100010'),
@@ -96,6 +108,9 @@ export function parseHeader(dataSet: DicomDataSet, warnings: WarningCollector): 
       serialNumber: text('x00181000'),
       stationName: text('x00081010'),
       institutionName: text('x00080080'),
+      softwareVersions: text('x00181020'),
+      deviceUid: ascii('x00181002'),
+      departmentName: text('x00081040'),
     },
     utcOffset,
   };

@@ -1,15 +1,31 @@
-import type { ReportEvent } from '../../shared/contract/report-event';
+import type { ContrastAgent, ReportEvent } from '../../shared/contract/report-event';
 import { eventTypeOf, fluoroModeOf, planeOf } from './coded-values';
 import type { ContentItem } from './content-tree';
 import { parseDateTime } from './date-time';
+import { fieldsByConcept, readFurther } from './further-items';
 import { ItemIndex } from './item-index';
 import { parseFilter } from './parse-filter';
 import { readDevices, readPersons } from './participants';
 import { eventQuantities, eventQuantityLists } from './quantity-fields.table-data';
+import { readImages } from './read-images';
 import { readQuantityFields, readQuantityLists } from './read-quantity-fields';
 import { meanOf, type Reported } from './read-quantity';
 import type { WarningCollector } from './warning-collector';
 import { warnOfMissingEventValues } from './missing-event-values';
+
+const fields = fieldsByConcept(eventQuantities, eventQuantityLists);
+
+/** Every code of a concept that may repeat. */
+const codesOf = (items: ContentItem[] | undefined) =>
+  (items ?? []).flatMap(({ code }) => (code === null ? [] : [code]));
+
+/** Contrast agents by code or by name: which concept carries them differs between makers (from memory). */
+function readContrastAgents(index: ItemIndex): ContrastAgent[] {
+  const names = ['contrastAgent', 'contrastAdministered', 'drugAdministered'] as const;
+  return names
+    .flatMap((name) => index.all(name) ?? [])
+    .flatMap(({ code, text }) => (code === null && text === null ? [] : [{ code, text }]));
+}
 
 function readStart(index: ItemIndex, defaultOffset: string | null, warnings: WarningCollector) {
   const text = index.text('startedAt');
@@ -26,17 +42,27 @@ function readCodes(index: ItemIndex, warnings: WarningCollector) {
   const typeCode = index.code('eventType');
   const type = eventTypeOf(typeCode);
   if (planeCode && !plane) warnings.add('plane-unknown', JSON.stringify(planeCode.meaning));
+  const fluoroModeCode = index.code('fluoroMode');
+  const fluoroMode = fluoroModeOf(fluoroModeCode);
+  if (fluoroModeCode && !fluoroMode)
+    warnings.add('code-unknown', `fluoro mode ${JSON.stringify(fluoroModeCode.meaning)}`);
   if (typeCode && !type) warnings.add('event-type-unknown', JSON.stringify(typeCode.meaning));
   return {
     plane,
     planeCode,
     type,
     typeCode,
-    fluoroMode: fluoroModeOf(index.code('fluoroMode')),
+    fluoroMode,
+    fluoroModeCode,
+    pulseCountDerivation: index.below('pulseCount')?.code('derivation') ?? null,
+    labelType: index.below('eventLabel')?.code('labelType') ?? null,
     anatomy: index.code('anatomy'),
     laterality: index.below('anatomy')?.code('laterality') ?? index.code('laterality'),
     targetRegion: index.code('targetRegion'),
     imageView: index.code('imageView'),
+    imageViewModifiers: codesOf(
+      index.below('imageView')?.all('imageViewModifier') ?? index.all('imageViewModifier'),
+    ),
     projectionName: index.code('projectionName'),
     patientTableRelationship: index.code('patientTableRelationship'),
     patientOrientation: index.code('patientOrientation'),
@@ -45,7 +71,7 @@ function readCodes(index: ItemIndex, warnings: WarningCollector) {
       index.code('patientOrientationModifier'),
     anodeMaterial: index.code('anodeTargetMaterial'),
     mechanicalConfiguration: index.code('mechanicalConfiguration'),
-    grids: (index.all('grid') ?? []).flatMap((item) => (item.code ? [item.code] : [])),
+    grids: codesOf(index.all('grid')),
   };
 }
 
@@ -79,9 +105,12 @@ export function parseIrradiationEvent(
     pulseWidthMs: meanOf(lists.pulseWidthValuesMs),
     filters: (index.all('filters') ?? []).map((filter) => parseFilter(filter, reported, warnings)),
     referencePointDefinition: index.referencePoint(),
+    contrastAgents: readContrastAgents(index),
+    acquiredImages: readImages(index.all('acquiredImage')),
     persons: readPersons(index.all('personName')),
     devices: readDevices(index.all('deviceRole')),
     reported,
+    ...readFurther(item, fields),
   };
   warnOfMissingEventValues(event, warnings);
   return event;

@@ -47,19 +47,31 @@ function emptyObserver(): Observer {
     serialNumber: null,
     organization: null,
     role: null,
+    location: null,
+    deviceRoles: [],
+    loginName: null,
+    organizationRole: null,
+    roleIdentifier: null,
   };
 }
 
 const observerTexts = new Map<
   ConceptName | null,
-  'name' | 'manufacturer' | 'modelName' | 'serialNumber' | 'organization'
+  'name' | 'manufacturer' | 'modelName' | 'serialNumber' | 'organization' | 'location' | 'loginName'
 >([
+  ['deviceObserverLocation', 'location'],
+  ['personObserverLogin', 'loginName'],
   ['deviceObserverName', 'name'],
   ['deviceObserverManufacturer', 'manufacturer'],
   ['deviceObserverModelName', 'modelName'],
   ['deviceObserverSerialNumber', 'serialNumber'],
   ['personObserverOrganization', 'organization'],
 ]);
+
+function readRole(item: ContentItem, observer: Observer): void {
+  observer.role = item.code;
+  observer.roleIdentifier = new ItemIndex(item).text('personObserverIdentifier');
+}
 
 /** TID 1002: an observer starts with its type, or with its name or UID where the type is left out. */
 export function readObservers(root: ContentItem): Observer[] {
@@ -80,7 +92,11 @@ export function readObservers(root: ContentItem): Observer[] {
     if (item.name === 'observerType') start().type = observerTypeOf(item.code);
     if (item.name === 'personObserverName') Object.assign(unnamed(), { name: item.text, type: 'person' });
     if (item.name === 'deviceObserverUid') Object.assign(unnamed(), { uid: item.text, type: 'device' });
-    if (item.name === 'personObserverRole') current().role = item.code;
+    if (item.name === 'personObserverRole') readRole(item, current());
+    if (item.name === 'personObserverOrganizationRole') current().organizationRole = item.code;
+    // With children, the item is a device participant (TID 1021) and no observer's role.
+    if (item.name === 'deviceRole' && item.code && item.children.length === 0)
+      current().deviceRoles.push(item.code);
   }
   return observers;
 }

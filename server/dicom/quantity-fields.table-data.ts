@@ -16,6 +16,8 @@ export const eventQuantities = {
   focalSpotSizeMm: ['focalSpotSize', 'length'],
   halfValueLayerMm: ['halfValueLayer', 'length'],
   patientEquivalentThicknessMm: ['patientEquivalentThickness', 'length'],
+  entranceExposureGy: ['entranceExposure', 'airKerma'],
+  compressionThicknessMm: ['compressionThickness', 'length'],
   exposureIndex: ['exposureIndex', 'count'],
   targetExposureIndex: ['targetExposureIndex', 'count'],
   deviationIndex: ['deviationIndex', 'count'],
@@ -40,6 +42,18 @@ export const eventQuantities = {
   tableLongitudinalEndMm: ['tableLongitudinalEnd', 'length'],
   tableLateralEndMm: ['tableLateralEnd', 'length'],
   tableHeightEndMm: ['tableHeightEnd', 'length'],
+  tableXToIsocenterMm: ['tableXToIsocenter', 'length'],
+  tableYToIsocenterMm: ['tableYToIsocenter', 'length'],
+  tableZToIsocenterMm: ['tableZToIsocenter', 'length'],
+  tableXToIsocenterEndMm: ['tableXToIsocenterEnd', 'length'],
+  tableYToIsocenterEndMm: ['tableYToIsocenterEnd', 'length'],
+  tableZToIsocenterEndMm: ['tableZToIsocenterEnd', 'length'],
+  isocenterPrimaryAngleDeg: ['isocenterPrimaryAngle', 'angle'],
+  isocenterSecondaryAngleDeg: ['isocenterSecondaryAngle', 'angle'],
+  isocenterDetectorRotationDeg: ['isocenterDetectorRotation', 'angle'],
+  isocenterPrimaryEndAngleDeg: ['isocenterPrimaryEndAngle', 'angle'],
+  isocenterSecondaryEndAngleDeg: ['isocenterSecondaryEndAngle', 'angle'],
+  isocenterDetectorRotationEndDeg: ['isocenterDetectorRotationEnd', 'angle'],
 } as const satisfies QuantityFields;
 
 /** Quantities that may repeat, one value for each pulse. */

@@ -3,10 +3,13 @@ import { z } from 'zod';
 import {
   codeSchema,
   deviceParticipantSchema,
+  furtherItemSchema,
+  imageReferenceSchema,
   measured,
   optionalText as text,
   personParticipantSchema,
   planeSchema,
+  qualifiers,
   referencePointSchema,
   reported,
 } from './report-parts';
@@ -36,6 +39,10 @@ export const reportFilterSchema = printedFilterSchema.extend({
   materialCode: codeSchema.nullable(),
 });
 export type ReportFilter = z.infer<typeof reportFilterSchema>;
+
+/** TID 4007: a contrast agent by code, by name, or both. */
+export const contrastAgentSchema = z.object({ code: codeSchema.nullable(), text });
+export type ContrastAgent = z.infer<typeof contrastAgentSchema>;
 
 export const printedEventSchema = z.object({
   irradiationEventUid: text,
@@ -72,16 +79,24 @@ export const reportEventSchema = printedEventSchema.extend({
   /** "+01:00" where the file gives one. */
   utcOffset: text,
   label: text,
+  /** What the label is: series, acquisition or instance number (CID 10022). */
+  labelType: codeSchema.nullable(),
   comment: text,
   anatomy: codeSchema.nullable(),
   laterality: codeSchema.nullable(),
   targetRegion: codeSchema.nullable(),
   imageView: codeSchema.nullable(),
+  imageViewModifiers: z.array(codeSchema),
   projectionName: codeSchema.nullable(),
   patientTableRelationship: codeSchema.nullable(),
   patientOrientation: codeSchema.nullable(),
   patientOrientationModifier: codeSchema.nullable(),
   fluoroMode: z.enum(['continuous', 'pulsed']).nullable(),
+  fluoroModeCode: codeSchema.nullable(),
+  /** How the number of pulses was found: measured, calculated, estimated. */
+  pulseCountDerivation: codeSchema.nullable(),
+  contrastAgents: z.array(contrastAgentSchema),
+  acquiredImages: z.array(imageReferenceSchema),
   referencePointDefinition: referencePointSchema.nullable(),
   tubeCurrentValuesMa: measuredList,
   averageTubeCurrentMa: measured,
@@ -94,6 +109,8 @@ export const reportEventSchema = printedEventSchema.extend({
   fieldWidthMm: measured,
   halfValueLayerMm: measured,
   patientEquivalentThicknessMm: measured,
+  entranceExposureGy: measured,
+  compressionThicknessMm: measured,
   exposureIndex: measured,
   targetExposureIndex: measured,
   deviationIndex: measured,
@@ -110,8 +127,23 @@ export const reportEventSchema = printedEventSchema.extend({
   tableLongitudinalEndMm: measured,
   tableLateralEndMm: measured,
   tableHeightEndMm: measured,
+  /** Table in the isocentre's coordinates (CID 10008 since 2019). */
+  tableXToIsocenterMm: measured,
+  tableYToIsocenterMm: measured,
+  tableZToIsocenterMm: measured,
+  tableXToIsocenterEndMm: measured,
+  tableYToIsocenterEndMm: measured,
+  tableZToIsocenterEndMm: measured,
+  isocenterPrimaryAngleDeg: measured,
+  isocenterSecondaryAngleDeg: measured,
+  isocenterDetectorRotationDeg: measured,
+  isocenterPrimaryEndAngleDeg: measured,
+  isocenterSecondaryEndAngleDeg: measured,
+  isocenterDetectorRotationEndDeg: measured,
   persons: z.array(personParticipantSchema),
   devices: z.array(deviceParticipantSchema),
   reported,
+  qualifiers,
+  furtherItems: z.array(furtherItemSchema),
 });
 export type ReportEvent = z.infer<typeof reportEventSchema>;

@@ -13,6 +13,30 @@ export const reportedQuantitySchema = z.object({ text: z.array(z.string()), unit
 export type ReportedQuantity = z.infer<typeof reportedQuantitySchema>;
 export const reported = z.record(z.string(), reportedQuantitySchema);
 
+/** Why a number is empty (CID 42, "Not a number", "Measurement failure"), by the field it belongs to. */
+export const qualifiers = z.record(z.string(), codeSchema);
+export type Qualifiers = z.infer<typeof qualifiers>;
+
+/**
+ * A content item whose concept is of a public terminology but of no template known here: kept as written, so that
+ * nothing the machine states is lost, and never counted as anything else.
+ */
+export const furtherItemSchema = z.object({
+  concept: codeSchema,
+  code: codeSchema.nullable(),
+  text: z.array(z.string()),
+  unit: text,
+});
+export type FurtherItem = z.infer<typeof furtherItemSchema>;
+
+/** An IMAGE item: what it refers to; no frames means all of them. */
+export const imageReferenceSchema = z.object({
+  sopClassUid: text,
+  sopInstanceUid: text,
+  frameNumbers: z.array(z.number()),
+});
+export type ImageReference = z.infer<typeof imageReferenceSchema>;
+
 export const planes = ['single', 'A', 'B', 'all'] as const;
 export const planeSchema = z.enum(planes);
 export type Plane = z.infer<typeof planeSchema>;
@@ -52,5 +76,13 @@ export const observerSchema = z.object({
   serialNumber: text,
   organization: text,
   role: codeSchema.nullable(),
+  /** A device's, where it stood. */
+  location: text,
+  deviceRoles: z.array(codeSchema),
+  /** A person's. */
+  loginName: text,
+  organizationRole: codeSchema.nullable(),
+  /** Identifier within the role, such as a staff number. */
+  roleIdentifier: text,
 });
 export type Observer = z.infer<typeof observerSchema>;

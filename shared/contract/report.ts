@@ -4,11 +4,14 @@ import { printedEventSchema, reportEventSchema } from './report-event';
 import {
   codeSchema,
   deviceParticipantSchema,
+  furtherItemSchema,
+  imageReferenceSchema,
   measured,
   observerSchema,
   optionalText as text,
   personParticipantSchema,
   planeSchema,
+  qualifiers,
   referencePointSchema,
   reported,
 } from './report-parts';
@@ -27,6 +30,8 @@ export const printedPlaneSchema = z.object({
 
 /** TID 10002 rows 3 to 9: information only, never applied to a value by the reader. */
 export const calibrationSchema = z.object({
+  /** What measured, for example a dosimeter (CID 10010). */
+  measurementDevice: codeSchema.nullable(),
   calibratedAt: text,
   factor: measured,
   uncertaintyPercent: measured,
@@ -40,10 +45,13 @@ export const reportPlaneSchema = printedPlaneSchema.extend({
   planeCode: codeSchema.nullable(),
   sourceToReferencePointMm: measured,
   frameCount: measured,
+  detectorType: codeSchema.nullable(),
   referencePointDefinition: referencePointSchema.nullable(),
   calibrations: z.array(calibrationSchema),
   devices: z.array(deviceParticipantSchema),
   reported,
+  qualifiers,
+  furtherItems: z.array(furtherItemSchema),
 });
 export type ReportPlane = z.infer<typeof reportPlaneSchema>;
 
@@ -85,9 +93,26 @@ export const scopeSchema = z.object({
   uid: text,
 });
 
+/** Referenced Request Sequence (0040,A370): the order behind the study, where the header's own number is empty. */
+export const requestSchema = z.object({
+  accessionNumber: text,
+  requestedProcedureId: text,
+  requestedProcedureDescription: text,
+  requestedProcedureCodes: z.array(codeSchema),
+});
+export type ReportRequest = z.infer<typeof requestSchema>;
+
+export const availabilities = ['yes', 'no', 'undetermined'] as const;
+const availability = z.enum(availabilities).nullable();
+
 /** Everything the reader finds in an X-Ray Radiation Dose SR, in canonical units; absent is null. */
 export const reportSchema = printedReportSchema.omit({ warnings: true }).extend({
   patient: printedReportSchema.shape.patient.extend({ age: text, position: text, reported }),
+  equipment: printedReportSchema.shape.equipment.extend({
+    softwareVersions: text,
+    deviceUid: text,
+    departmentName: text,
+  }),
   planes: z.array(reportPlaneSchema),
   events: z.array(reportEventSchema),
   /** "+01:00" where the file gives one for `startedAt`. */
@@ -98,6 +123,14 @@ export const reportSchema = printedReportSchema.omit({ warnings: true }).extend(
   contentAt: text,
   instanceNumber: text,
   completionFlag: text,
+  verificationFlag: text,
+  /** Template Identifier of the root, where it is given. */
+  templateId: text,
+  requests: z.array(requestSchema),
+  /** Procedure Code Sequence (0008,1032) and Performed Procedure Code Sequence (0040,A372). */
+  procedureCodes: z.array(codeSchema),
+  language: codeSchema.nullable(),
+  country: codeSchema.nullable(),
   procedureReported: codeSchema.nullable(),
   intent: codeSchema.nullable(),
   /** Intent (113680, DCM): phantom, service and quality-control exposures. */
@@ -105,12 +138,18 @@ export const reportSchema = printedReportSchema.omit({ warnings: true }).extend(
   acquisitionDeviceType: codeSchema.nullable(),
   deviceClass: z.enum(['fluoroscopy', 'radiography']),
   detectorType: codeSchema.nullable(),
+  /** Whether the machine could state detector, source and geometry at all (CID 230). */
+  detectorDataAvailable: availability,
+  sourceDataAvailable: availability,
+  mechanicalDataAvailable: availability,
   scopeOfAccumulation: scopeSchema.nullable(),
   sourcesOfInformation: z.array(codeSchema),
   predecessors: z.array(z.object({ sopClassUid: text, sopInstanceUid: text })),
   observers: z.array(observerSchema),
   persons: z.array(personParticipantSchema),
   comment: text,
+  doseImages: z.array(imageReferenceSchema),
+  furtherItems: z.array(furtherItemSchema),
 });
 export type Report = z.infer<typeof reportSchema>;
 
