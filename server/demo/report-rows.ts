@@ -51,6 +51,8 @@ export function toReportRows(
       ...refer,
       originalFileId: null,
       fileName: isManual ? 'entered by hand' : `${procedure.accessionNumber}-${part.number}.dcm`,
+      archiveName: null,
+      uploadKey: null,
       channel: 'generated',
       receivedById: null,
       receivedAt,
@@ -67,6 +69,9 @@ export function toReportRows(
       warnings: isManual
         ? [{ code: 'events-missing', detail: 'Typed from the machine’s screen: totals without exposures' }]
         : [],
+      readerVersion: null,
+      context: null,
+      purgedAt: null,
     };
   });
 }
