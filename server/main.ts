@@ -5,9 +5,13 @@ import { pino } from 'pino';
 import packageJson from '../package.json' with { type: 'json' };
 import { createApp } from './app';
 import { createDataSource } from './db/data-source';
+import { poolOf } from './db/pool';
 import { seedDemo } from './demo/seed-demo';
 import type { Environment } from './env';
+import { endReading } from './dose-reports/read-in-bounds';
 import { settleReceived } from './dose-reports/settle-received';
+import { installJobs, startJobs } from './jobs/job-queue';
+import { listTasks } from './jobs/tasks';
 import { systemClock } from './kernel/clock';
 import { keepSessionSecret } from './session/keep-session-secret';
 import { offerFirstAdministrator } from './session/offer-first-administrator';
@@ -29,13 +33,15 @@ export async function startLeeward(options: StartOptions): Promise<{ url: string
     const migrations = await dataSource.runMigrations({ transaction: 'all' });
     if (migrations.length > 0)
       report(`Migrated the database: ${migrations.map(({ name }) => name).join(', ')}`);
+    await installJobs(poolOf(dataSource));
     if (env.isDemo && env.demoPassword)
       await seedDemo({ dataSource, anchor: env.demoAnchor, password: env.demoPassword, report });
     const isHttps = env.tlsFiles !== null;
+    const logger = pino({ level: env.logLevel, base: null });
     const app = createApp({
       dataSource,
       env,
-      logger: pino({ level: env.logLevel, base: null }),
+      logger,
       now: systemClock,
       sessionSecret: keepSessionSecret(options.dataFolder),
       isHttps,
@@ -53,10 +59,13 @@ export async function startLeeward(options: StartOptions): Promise<{ url: string
     await offerFirstAdministrator(dataSource.manager, url, report);
     // What a crash left between "received" and its outcome is settled now.
     await settleReceived(dataSource.manager);
+    const jobs = await startJobs(poolOf(dataSource), listTasks(dataSource.manager, systemClock), logger);
     return {
       url,
       close: async () => {
         await stop(server);
+        await jobs.stop();
+        await endReading();
         await dataSource.destroy();
       },
     };

@@ -1,10 +1,10 @@
 import type { ReceivedFile } from '../../shared/contract/dose-report';
 import { sentenceOfReason, type ReasonCode, type UnreadOutcome } from '../../shared/contract/outcome';
 import type { Db } from '../db/db';
-import { readDoseReport } from '../dicom/read-dose-report';
 import type { DoseReport } from './dose-report.entity';
 import { settle } from './dose-report.store';
 import { importDoseReport, type ReadReport } from './import-dose-report';
+import { readInBounds } from './read-in-bounds';
 
 /** Reads kept bytes and brings the row to its outcome. */
 export async function settleArrival(
@@ -13,7 +13,7 @@ export async function settleArrival(
   bytes: Buffer,
   now: Date,
 ): Promise<ReceivedFile> {
-  const read = readDoseReport(bytes);
+  const read = await readInBounds(bytes);
   if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, inWords(read.reason));
   try {
     return await store(db, arrival, read, now);

@@ -92,6 +92,11 @@ export const reasons = {
     outcome: 'held',
     sentence: 'Reading the report took too long and was stopped. It was kept and can be read again later.',
   },
+  'limit-memory': {
+    outcome: 'held',
+    sentence:
+      'Reading the report needed more memory than a dose report can sensibly need. It was kept. The physicist decides whether it may be read.',
+  },
   'no-content': {
     outcome: 'held',
     sentence:
