@@ -1,9 +1,9 @@
 import type {
   DoseReportContent,
-  Quantity,
   WrittenEvent,
   WrittenPlaneTotals,
 } from '../../server/dicom-writer/dose-report-content';
+import type { Quantity } from '../../server/dicom-writer/written-parts';
 import type { PrintedReport } from '../../shared/contract/report';
 
 /** UCUM code → factor to Gy, Gy·cm², s or mm; spelt out here so that the reader's own table is checked by it. */
@@ -31,6 +31,8 @@ type Maybe = Quantity | null | undefined;
 function value(quantity: Maybe): number | null {
   if (quantity === null || quantity === undefined) return null;
   if (typeof quantity === 'number') return quantity;
+  if ('qualifier' in quantity || quantity.unit === null || (quantity.scheme ?? 'UCUM') !== 'UCUM')
+    return null;
   const factor = factors[quantity.unit];
   return factor === undefined || !/^[ +-]*[\d.]+(e[+-]?\d+)?\s*$/i.test(quantity.text)
     ? null

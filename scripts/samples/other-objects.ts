@@ -1,6 +1,6 @@
 import { codeItem, contentItem, dcm } from '../../server/dicom-writer/content-items';
 import { sequenceElement, textElement, type DataSet } from '../../server/dicom-writer/data-element';
-import type { WrittenCode } from '../../server/dicom-writer/dose-report-content';
+import type { WrittenCode } from '../../server/dicom-writer/written-parts';
 import { headerElements } from '../../server/dicom-writer/header-elements';
 import { caseContent } from './case-content';
 
@@ -33,8 +33,11 @@ export function ctReport(sample: number): DataSet {
   return structuredReport(sample, `${SR}67`, doseTitle, [
     procedureReported(sct('77477000', 'Computed Tomography X-Ray')),
     contentItem.container(dcm('113811', 'CT Accumulated Dose Data'), [
-      contentItem.number(dcm('113812', 'Total Number of Irradiation Events'), '1', '{events}'),
-      contentItem.number(dcm('113813', 'CT Dose Length Product Total'), '412.5', 'mGy.cm'),
+      contentItem.number(dcm('113812', 'Total Number of Irradiation Events'), {
+        text: '1',
+        unit: '{events}',
+      }),
+      contentItem.number(dcm('113813', 'CT Dose Length Product Total'), { text: '412.5', unit: 'mGy.cm' }),
     ]),
     contentItem.container(dcm('113819', 'CT Acquisition'), [
       contentItem.text('CONTAINS', dcm('125203', 'Acquisition Protocol'), 'Abdomen'),
@@ -48,7 +51,7 @@ export function mammographyReport(sample: number): DataSet {
     procedureReported(sct('71651007', 'Mammography')),
     contentItem.container(dcm('113702', 'Accumulated X-Ray Dose Data'), [
       contentItem.code('HAS CONCEPT MOD', dcm('113764', 'Acquisition Plane'), dcm('113622', 'Single Plane')),
-      contentItem.number(dcm('111637', 'Accumulated Average Glandular Dose'), '2.4', 'mGy'),
+      contentItem.number(dcm('111637', 'Accumulated Average Glandular Dose'), { text: '2.4', unit: 'mGy' }),
     ]),
   ]);
 }

@@ -24,6 +24,17 @@ export class ByteSink {
     this.setUint32(this.length - 4, value);
   }
 
+  addInt32(value: number): void {
+    this.addUint32(value >>> 0);
+  }
+
+  addFloat64(value: number): void {
+    this.reserve(8);
+    if (this.isBigEndian) this.bytes.writeDoubleBE(value, this.length);
+    else this.bytes.writeDoubleLE(value, this.length);
+    this.length += 8;
+  }
+
   setUint16(at: number, value: number): void {
     if (this.isBigEndian) this.bytes.writeUInt16BE(value, at);
     else this.bytes.writeUInt16LE(value, at);

@@ -1,4 +1,4 @@
-import type { WrittenCode } from './dose-report-content';
+import type { WrittenCode } from './written-parts';
 import { dcm } from './content-items';
 
 /** A concept SNOMED names twice: its current code and the older SNOMED-RT one (PS3.16 annex L and context groups). */
@@ -93,5 +93,9 @@ export const scopes: Record<string, { scope: WrittenCode; uid: WrittenCode }> = 
   'procedure-step-to-this-point': {
     scope: dcm('113970', 'Procedure Step To This Point'),
     uid: dcm('121126', 'Performed Procedure Step SOP Instance UID'),
+  },
+  'irradiation-event': {
+    scope: dcm('113852', 'Irradiation Event'),
+    uid: dcm('113853', 'Irradiation Event UID'),
   },
 };

@@ -1,19 +1,18 @@
+import type {
+  Maybe,
+  Quantity,
+  WrittenCalibration,
+  WrittenCode,
+  WrittenImage,
+  WrittenPerson,
+  WrittenPersonObserver,
+} from './written-parts';
+
 /**
  * What the writer puts into an X-Ray Radiation Dose SR (PS3.16 TID 10001). Names and units follow the report
  * contract: Gy, Gy·cm², s, mm, mA, mA·s, deg, kV. Everything optional may be left out or null: it is then not
  * written.
  */
-
-/** A number in the unit of the field's name, or the exact decimal string and UCUM code to write. */
-export type Quantity = number | { text: string; unit: string };
-type Maybe<T> = T | null;
-
-/** Code value, coding scheme designator, code meaning. */
-export interface WrittenCode {
-  value: string;
-  scheme: string;
-  meaning: string;
-}
 
 export type WrittenPlane = 'single' | 'A' | 'B' | 'all';
 export type WrittenEventType =
@@ -31,23 +30,6 @@ export interface WrittenFilter {
   maxThicknessMm?: Maybe<Quantity>;
 }
 
-export interface WrittenPerson {
-  /** As a DICOM person name: family^given^middle^prefix^suffix. */
-  name: string;
-  /** Role in procedure (CID 7453 and others), for example 113851 Irradiation Administering. */
-  role: WrittenCode;
-  id?: Maybe<string>;
-  organization?: Maybe<string>;
-}
-
-export interface WrittenCalibration {
-  /** ISO 8601 local time. */
-  calibratedAt: string;
-  factor: Quantity;
-  uncertaintyPercent: Quantity;
-  responsibleParty: string;
-}
-
 export interface WrittenEvent {
   irradiationEventUid: string;
   plane?: Maybe<WrittenPlane>;
@@ -56,19 +38,33 @@ export interface WrittenEvent {
   startedAt: string;
   protocol?: Maybe<string>;
   label?: Maybe<string>;
+  labelType?: Maybe<WrittenCode>;
   comment?: Maybe<string>;
   anatomy?: Maybe<WrittenCode>;
   laterality?: Maybe<WrittenCode>;
   targetRegion?: Maybe<WrittenCode>;
+  imageView?: Maybe<WrittenCode>;
+  imageViewModifiers?: WrittenCode[];
+  projectionName?: Maybe<WrittenCode>;
+  contrastAgents?: (WrittenCode | string)[];
+  acquiredImages?: WrittenImage[];
+  halfValueLayerMm?: Maybe<Quantity>;
+  entranceExposureGy?: Maybe<Quantity>;
+  compressionThicknessMm?: Maybe<Quantity>;
+  anodeMaterial?: Maybe<WrittenCode>;
+  grids?: WrittenCode[];
+  mechanicalConfiguration?: Maybe<WrittenCode>;
+  persons?: WrittenPerson[];
   patientTableRelationship?: Maybe<'headfirst' | 'feet-first'>;
   patientOrientationModifier?: Maybe<'supine' | 'prone'>;
   kermaAreaProductGyCm2?: Maybe<Quantity>;
   referenceAirKermaGy?: Maybe<Quantity>;
   referencePointDefinition?: Maybe<WrittenReferencePoint | string>;
   patientEquivalentThicknessMm?: Maybe<Quantity>;
-  fluoroMode?: Maybe<'continuous' | 'pulsed'>;
+  fluoroMode?: Maybe<'continuous' | 'pulsed' | WrittenCode>;
   pulseRatePerS?: Maybe<Quantity>;
   pulseCount?: Maybe<Quantity>;
+  pulseCountDerivation?: Maybe<WrittenCode>;
   pulseWidthValuesMs?: Quantity[];
   irradiationDurationS?: Maybe<Quantity>;
   kvpValues?: Quantity[];
@@ -105,6 +101,18 @@ export interface WrittenEvent {
   tableLongitudinalEndMm?: Maybe<Quantity>;
   tableLateralEndMm?: Maybe<Quantity>;
   tableHeightEndMm?: Maybe<Quantity>;
+  tableXToIsocenterMm?: Maybe<Quantity>;
+  tableYToIsocenterMm?: Maybe<Quantity>;
+  tableZToIsocenterMm?: Maybe<Quantity>;
+  tableXToIsocenterEndMm?: Maybe<Quantity>;
+  tableYToIsocenterEndMm?: Maybe<Quantity>;
+  tableZToIsocenterEndMm?: Maybe<Quantity>;
+  isocenterPrimaryAngleDeg?: Maybe<Quantity>;
+  isocenterSecondaryAngleDeg?: Maybe<Quantity>;
+  isocenterDetectorRotationDeg?: Maybe<Quantity>;
+  isocenterPrimaryEndAngleDeg?: Maybe<Quantity>;
+  isocenterSecondaryEndAngleDeg?: Maybe<Quantity>;
+  isocenterDetectorRotationEndDeg?: Maybe<Quantity>;
 }
 
 /** The accumulated values of one plane (TID 10002 with 10004 or 10007). */
@@ -120,6 +128,7 @@ export interface WrittenPlaneTotals {
   acquisitionTimeS?: Maybe<Quantity>;
   sourceToReferencePointMm?: Maybe<Quantity>;
   frameCount?: Maybe<Quantity>;
+  detectorType?: Maybe<WrittenCode>;
   referencePointDefinition?: Maybe<WrittenReferencePoint | string>;
   calibrations?: WrittenCalibration[];
 }
@@ -147,6 +156,8 @@ export interface DoseReportContent {
     /** ISO date. */
     birthDate?: Maybe<string>;
     sex?: Maybe<'M' | 'F' | 'O'>;
+    /** As VR AS: "064Y". */
+    age?: Maybe<string>;
     heightM?: Maybe<number>;
     weightKg?: Maybe<number>;
   };
@@ -159,6 +170,10 @@ export interface DoseReportContent {
     softwareVersion?: Maybe<string>;
     /** UID of the irradiating device as observer. */
     deviceUid: string;
+    departmentName?: Maybe<string>;
+    /** Where the device stood, and its roles as observer (CID 7445). */
+    location?: Maybe<string>;
+    roles?: WrittenCode[];
   };
   /** True leaves maker, model, serial out of the header: only the tree names them. */
   isEquipmentOnlyInTree?: boolean;
@@ -166,7 +181,8 @@ export interface DoseReportContent {
   intent?: WrittenCode;
   acquisitionDeviceType?: Maybe<'fluoroscopy-guided' | 'integrated' | 'cassette'>;
   scope?: {
-    kind: 'study' | 'series' | 'performed-procedure-step' | 'procedure-step-to-this-point';
+    kind:
+      'study' | 'series' | 'performed-procedure-step' | 'procedure-step-to-this-point' | 'irradiation-event';
     uid: string;
   };
   /** Default: Automated Data Collection. */
@@ -176,7 +192,19 @@ export interface DoseReportContent {
   planes: WrittenPlaneTotals[];
   events: WrittenEvent[];
   persons?: WrittenPerson[];
+  personObservers?: WrittenPersonObserver[];
   comment?: Maybe<string>;
+  language?: Maybe<WrittenCode>;
+  country?: Maybe<WrittenCode>;
+  doseImages?: WrittenImage[];
+  /** What the machine could state (TID 10001, CID 230); default yes. */
+  availability?: { detector?: 'yes' | 'no'; source?: 'yes' | 'no'; mechanical?: 'yes' | 'no' };
+  procedureCodes?: WrittenCode[];
+  requests?: {
+    accessionNumber: string;
+    requestedProcedureId: string;
+    requestedProcedureDescription: string;
+  }[];
   /** SOP Class and Instance UIDs of reports this one replaces, all of the same study and series. */
   predecessors?: { sopClassUid: string; sopInstanceUid: string }[];
 }

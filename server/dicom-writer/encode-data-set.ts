@@ -8,11 +8,15 @@ export interface Encoding {
   isBigEndian: boolean;
   hasUndefinedLengths: boolean;
   characterSet: WriterCharacterSet;
+  /** True for the outermost data set, whose declared character set may be a wrong one on purpose. */
+  isRoot?: boolean;
 }
 
-const longForm = new Set<ValueRepresentation>(['OB', 'OW', 'SQ', 'UT']);
-const zeroPadded = new Set<ValueRepresentation>(['OB', 'UI']);
-const localised = new Set<ValueRepresentation>(['LO', 'PN', 'SH', 'UT']);
+const SPECIFIC_CHARACTER_SET = 0x00080005;
+
+const longForm = new Set<ValueRepresentation>(['OB', 'OW', 'SQ', 'UC', 'UN', 'UR', 'UT']);
+const zeroPadded = new Set<ValueRepresentation>(['OB', 'UI', 'UN']);
+const localised = new Set<ValueRepresentation>(['LO', 'PN', 'SH', 'UC', 'UT']);
 const UNDEFINED_LENGTH = 0xffffffff;
 
 function addTag(sink: ByteSink, tag: number): void {
@@ -45,6 +49,8 @@ function addValue(sink: ByteSink, { vr, value }: DataElement, encoding: Encoding
   if (value instanceof Uint8Array) sink.addBytes(value);
   else if (vr === 'US') for (const number of value as number[]) sink.addUint16(number);
   else if (vr === 'UL') for (const number of value as number[]) sink.addUint32(number);
+  else if (vr === 'SL') for (const number of value as number[]) sink.addInt32(number);
+  else if (vr === 'FD') for (const number of value as number[]) sink.addFloat64(number);
   else {
     const text = Array.isArray(value) ? value.join('\\') : value;
     // ASCII is the same in every character set that the writer knows.
@@ -85,8 +91,17 @@ function addElement(sink: ByteSink, element: DataElement, encoding: Encoding): v
   }
 }
 
-function addElements(sink: ByteSink, dataSet: DataSet, encoding: Encoding): void {
-  for (const element of dataSet.toSorted((a, b) => a.tag - b.tag)) addElement(sink, element, encoding);
+/** An item may declare a character set of its own, which counts for what is inside (PS3.3 C.12.1.1.2). */
+function encodingWithin(dataSet: DataSet, encoding: Encoding): Encoding {
+  const own = dataSet.find((element) => element.tag === SPECIFIC_CHARACTER_SET)?.value;
+  if (own === undefined || encoding.isRoot) return encoding;
+  return { ...encoding, characterSet: (Array.isArray(own) ? own.at(-1) : own) as WriterCharacterSet };
+}
+
+function addElements(sink: ByteSink, dataSet: DataSet, outer: Encoding): void {
+  const encoding = encodingWithin(dataSet, outer);
+  const inner = encoding.isRoot ? { ...encoding, isRoot: false } : encoding;
+  for (const element of dataSet.toSorted((a, b) => a.tag - b.tag)) addElement(sink, element, inner);
 }
 
 /** Encodes a data set, its elements in ascending order of tag (PS3.5 7.1). */

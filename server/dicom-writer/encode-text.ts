@@ -1,20 +1,55 @@
-/** Terms of Specific Character Set (0008,0005) the writer can encode; null writes ASCII and leaves the element out. */
-export type WriterCharacterSet =
-  null | 'ISO_IR 100' | 'ISO_IR 144' | 'ISO_IR 192' | 'GB18030' | 'ISO 2022 IR 87' | 'ISO 2022 IR 149';
+/** Sets of one byte, and of several without escape sequences → name for TextDecoder (PS3.3 C.12.1.1.2). */
+const plainSets = {
+  'ISO_IR 13': 'shift_jis',
+  'ISO_IR 100': 'windows-1252',
+  'ISO_IR 101': 'iso-8859-2',
+  'ISO_IR 109': 'iso-8859-3',
+  'ISO_IR 110': 'iso-8859-4',
+  'ISO_IR 126': 'iso-8859-7',
+  'ISO_IR 127': 'iso-8859-6',
+  'ISO_IR 138': 'iso-8859-8',
+  'ISO_IR 144': 'iso-8859-5',
+  'ISO_IR 148': 'windows-1254',
+  'ISO_IR 166': 'windows-874',
+  'ISO_IR 203': 'iso-8859-15',
+  GB18030: 'gb18030',
+  GBK: 'gbk',
+} as const;
 
-interface DoubleByteSet {
+interface EscapedSet {
   escape: number[];
   encoding: string;
-  /** EUC bytes carry the high bit; ISO 2022 IR 87 is designated to G0, where it is cleared. */
+  /** Bytes in a designated half: G0 clears the high bit. */
   clearsHighBit: boolean;
+  bytesPerCharacter: 1 | 2;
 }
 
-const ASCII_ESCAPE = [0x1b, 0x28, 0x42];
-const doubleByteSets: Record<string, DoubleByteSet> = {
-  'ISO 2022 IR 87': { escape: [0x1b, 0x24, 0x42], encoding: 'euc-jp', clearsHighBit: true },
-  'ISO 2022 IR 149': { escape: [0x1b, 0x24, 0x29, 0x43], encoding: 'euc-kr', clearsHighBit: false },
-};
+const escaped = (
+  escape: string,
+  encoding: string,
+  bytesPerCharacter: 1 | 2,
+  clearsHighBit = false,
+): EscapedSet => ({
+  escape: [0x1b, ...Buffer.from(escape, 'latin1')],
+  encoding,
+  bytesPerCharacter,
+  clearsHighBit,
+});
 
+/** Sets that start with an escape sequence (PS3.3 tables C.12-3 and C.12-4). */
+const escapedSets = {
+  'ISO 2022 IR 58': escaped('$)A', 'gbk', 2),
+  'ISO 2022 IR 87': escaped('$B', 'euc-jp', 2, true),
+  'ISO 2022 IR 101': escaped('-B', 'iso-8859-2', 1),
+  'ISO 2022 IR 126': escaped('-F', 'iso-8859-7', 1),
+  'ISO 2022 IR 144': escaped('-L', 'iso-8859-5', 1),
+  'ISO 2022 IR 149': escaped('$)C', 'euc-kr', 2),
+} as const satisfies Record<string, EscapedSet>;
+
+/** Terms of Specific Character Set (0008,0005) the writer can encode; null writes ASCII and leaves the element out. */
+export type WriterCharacterSet = null | 'ISO_IR 192' | keyof typeof plainSets | keyof typeof escapedSets;
+
+const ASCII_ESCAPE = [0x1b, 0x28, 0x42];
 const tables = new Map<string, Map<string, number[]>>();
 
 /** Character → bytes, found by decoding every one- and two-byte combination once. */
@@ -41,22 +76,22 @@ function encodeByTable(text: string, encoding: string): Uint8Array {
 }
 
 /** Each run between the delimiters of PS3.5 6.1.2.5.3 starts and ends in ASCII, as the standard asks. */
-function encodeWithEscapes(text: string, set: DoubleByteSet): Uint8Array {
+function encodeWithEscapes(text: string, set: EscapedSet): Uint8Array {
   const table = reverseTable(set.encoding);
   const bytes: number[] = [];
   for (const run of text.split(/([\\^=\r\n\f\t])/)) {
-    let isDouble = false;
+    let isEscaped = false;
     for (const character of run) {
       const encoded = table.get(character) ?? [0x3f];
-      const needsDouble = encoded.length === 2;
-      if (needsDouble !== isDouble) {
-        if (needsDouble) bytes.push(...set.escape);
+      const isHigh = (encoded[0] ?? 0) >= 0x80 && encoded.length === set.bytesPerCharacter;
+      if (isHigh !== isEscaped) {
+        if (isHigh) bytes.push(...set.escape);
         else if (set.clearsHighBit) bytes.push(...ASCII_ESCAPE);
-        isDouble = needsDouble;
+        isEscaped = isHigh;
       }
-      bytes.push(...encoded.map((byte) => (needsDouble && set.clearsHighBit ? byte & 0x7f : byte)));
+      bytes.push(...encoded.map((byte) => (isHigh && set.clearsHighBit ? byte & 0x7f : byte)));
     }
-    if (isDouble && set.clearsHighBit) bytes.push(...ASCII_ESCAPE);
+    if (isEscaped && set.clearsHighBit) bytes.push(...ASCII_ESCAPE);
   }
   return Uint8Array.from(bytes);
 }
@@ -66,21 +101,15 @@ function encodeWithEscapes(text: string, set: DoubleByteSet): Uint8Array {
  * becomes "?". "é" in ISO_IR 100 is the byte E9, in ISO_IR 192 the bytes C3 A9.
  */
 export function encodeText(text: string, characterSet: WriterCharacterSet): Uint8Array {
-  switch (characterSet) {
-    case 'ISO_IR 192':
-      return new TextEncoder().encode(text);
-    case 'ISO_IR 100':
-      return encodeByTable(text, 'windows-1252');
-    case 'ISO_IR 144':
-      return encodeByTable(text, 'iso-8859-5');
-    case 'GB18030':
-      return encodeByTable(text, 'gb18030');
-    case null:
-      return Uint8Array.from([...text].map((c) => (c.charCodeAt(0) < 0x80 ? c.charCodeAt(0) : 0x3f)));
-    default: {
-      const set = doubleByteSets[characterSet];
-      if (!set) throw new RangeError(`no encoder for ${String(characterSet)}`);
-      return encodeWithEscapes(text, set);
-    }
-  }
+  if (characterSet === null)
+    return Uint8Array.from([...text].map((c) => (c.charCodeAt(0) < 0x80 ? c.charCodeAt(0) : 0x3f)));
+  if (characterSet === 'ISO_IR 192') return new TextEncoder().encode(text);
+  if (isPlain(characterSet)) return encodeByTable(text, plainSets[characterSet]);
+  return encodeWithEscapes(text, escapedSets[characterSet]);
+}
+
+function isPlain(
+  characterSet: keyof typeof plainSets | keyof typeof escapedSets,
+): characterSet is keyof typeof plainSets {
+  return characterSet in plainSets;
 }

@@ -1,4 +1,5 @@
-import type { Quantity, WrittenEvent, WrittenPlaneTotals } from './dose-report-content';
+import type { WrittenEvent, WrittenPlaneTotals } from './dose-report-content';
+import type { Quantity } from './written-parts';
 
 /** Where a quantity goes: concept, unit the standard fixes, and how much of the field's unit is one such unit. */
 export interface QuantityPlace<Field> {
@@ -26,7 +27,9 @@ function place<Field>(
 /** TID 10003: the values that stand at the event itself. */
 export const eventQuantities: QuantityPlace<QuantityField<WrittenEvent>>[] = [
   place('kermaAreaProductGyCm2', '122130', 'Dose Area Product', 'Gy.m2', 10_000),
+  place('halfValueLayerMm', '111634', 'Half Value Layer', 'mm'),
   place('patientEquivalentThicknessMm', '111638', 'Patient Equivalent Thickness', 'mm'),
+  place('entranceExposureGy', '111636', 'Entrance Exposure at RP', 'mGy', 0.001),
 ];
 
 /** TID 10003A. */
@@ -36,10 +39,13 @@ export const detectorQuantities: QuantityPlace<QuantityField<WrittenEvent>>[] = 
   place('deviationIndex', '113847', 'Deviation Index', '1'),
 ];
 
+/** TID 10003B rows 6 and 7, before the derivation of the number of pulses. */
+export const pulseRate: QuantityPlace<QuantityField<WrittenEvent>>[] = [
+  place('pulseRatePerS', '113791', 'Pulse Rate', '{pulse}/s'),
+];
+
 /** TID 10003B, in the order of the template. */
 export const sourceQuantities: QuantityPlace<QuantityField<WrittenEvent>>[] = [
-  place('pulseRatePerS', '113791', 'Pulse Rate', '{pulse}/s'),
-  place('pulseCount', '113768', 'Number of Pulses', '1'),
   place('pulseWidthValuesMs', '113793', 'Pulse Width', 'ms'),
   place('irradiationDurationS', '113742', 'Irradiation Duration', 's'),
   place('kvpValues', '113733', 'KVP', 'kV'),
@@ -66,6 +72,7 @@ export const mechanicalQuantities: QuantityPlace<QuantityField<WrittenEvent>>[] 
   place('tableHeadTiltDeg', '113754', 'Table Head Tilt Angle', 'deg'),
   place('tableHorizontalRotationDeg', '113755', 'Table Horizontal Rotation Angle', 'deg'),
   place('tableCradleTiltDeg', '113756', 'Table Cradle Tilt Angle', 'deg'),
+  place('compressionThicknessMm', '111633', 'Compression Thickness', 'mm'),
   place('sourceToIsocenterMm', '113748', 'Distance Source to Isocenter', 'mm'),
   place('sourceToReferencePointMm', '113737', 'Distance Source to Reference Point', 'mm'),
   place('sourceToDetectorMm', '113750', 'Distance Source to Detector', 'mm'),
@@ -76,6 +83,23 @@ export const mechanicalQuantities: QuantityPlace<QuantityField<WrittenEvent>>[] 
   place('tableLongitudinalEndMm', '113759', 'Table Longitudinal End Position', 'mm'),
   place('tableLateralEndMm', '113760', 'Table Lateral End Position', 'mm'),
   place('tableHeightEndMm', '113761', 'Table Height End Position', 'mm'),
+  place('tableXToIsocenterMm', '128766', 'Table X Position to Isocenter', 'mm'),
+  place('tableYToIsocenterMm', '128767', 'Table Y Position to Isocenter', 'mm'),
+  place('tableZToIsocenterMm', '128768', 'Table Z Position to Isocenter', 'mm'),
+  place('tableXToIsocenterEndMm', '128769', 'Table X End Position to Isocenter', 'mm'),
+  place('tableYToIsocenterEndMm', '128770', 'Table Y End Position to Isocenter', 'mm'),
+  place('tableZToIsocenterEndMm', '128771', 'Table Z End Position to Isocenter', 'mm'),
+  place('isocenterPrimaryAngleDeg', '128757', 'Positioner Isocenter Primary Angle', 'deg'),
+  place('isocenterSecondaryAngleDeg', '128758', 'Positioner Isocenter Secondary Angle', 'deg'),
+  place('isocenterDetectorRotationDeg', '128759', 'Positioner Isocenter Detector Rotation Angle', 'deg'),
+  place('isocenterPrimaryEndAngleDeg', '128760', 'Positioner Isocenter Primary End Angle', 'deg'),
+  place('isocenterSecondaryEndAngleDeg', '128761', 'Positioner Isocenter Secondary End Angle', 'deg'),
+  place(
+    'isocenterDetectorRotationEndDeg',
+    '128762',
+    'Positioner Isocenter Detector Rotation End Angle',
+    'deg',
+  ),
 ];
 
 /** TID 10004 and 10007: the totals of a plane. */

@@ -1,4 +1,4 @@
-import type { Quantity } from './dose-report-content';
+import type { Quantity, WrittenNumber } from './written-parts';
 
 /** The shortest decimal string of at most 16 characters (VR DS, PS3.5 6.2) closest to the value. */
 export function formatDecimal(value: number): string {
@@ -9,12 +9,8 @@ export function formatDecimal(value: number): string {
   throw new RangeError(`no decimal string for ${value}`);
 }
 
-/** The text and unit to write: an exact pair as it stands, a number divided by its field's factor. */
-export function formatQuantity(
-  quantity: Quantity,
-  unit: string,
-  perWrittenUnit: number,
-): { text: string; unit: string } {
+/** What to write: an exact text and unit as they stand, a number divided by its field's factor. */
+export function formatQuantity(quantity: Quantity, unit: string, perWrittenUnit: number): WrittenNumber {
   if (typeof quantity !== 'number') return quantity;
   return { text: formatDecimal(Number((quantity / perWrittenUnit).toPrecision(15))), unit };
 }

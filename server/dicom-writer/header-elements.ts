@@ -1,3 +1,4 @@
+import { codeItem } from './content-items';
 import { sequenceElement, textElement, type DataElement, type DataSet } from './data-element';
 import type { DoseReportContent } from './dose-report-content';
 import { formatDecimal, splitDateTime } from './format-values';
@@ -15,6 +16,7 @@ function patientElements({ patient }: DoseReportContent): DataSet {
     textElement(0x00100020, 'LO', patient.id),
     textElement(0x00100030, 'DA', (patient.birthDate ?? '').replaceAll('-', '')),
     textElement(0x00100040, 'CS', patient.sex ?? ''),
+    ...present(0x00101010, 'AS', patient.age),
     ...(patient.heightM ? [textElement(0x00101020, 'DS', formatDecimal(patient.heightM))] : []),
     ...(patient.weightKg ? [textElement(0x00101030, 'DS', formatDecimal(patient.weightKg))] : []),
   ];
@@ -30,6 +32,25 @@ function equipmentElements({ equipment, isEquipmentOnlyInTree }: DoseReportConte
     ...present(0x00081090, 'LO', shown?.modelName),
     ...present(0x00181000, 'LO', shown?.serialNumber),
     ...present(0x00181020, 'LO', equipment.softwareVersion),
+    ...present(0x00081040, 'LO', equipment.departmentName),
+  ];
+}
+
+/** Referenced Request Sequence and Procedure Code Sequence: the order and what was done, in the department's words. */
+function orderElements({ requests = [], procedureCodes = [], studyInstanceUid }: DoseReportContent): DataSet {
+  const items = requests.map(({ accessionNumber, requestedProcedureId, requestedProcedureDescription }) => [
+    textElement(0x00080050, 'SH', accessionNumber),
+    sequenceElement(0x00081110, []),
+    textElement(0x0020000d, 'UI', studyInstanceUid),
+    textElement(0x00321060, 'LO', requestedProcedureDescription),
+    sequenceElement(0x00321064, []),
+    textElement(0x00401001, 'SH', requestedProcedureId),
+    textElement(0x00402016, 'LO', ''),
+    textElement(0x00402017, 'LO', ''),
+  ]);
+  return [
+    ...(procedureCodes.length > 0 ? [sequenceElement(0x00081032, procedureCodes.map(codeItem))] : []),
+    ...(items.length > 0 ? [sequenceElement(0x0040a370, items)] : []),
   ];
 }
 
@@ -74,6 +95,7 @@ export function headerElements(content: DoseReportContent): DataSet {
     textElement(0x00200010, 'SH', content.studyId ?? ''),
     textElement(0x00200011, 'IS', String(content.seriesNumber ?? 990)),
     textElement(0x00200013, 'IS', String(content.instanceNumber ?? 1)),
+    ...orderElements(content),
     ...predecessorElements(content),
     sequenceElement(0x0040a372, []),
     textElement(0x0040a491, 'CS', content.completionFlag ?? 'COMPLETE'),

@@ -1,6 +1,6 @@
 import { contentItem, dcm } from './content-items';
 import type { DataSet } from './data-element';
-import type { Quantity } from './dose-report-content';
+import type { Quantity } from './written-parts';
 import type { QuantityPlace } from './event-quantities.table-data';
 import { formatQuantity } from './format-values';
 
@@ -13,8 +13,7 @@ export function quantityItems<Holder, Field extends keyof Holder>(
     const value = holder[field] as Quantity | Quantity[] | null | undefined;
     if (value === null || value === undefined) return [];
     return [value].flat().map((quantity) => {
-      const written = formatQuantity(quantity, unit, perWrittenUnit);
-      return contentItem.number(dcm(code, meaning), written.text, written.unit);
+      return contentItem.number(dcm(code, meaning), formatQuantity(quantity, unit, perWrittenUnit));
     });
   });
 }

@@ -1,7 +1,8 @@
 import { planeCodes, snomed } from './codes.table-data';
 import { contentItem, dcm } from './content-items';
 import type { DataSet } from './data-element';
-import type { DoseReportContent, WrittenCalibration, WrittenPlaneTotals } from './dose-report-content';
+import type { DoseReportContent, WrittenPlaneTotals } from './dose-report-content';
+import type { WrittenCalibration } from './written-parts';
 import { totalQuantities } from './event-quantities.table-data';
 import { formatDateTime, formatQuantity } from './format-values';
 import { quantityItems } from './quantity-items';
@@ -21,13 +22,16 @@ function calibrationItem(calibration: WrittenCalibration, terminology: 'SCT' | '
       dcm('113723', 'Calibration DateTime'),
       formatDateTime(calibration.calibratedAt),
     ),
-    contentItem.number(dcm('122322', 'Calibration Factor'), factor.text, factor.unit),
-    contentItem.number(dcm('113763', 'Calibration Uncertainty'), uncertainty.text, uncertainty.unit),
+    contentItem.number(dcm('122322', 'Calibration Factor'), factor),
+    contentItem.number(dcm('113763', 'Calibration Uncertainty'), uncertainty),
     contentItem.text(
       'CONTAINS',
       dcm('113724', 'Calibration Responsible Party'),
       calibration.responsibleParty,
     ),
+    ...(calibration.protocol
+      ? [contentItem.text('CONTAINS', dcm('113720', 'Calibration Protocol'), calibration.protocol)]
+      : []),
   ]);
 }
 
@@ -41,6 +45,9 @@ export function totalsItem(
   return contentItem.container(dcm('113702', 'Accumulated X-Ray Dose Data'), [
     ...(plane ? [contentItem.code('HAS CONCEPT MOD', dcm('113764', 'Acquisition Plane'), plane)] : []),
     ...(totals.calibrations ?? []).map((one) => calibrationItem(one, content.terminology ?? 'SCT')),
+    ...(totals.detectorType
+      ? [contentItem.code('CONTAINS', dcm('113947', 'Detector Type'), totals.detectorType)]
+      : []),
     ...quantityItems(totals, totalQuantities),
     ...referencePointItems(totals.referencePointDefinition),
     ...device,

@@ -1,10 +1,16 @@
 import { deviceTypes, scopes, snomed } from './codes.table-data';
 import { codeItem, contentItem, dcm } from './content-items';
 import { sequenceElement, textElement, type DataSet } from './data-element';
-import type { DoseReportContent, WrittenCode } from './dose-report-content';
+import type { DoseReportContent } from './dose-report-content';
+import type { WrittenCode } from './written-parts';
 import { eventItem } from './event-items';
 import { headerElements } from './header-elements';
-import { deviceObserverItems, irradiatingDeviceItems, personItem } from './participant-items';
+import {
+  deviceObserverItems,
+  irradiatingDeviceItems,
+  personItem,
+  personObserverItems,
+} from './participant-items';
 import { totalsItem } from './totals-items';
 import { writeFile, type FileOptions } from './write-file';
 
@@ -16,6 +22,16 @@ const sourceCodes: Record<string, WrittenCode> = {
   calculated: dcm('113940', 'System Calculated'),
 };
 
+/** TID 1204. */
+function languageItems({ language, country }: DoseReportContent): DataSet[] {
+  if (!language) return [];
+  const concept = dcm('121049', 'Language of Content Item and Descendants');
+  const below = country
+    ? [contentItem.code('HAS CONCEPT MOD', dcm('121046', 'Country of Language'), country)]
+    : [];
+  return [contentItem.code('HAS CONCEPT MOD', concept, language, below)];
+}
+
 function contextItems(content: DoseReportContent): DataSet[] {
   const terminology = content.terminology ?? 'SCT';
   const intent = content.intent ?? snomed.combinedIntent[terminology];
@@ -23,19 +39,29 @@ function contextItems(content: DoseReportContent): DataSet[] {
   const { kind, uid } = content.scope ?? { kind: 'study', uid: content.studyInstanceUid };
   const scope = scopes[kind];
   if (!scope) throw new RangeError(`unknown scope ${kind}`);
-  const yes = snomed.yes[terminology];
+  const { detector = 'yes', source = 'yes', mechanical = 'yes' } = content.availability ?? {};
   return [
+    ...languageItems(content),
     contentItem.code('HAS CONCEPT MOD', dcm('121058', 'Procedure reported'), snomed.projectionXRay, [
       contentItem.code('HAS CONCEPT MOD', snomed.hasIntent[terminology], intent),
     ]),
     ...(device ? [contentItem.code('CONTAINS', dcm('122142', 'Acquisition Device Type'), device)] : []),
     ...deviceObserverItems(content),
+    ...(content.personObservers ?? []).flatMap(personObserverItems),
     contentItem.code('HAS OBS CONTEXT', dcm('113705', 'Scope of Accumulation'), scope.scope, [
       contentItem.uid('HAS PROPERTIES', scope.uid, uid),
     ]),
-    contentItem.code('CONTAINS', dcm('113945', 'X-Ray Detector Data Available'), yes),
-    contentItem.code('CONTAINS', dcm('113943', 'X-Ray Source Data Available'), yes),
-    contentItem.code('CONTAINS', dcm('113944', 'X-Ray Mechanical Data Available'), yes),
+    contentItem.code(
+      'CONTAINS',
+      dcm('113945', 'X-Ray Detector Data Available'),
+      snomed[detector][terminology],
+    ),
+    contentItem.code('CONTAINS', dcm('113943', 'X-Ray Source Data Available'), snomed[source][terminology]),
+    contentItem.code(
+      'CONTAINS',
+      dcm('113944', 'X-Ray Mechanical Data Available'),
+      snomed[mechanical][terminology],
+    ),
   ];
 }
 
@@ -56,6 +82,9 @@ function treeElements(content: DoseReportContent): DataSet {
       ...content.planes.map((totals) => totalsItem(totals, content, device)),
       ...content.events.map((event) => eventItem(event, terminology, device)),
       ...(content.comment ? [contentItem.text('CONTAINS', dcm('121106', 'Comment'), content.comment)] : []),
+      ...(content.doseImages ?? []).map((image) =>
+        contentItem.image('CONTAINS', dcm('121342', 'Dose Image'), image),
+      ),
       ...(content.persons ?? []).map(personItem),
       ...sources.map((source) =>
         contentItem.code(

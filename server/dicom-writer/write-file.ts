@@ -18,6 +18,10 @@ export interface FileOptions {
   hasMetaHeader?: boolean;
   /** True writes sequences and items with delimiters in place of lengths. */
   hasUndefinedLengths?: boolean;
+  /** Written to (0008,0005) in place of the set's own term; null leaves the element out. */
+  declaredCharacterSet?: string | string[] | null;
+  /** Data Set Trailing Padding (FFFC,FFFC), as media of fixed block size have it. */
+  trailingPaddingBytes?: number;
   /** Written to (0002,0010) in place of the syntax's own UID. */
   declaredTransferSyntaxUid?: string;
 }
@@ -63,6 +67,23 @@ function textOf(dataSet: DataSet, tag: number): string {
   return typeof value === 'string' ? value : '';
 }
 
+function characterSetElement(
+  characterSet: WriterCharacterSet,
+  declared: FileOptions['declaredCharacterSet'],
+): DataSet {
+  if (declared === null) return [];
+  if (declared !== undefined) return [textElement(0x00080005, 'CS', declared)];
+  if (characterSet === null) return [];
+  // A code extension stands second; the first value stays empty, which means ASCII (PS3.3 C.12.1.1.2).
+  return [
+    textElement(0x00080005, 'CS', characterSet.startsWith('ISO 2022') ? ['', characterSet] : characterSet),
+  ];
+}
+
+function paddingElement(byteCount: number | undefined): DataSet {
+  return byteCount === undefined ? [] : [{ tag: 0xfffcfffc, vr: 'OB', value: new Uint8Array(byteCount) }];
+}
+
 /** Writes a data set as a DICOM file (PS3.10 section 7); the Specific Character Set is added here. */
 export function writeFile(dataSet: DataSet, options: FileOptions = {}): Uint8Array {
   const syntax = options.transferSyntax ?? 'explicit-little-endian';
@@ -72,10 +93,13 @@ export function writeFile(dataSet: DataSet, options: FileOptions = {}): Uint8Arr
     isBigEndian: syntax === 'explicit-big-endian',
     hasUndefinedLengths: options.hasUndefinedLengths ?? false,
     characterSet,
+    isRoot: true,
   };
-  // A code extension stands second; the first value stays empty, which means ASCII (PS3.3 C.12.1.1.2).
-  const declared = characterSet?.startsWith('ISO 2022') ? ['', characterSet] : (characterSet ?? '');
-  const complete = characterSet ? [...dataSet, textElement(0x00080005, 'CS', declared)] : dataSet;
+  const complete = [
+    ...dataSet,
+    ...characterSetElement(characterSet, options.declaredCharacterSet),
+    ...paddingElement(options.trailingPaddingBytes),
+  ];
   const plain = encodeDataSet(complete, encoding);
   const body = syntax === 'deflated' ? padToEven(deflateRawSync(plain)) : plain;
   if (options.hasMetaHeader === false) return new Uint8Array(body);

@@ -123,8 +123,7 @@ describe('the shape of the tree', () => {
   it('may hold private items, which count for nothing', () => {
     const foreign = contentItem.number(
       { value: '113722', scheme: '99QUILLON', meaning: 'Own total' },
-      '99',
-      'Gy.m2',
+      { text: '99', unit: 'Gy.m2' },
     );
     const { report } = read(
       withItems((items) => [foreign, contentItem.container(dcm('999999', 'x'), [foreign]), ...items]),
