@@ -1,5 +1,7 @@
 import { startCluster } from '../scripts/database-cluster/start-cluster';
 import { createDataSource } from '../server/db/data-source';
+import { poolOf } from '../server/db/pool';
+import { installJobs } from '../server/jobs/job-queue';
 import { dropDatabase, runStatements, withDatabase } from './database-server';
 
 /** Where test files make their databases, and the migrated database they copy. */
@@ -19,6 +21,7 @@ async function migrate(url: string): Promise<void> {
   await dataSource.initialize();
   try {
     await dataSource.runMigrations();
+    await installJobs(poolOf(dataSource));
   } finally {
     await dataSource.destroy();
   }

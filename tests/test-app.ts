@@ -4,7 +4,10 @@ import request from 'supertest';
 import type { DataSource } from 'typeorm';
 import { createApp } from '../server/app';
 import { createDataSource } from '../server/db/data-source';
+import { poolOf } from '../server/db/pool';
 import { readEnvironment } from '../server/env';
+import { runWaitingJobs } from '../server/jobs/job-queue';
+import { listTasks } from '../server/jobs/tasks';
 import type { Clock } from '../server/kernel/clock';
 import { createTestDatabase } from './test-db';
 
@@ -12,6 +15,8 @@ export type TestApp = {
   app: Express;
   dataSource: DataSource;
   url: string;
+  /** Does what waits in the job queue, as the server would in its own time. */
+  runJobs(): Promise<void>;
   close(): Promise<void>;
 };
 
@@ -33,6 +38,7 @@ export async function startTestApp(now: Clock = () => new Date()): Promise<TestA
     app,
     dataSource,
     url: database.url,
+    runJobs: () => runWaitingJobs(poolOf(dataSource), listTasks(dataSource.manager, now)),
     close: async () => {
       await dataSource.destroy();
       await database.drop();

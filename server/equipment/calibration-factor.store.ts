@@ -2,14 +2,15 @@ import type { EntityManager } from 'typeorm';
 import type { CalibrationFactor as FactorContract } from '../../shared/contract/calibration-factor';
 import { CalibrationFactor } from './calibration-factor.entity';
 
-type FactorRow = Omit<FactorContract, 'enteredAt'> & { enteredAt: Date };
+type StoredFactor = Omit<FactorContract, 'isBeingApplied'>;
+type FactorRow = Omit<StoredFactor, 'enteredAt'> & { enteredAt: Date };
 
 /** All factors of a machine, the newest first; of two with the same day the later entered one counts. */
 export async function listCalibrationFactors(
   db: EntityManager,
   hospitalId: string,
   equipmentId: string,
-): Promise<FactorContract[]> {
+): Promise<StoredFactor[]> {
   const rows: FactorRow[] = await db.query(
     `select factor.id, factor.equipment_id as "equipmentId", factor."plane", factor."quantity", factor.factor,
             factor.uncertainty_percent as "uncertaintyPercent", factor.valid_from::text as "validFrom",

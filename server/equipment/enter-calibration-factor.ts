@@ -3,9 +3,9 @@ import { noteAudit } from '../audit/audit.store';
 import type { Db } from '../db/db';
 import type { Actor } from '../kernel/actor';
 import { fieldProblem } from '../kernel/field-problem';
+import { addJob, listPendingKeys } from '../jobs/job.store';
 import { newId } from '../kernel/new-id';
 import { Problem } from '../kernel/problem';
-import { recomputeSince } from '../procedures/recompute-since';
 import { addCalibrationFactor, listCalibrationFactors } from './calibration-factor.store';
 import { findEquipment } from './equipment.store';
 
@@ -15,27 +15,25 @@ export async function listFactorsOfEquipment(
   equipmentId: string,
 ): Promise<CalibrationFactor[]> {
   if (!(await findEquipment(db, actor.hospitalId, equipmentId))) throw new Problem('not-found');
-  return listCalibrationFactors(db, actor.hospitalId, equipmentId);
+  const factors = await listCalibrationFactors(db, actor.hospitalId, equipmentId);
+  const pending = await listPendingKeys(db, factors.map(keyOf));
+  return factors.map((factor) => ({ ...factor, isBeingApplied: pending.has(keyOf(factor)) }));
 }
 
+/** Two factors entered one after the other may begin on different days: each has a job of its own. */
+const keyOf = (factor: Pick<CalibrationFactor, 'equipmentId' | 'validFrom'>) =>
+  `recompute-machine:${factor.equipmentId}:${factor.validFrom}`;
+
 /**
- * Enters a factor and recomputes what it concerns: the machine's procedures from its day on. Estimates made with the
- * factor before stay readable as earlier revisions.
+ * Appends a factor; earlier ones stay as they are, so that every corrected value can be retraced. What it concerns,
+ * the machine's procedures from its day on, is recomputed afterwards; estimates made before stay readable as earlier
+ * revisions.
  */
-export async function enterCalibrationFactor(
+export const enterCalibrationFactor = (
   db: Db,
   actor: Actor,
   input: CalibrationFactorInput,
-  now: Date,
-): Promise<CalibrationFactor> {
-  const entered = await appendFactor(db, actor, input);
-  const reason = `calibration factor ${entered.factor} from ${entered.validFrom}`;
-  await recomputeSince(db, actor.hospitalId, entered.equipmentId, entered.validFrom, reason, now);
-  return entered;
-}
-
-/** Appends a factor; earlier ones stay as they are, so that every corrected value can be retraced. */
-const appendFactor = (db: Db, actor: Actor, input: CalibrationFactorInput): Promise<CalibrationFactor> =>
+): Promise<CalibrationFactor> =>
   db.transaction(async (tx) => {
     if (!(await findEquipment(tx, actor.hospitalId, input.equipmentId)))
       throw fieldProblem({ pointer: '/equipmentId', detail: 'There is no such machine.' });
@@ -57,5 +55,16 @@ const appendFactor = (db: Db, actor: Actor, input: CalibrationFactorInput): Prom
       subjectId: id,
       after: entered,
     });
-    return entered;
+    await addJob(
+      tx,
+      'recompute-machine',
+      {
+        hospitalId: actor.hospitalId,
+        equipmentId: entered.equipmentId,
+        day: entered.validFrom,
+        reason: `calibration factor ${entered.factor} from ${entered.validFrom}`,
+      },
+      keyOf(entered),
+    );
+    return { ...entered, isBeingApplied: true };
   });

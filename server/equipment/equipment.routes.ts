@@ -60,6 +60,6 @@ export const equipmentRoutes: Route[] = [
     body: calibrationFactorInputSchema,
     response: calibrationFactorSchema,
     status: 201,
-    handle: ({ deps, actor, body }) => enterCalibrationFactor(deps.db, actor, body, deps.now()),
+    handle: ({ deps, actor, body }) => enterCalibrationFactor(deps.db, actor, body),
   }),
 ];

@@ -25,6 +25,8 @@ export const calibrationFactorSchema = z.object({
   source: z.string(),
   enteredBy: z.string(),
   enteredAt: z.string(),
+  /** The machine's procedures from its day on are still being recomputed. */
+  isBeingApplied: z.boolean(),
 });
 export type CalibrationFactor = z.infer<typeof calibrationFactorSchema>;
 

@@ -35,8 +35,19 @@ test('a factor corrects the procedures of its machine from its day on, and leave
       .expect(201);
   const day = before.startedAt.slice(0, 10);
   await enter('2099-01-01', 2);
+  await app.runJobs();
   expect((await physicist.get(`/api/procedures/${id}`)).body).toMatchObject({ isCorrected: false });
   await enter(day, 1.12);
+  const factorsPath = `/api/equipment/${before.planes[0].equipmentId}/calibration-factors`;
+  expect((await physicist.get(factorsPath)).body.items).toContainEqual(
+    expect.objectContaining({ validFrom: day, isBeingApplied: true }),
+  );
+  await app.runJobs();
+  expect(
+    (await physicist.get(factorsPath)).body.items.map(
+      (factor: { isBeingApplied: boolean }) => factor.isBeingApplied,
+    ),
+  ).toEqual([false, false]);
   const after = (await physicist.get(`/api/procedures/${id}`)).body;
   expect(after.isCorrected).toBe(true);
   expect(after.planes[0].displayed.referenceAirKermaGy).toBe(before.referenceAirKermaGy);

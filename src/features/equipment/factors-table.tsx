@@ -27,7 +27,14 @@ export function FactorsTable({ equipmentId, timeZone }: { equipmentId: string; t
     {
       key: 'entered',
       head: 'Entered',
-      cell: (factor) => `${formatInstant(factor.enteredAt, timeZone)} by ${factor.enteredBy}`,
+      cell: (factor) => (
+        <>
+          {`${formatInstant(factor.enteredAt, timeZone)} by ${factor.enteredBy}`}
+          {factor.isBeingApplied && (
+            <span className="block text-sm text-ink-2">being applied to the procedures from this day on</span>
+          )}
+        </>
+      ),
     },
   ];
   return (

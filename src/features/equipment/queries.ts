@@ -23,5 +23,7 @@ export const equipmentQueries = {
             signal,
           })
         ).items,
+      // Until the newest factor has reached every procedure.
+      refetchInterval: ({ state }) => (state.data?.some((factor) => factor.isBeingApplied) ? 2000 : false),
     }),
 };
