@@ -1,10 +1,9 @@
 import type { Report } from '../../shared/contract/report';
 import { createTextReader } from './character-set';
-import { readText } from './content-tree';
 import { formatUtcOffset, joinDateAndTime, parseDate } from './date-time';
-import { parseDecimal } from './decimal';
+import { parseDecimal } from '../../shared/decimal';
 import { readHeaderCodes, readRequests } from './read-requests';
-import { asciiOf, firstItemOf, itemsOf, type DicomDataSet } from './read-dicom';
+import { asciiOf, firstItemOf, itemsOf, readText, type DicomDataSet } from './read-dicom';
 import type { Reported } from './read-quantity';
 import type { WarningCollector } from './warning-collector';
 

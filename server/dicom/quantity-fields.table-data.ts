@@ -1,5 +1,5 @@
 import type { ConceptName } from './concepts.table-data';
-import type { QuantityKind } from './units';
+import type { QuantityKind } from '../../shared/unit-factors';
 
 /** Field of the contract, the concept it is read from, and the kind of quantity that fixes its units. */
 type QuantityFields = Record<string, readonly [ConceptName, QuantityKind]>;

@@ -1,7 +1,7 @@
 import type { ConceptName } from './concepts.table-data';
 import type { ItemIndex } from './item-index';
 import { readQuantities, readQuantity, type Reported } from './read-quantity';
-import type { QuantityKind } from './units';
+import type { QuantityKind } from '../../shared/unit-factors';
 import type { WarningCollector } from './warning-collector';
 
 type Fields<Name extends string> = Record<Name, readonly [ConceptName, QuantityKind]>;

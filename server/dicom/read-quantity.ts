@@ -1,7 +1,7 @@
 import type { ReportedQuantity } from '../../shared/contract/report-parts';
 import type { ContentItem } from './content-tree';
-import { scaleDecimal } from './decimal';
-import { unitFactor, type QuantityKind } from './units';
+import { scaleDecimal } from '../../shared/decimal';
+import { unitFactor, type QuantityKind } from '../../shared/unit-factors';
 import type { WarningCollector } from './warning-collector';
 
 export type Reported = Record<string, ReportedQuantity>;

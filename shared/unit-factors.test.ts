@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { unitFactor, type QuantityKind } from './units';
+import { unitFactor, type QuantityKind } from './unit-factors';
 
 // Source: the UCUM prefixes; 1 uGy.m2 = 1 cGy.cm2 by arithmetic.
 it.each<[QuantityKind, string, number, number]>([

@@ -25,6 +25,9 @@ it.each([
   ['558', 0.001, 0.558],
   ['-.7', 1e-6, -7e-7],
   ['2.5', 60, 150],
+  ['0.57', 60, 34.2],
+  ['-.1', 60, -6],
+  ['+1.1', 60, 66],
 ])('moves the point of %j exactly when scaled by %d', (text, factor, value) => {
   expect(scaleDecimal(text, factor)).toBe(value);
 });
