@@ -1,5 +1,6 @@
 import type { WarningCode } from '../../shared/contract/outcome';
 import { decodeWithEscapes } from './code-extensions';
+import type { SliceableBuffer } from './latin1-text';
 
 /** Defined Terms of Specific Character Set (PS3.3 C.12.1.1.2) without code extensions → name for TextDecoder. */
 const encodings = new Map([
@@ -27,8 +28,11 @@ export interface TextReader {
 
 export type CharacterSetNotice = (code: WarningCode, detail: string) => void;
 
-function isAscii(bytes: Uint8Array): boolean {
-  for (const byte of bytes) if (byte >= 0x80 || byte === 0x1b) return false;
+function isAscii(bytes: Uint8Array, start: number, end: number): boolean {
+  for (let position = start; position < end; position += 1) {
+    const byte = bytes[position] as number;
+    if (byte >= 0x80 || byte === 0x1b) return false;
+  }
   return true;
 }
 
@@ -42,7 +46,11 @@ function decodeUtf8(bytes: Uint8Array): string | null {
 
 /** NUL cannot be stored and pads odd lengths; trailing blanks are padding by the standard. */
 function trimPadding(text: string): string {
-  return text.replaceAll('\0', '').replace(/ +$/, '');
+  const kept = text.includes('\0') ? text.replaceAll('\0', '') : text;
+  // Not by a pattern: / +$/ looks at each run of blanks inside a long text again and again.
+  let end = kept.length;
+  while (end > 0 && kept.charCodeAt(end - 1) === 0x20) end -= 1;
+  return kept.slice(0, end);
 }
 
 /** UTF-8 if the bytes are that, else Windows-1252: the two that undeclared bytes turn out to be. */
@@ -94,9 +102,20 @@ export function createTextReader(declared: string | null, notice: CharacterSetNo
   const read = readerOf(terms, notice);
   return {
     decode(bytes) {
-      if (isAscii(bytes))
+      if (isAscii(bytes, 0, bytes.length))
         return trimPadding(Buffer.from(bytes.buffer, bytes.byteOffset, bytes.length).toString('latin1'));
       return trimPadding(read(bytes));
     },
   };
+}
+
+/** Text of a value that lies in a data set; null if it is empty or blank. */
+export function decodeText(
+  bytes: SliceableBuffer,
+  start: number,
+  end: number,
+  reader: TextReader,
+): string | null {
+  if (isAscii(bytes, start, end)) return trimPadding(bytes.latin1Slice(start, end)) || null;
+  return reader.decode(bytes.subarray(start, end)) || null;
 }

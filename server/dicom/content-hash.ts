@@ -1,28 +1,39 @@
 import { createHash } from 'node:crypto';
-import type { Code } from '../../shared/contract/report-parts';
-import type { ContentItem } from './content-tree';
 
 /** Control characters keep fields and levels apart; none of them survives in decoded values. */
 const FIELD = '\u001f';
 const OPEN = '\u001d';
 const CLOSE = '\u001e';
 
-const codeText = (code: Code | null) => (code ? `${code.scheme}|${code.value}` : '');
-
-function textOf(item: ContentItem): string {
-  const { measurement } = item;
-  const value = measurement
-    ? `${measurement.text.join('\\')}|${codeText(measurement.unit)}`
-    : (item.text ?? codeText(item.code));
-  let text = OPEN + item.valueType + FIELD + codeText(item.concept) + FIELD + value;
-  for (const child of item.children) text += textOf(child);
-  return text + CLOSE;
-}
+/** Text is handed on in pieces of about this many characters, so that a long report never stands in memory whole. */
+const PIECE = 65_536;
 
 /**
- * SHA-256 (hexadecimal) of the content tree: value types, concepts, values. Header, transfer syntax, character set,
- * lengths and the meanings of codes do not count: archives rewrite those.
+ * SHA-256 (hexadecimal) of the content tree, told item by item in the order of the file: value types, concepts,
+ * values. Header, transfer syntax, character set, lengths and the meanings of codes do not count: archives rewrite
+ * those.
  */
-export function hashContent(root: ContentItem): string {
-  return createHash('sha256').update(textOf(root)).digest('hex');
+export class ContentHasher {
+  private readonly hash = createHash('sha256');
+  private pending = '';
+
+  /** `concept` is scheme and value of the concept, `value` the item's text, code, or numbers with unit. */
+  openItem(valueType: string, concept: string, value: string): void {
+    this.pending += OPEN + valueType + FIELD + concept + FIELD + value;
+    if (this.pending.length > PIECE) this.flush();
+  }
+
+  closeItem(): void {
+    this.pending += CLOSE;
+  }
+
+  digest(): string {
+    this.flush();
+    return this.hash.digest('hex');
+  }
+
+  private flush(): void {
+    this.hash.update(this.pending);
+    this.pending = '';
+  }
 }

@@ -7,29 +7,9 @@ import { readFurther } from './further-items';
 import { findContainers, ItemIndex } from './item-index';
 import { parseAccumulated, warnOfMissingTotals } from './parse-accumulated';
 import type { Header } from './parse-header';
-import { parseIrradiationEvent } from './parse-irradiation-event';
 import { readObservers, readPersons } from './participants';
 import { readImages } from './read-images';
 import type { WarningCollector } from './warning-collector';
-
-function parseEvents(
-  root: ContentItem,
-  utcOffset: string | null,
-  warnings: WarningCollector,
-): Report['events'] {
-  const seen = new Set<string>();
-  const events = findContainers(root, 'event').map((item, position) => {
-    warnings.atEvent(position + 1);
-    const event = parseIrradiationEvent(item, utcOffset, warnings);
-    const key = `${event.irradiationEventUid}|${event.plane}`;
-    if (event.irradiationEventUid !== null && seen.has(key))
-      warnings.add('event-duplicate', 'irradiationEventUid');
-    seen.add(key);
-    return event;
-  });
-  warnings.atEvent(null);
-  return events;
-}
 
 /** The first start; offsets, where all events have them, are taken into account. */
 function findStart(events: Report['events']): { startedAt: string; utcOffset: string | null } | null {
@@ -108,17 +88,17 @@ function warnOfGaps(report: Report, warnings: WarningCollector): void {
   if (report.completionFlag === 'PARTIAL') warnings.add('completion-partial', 'completionFlag');
 }
 
-/** The whole report from its header and content tree; everything missing is null with a warning. */
+/** The whole report from its header, content tree and events; everything missing is null with a warning. */
 export function parseDoseReport(
   header: Header,
   root: ContentItem,
+  events: Report['events'],
   warnings: WarningCollector,
 ): { report: Report; warnings: ReportWarning[] } {
   const index = new ItemIndex(root);
   const planes = findContainers(root, 'accumulated').map((item) =>
     parseAccumulated(item, header.utcOffset, warnings),
   );
-  const events = parseEvents(root, header.utcOffset, warnings);
   const start = findStart(events) ?? {
     startedAt: header.studyAt,
     utcOffset: header.studyAt && header.utcOffset,

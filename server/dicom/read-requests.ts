@@ -1,8 +1,7 @@
 import type { ReportRequest } from '../../shared/contract/report';
 import type { Code } from '../../shared/contract/report-parts';
 import type { TextReader } from './character-set';
-import { readText } from './content-tree';
-import { asciiOf, itemsOf, type DicomDataSet } from './read-dicom';
+import { asciiOf, itemsOf, readText, type DicomDataSet } from './read-dicom';
 
 /** The codes of a sequence in the header; an item without a code value is passed over. */
 export function readHeaderCodes(dataSet: DicomDataSet, tag: string, reader: TextReader): Code[] {

@@ -2,14 +2,10 @@ import { classifySopClass } from './classify-sop-class';
 import type { ElementEncoding } from './encoding';
 import { limits } from './limits';
 import { ReadFailure } from './read-failure';
+import type { DataSetVisitor } from './data-set-visitor';
+import { tags } from './tags';
 
 const UNDEFINED_LENGTH = 0xffffffff;
-const ITEM = 0xfffee000;
-const ITEM_END = 0xfffee00d;
-const SEQUENCE_END = 0xfffee0dd;
-const CONTENT_SEQUENCE = 0x0040a730;
-const SOP_CLASS_UID = 0x00080016;
-const PIXEL_DATA = 0x7fe00010;
 const SQ = 0x5351;
 const UN = 0x554e;
 
@@ -29,41 +25,48 @@ interface Frame {
   lastTag: number;
 }
 
+const newFrame = (): Frame => ({
+  isSequence: false,
+  isExplicit: false,
+  hasUndefinedLength: false,
+  bound: 0,
+  lastTag: 0,
+});
+
 function isTypeLetters(vr: number): boolean {
   const first = vr >>> 8;
   const second = vr & 0xff;
   return first >= 0x41 && first <= 0x5a && second >= 0x41 && second <= 0x5a;
 }
 
-/** One walk over a data set; see `scanStructure`. */
-class StructureScan {
+/** One walk over a data set; see `scanDataSet`. */
+class DataSetScan {
   private readonly view: DataView;
   private readonly littleEndian: boolean;
-  private readonly stack: Frame[] = [];
+  /** One for each level, used again and again. */
+  private readonly frames: Frame[] = [];
   private frame: Frame;
+  private depth = 0;
   private position = 0;
   private itemCount = 0;
+  private headerElementCount = 0;
+  private isInHeader = true;
 
   constructor(
     private readonly bytes: Buffer,
     encoding: ElementEncoding,
+    private readonly visitor: DataSetVisitor,
   ) {
     this.view = new DataView(bytes.buffer, bytes.byteOffset, bytes.length);
     this.littleEndian = !encoding.isBigEndian;
-    this.frame = {
-      isSequence: false,
-      isExplicit: encoding.isExplicit,
-      hasUndefinedLength: false,
-      bound: bytes.length,
-      lastTag: 0,
-    };
-    this.stack.push(this.frame);
+    this.frame = { ...newFrame(), isExplicit: encoding.isExplicit, bound: bytes.length };
+    this.frames.push(this.frame);
   }
 
   run(): void {
     while (true) {
       if (!this.frame.hasUndefinedLength && this.position === this.frame.bound) {
-        if (this.stack.length === 1) return;
+        if (this.depth === 0) return;
         this.close();
       } else if (this.frame.isSequence) {
         this.readItemTag();
@@ -94,16 +97,23 @@ class StructureScan {
     const hasUndefinedLength = length === UNDEFINED_LENGTH;
     if (!hasUndefinedLength) this.require(length);
     const bound = hasUndefinedLength ? this.frame.bound : this.position + length;
-    this.frame = { isSequence, isExplicit, hasUndefinedLength, bound, lastTag: 0 };
-    this.stack.push(this.frame);
-    if (this.stack.length > limits.depth * 2) {
+    this.depth += 1;
+    if (this.depth >= limits.depth * 2)
       throw new ReadFailure('limit-depth', `more than ${limits.depth} levels of sequences`);
-    }
+    const frame = (this.frames[this.depth] ??= newFrame());
+    frame.isSequence = isSequence;
+    frame.isExplicit = isExplicit;
+    frame.hasUndefinedLength = hasUndefinedLength;
+    frame.bound = bound;
+    frame.lastTag = 0;
+    this.frame = frame;
   }
 
   private close(): void {
-    this.stack.pop();
-    this.frame = this.stack[this.stack.length - 1] as Frame;
+    if (this.frame.isSequence) this.visitor.closeSequence();
+    else this.visitor.closeItem();
+    this.depth -= 1;
+    this.frame = this.frames[this.depth] as Frame;
   }
 
   private passDelimiter(): void {
@@ -116,13 +126,14 @@ class StructureScan {
     this.require(8);
     const tag = this.readTag();
     const length = this.view.getUint32(this.position + 4, this.littleEndian);
-    if (tag === ITEM) {
+    if (tag === tags.item) {
       this.itemCount += 1;
       if (this.itemCount > limits.items)
         throw new ReadFailure('limit-items', `more than ${limits.items} items`);
       this.position += 8;
       this.open(false, this.frame.isExplicit, length);
-    } else if (tag === SEQUENCE_END && this.frame.hasUndefinedLength) {
+      this.visitor.openItem();
+    } else if (tag === tags.sequenceEnd && this.frame.hasUndefinedLength) {
       this.passDelimiter();
     } else {
       throw this.malformed('a sequence holds something else than items');
@@ -131,8 +142,9 @@ class StructureScan {
 
   private readElement(): void {
     this.require(8);
+    const start = this.position;
     const tag = this.readTag();
-    if (tag === ITEM_END && this.frame.hasUndefinedLength) {
+    if (tag === tags.itemEnd && this.frame.hasUndefinedLength) {
       this.passDelimiter();
       return;
     }
@@ -140,31 +152,44 @@ class StructureScan {
     let type = 0;
     let length: number;
     if (this.frame.isExplicit) {
-      type = this.view.getUint16(this.position + 4, false);
+      type = this.view.getUint16(start + 4, false);
       if (!isTypeLetters(type)) throw this.malformed('an element has no type');
       const isLong = longForm.has(type);
       this.require(isLong ? 12 : 8);
       length = isLong
-        ? this.view.getUint32(this.position + 8, this.littleEndian)
-        : this.view.getUint16(this.position + 6, this.littleEndian);
+        ? this.view.getUint32(start + 8, this.littleEndian)
+        : this.view.getUint16(start + 6, this.littleEndian);
       this.position += isLong ? 12 : 8;
     } else {
-      length = this.view.getUint32(this.position + 4, true);
+      length = this.view.getUint32(start + 4, this.littleEndian);
       this.position += 8;
     }
-    if (tag === PIXEL_DATA) throw new ReadFailure('image', 'has pixel data');
-    if (this.isSequence(type, length)) this.open(true, this.frame.isExplicit && type !== UN, length);
-    else this.passValue(tag, length);
+    if (tag === tags.pixelData) throw new ReadFailure('image', 'has pixel data');
+    if (this.isInHeader) this.countHeaderElement(tag);
+    if (this.isSequence(type, length)) {
+      this.open(true, this.frame.isExplicit && type !== UN, length);
+      this.visitor.openSequence(tag, start);
+    } else {
+      this.passValue(tag, length);
+    }
+  }
+
+  /** What stands before the content is made into objects by the DICOM library, so that it must be few. */
+  private countHeaderElement(tag: number): void {
+    if (this.depth === 0 && tag === tags.contentSequence) this.isInHeader = false;
+    this.headerElementCount += 1;
+    if (this.headerElementCount > limits.headerElements)
+      throw new ReadFailure('limit-items', `more than ${limits.headerElements} elements before the content`);
   }
 
   /**
    * A content sequence whose length is too short spills the elements of its items, which sort before it; so does
-   * an item tag outside a sequence. The DICOM library takes either in silence and loses what follows.
+   * an item tag outside a sequence. A reader that takes either in silence loses what follows.
    */
   private checkOrder(tag: number): void {
     if (tag >>> 16 === 0xfffe) throw this.malformed('an item stands outside a sequence');
     const { lastTag } = this.frame;
-    if (lastTag >= CONTENT_SEQUENCE && tag <= lastTag) throw this.malformed('elements run backwards');
+    if (lastTag >= tags.contentSequence && tag <= lastTag) throw this.malformed('elements run backwards');
     this.frame.lastTag = tag;
   }
 
@@ -173,29 +198,29 @@ class StructureScan {
     // Implicit: without a dictionary, a sequence is what starts with an item (as dicom-parser decides it).
     if (length === UNDEFINED_LENGTH) return true;
     if (length === 0 || this.position + 4 > this.bytes.length) return false;
-    const next = this.view.getUint32(this.position, true);
-    return next === 0xe000fffe || next === 0xe0ddfffe;
+    const next = this.readTag();
+    return next === tags.item || next === tags.sequenceEnd;
   }
 
   private passValue(tag: number, length: number): void {
     if (length === UNDEFINED_LENGTH) throw this.malformed('a plain value has no length');
     this.require(length);
-    if (length > limits.textBytes && this.stack.length > 1) {
+    if (length > limits.textBytes && this.depth > 0) {
       throw new ReadFailure('limit-text-length', `a value of ${length} bytes`);
     }
-    if (tag === SOP_CLASS_UID && this.stack.length === 1) {
+    if (tag === tags.sopClassUid && this.depth === 0) {
       const value = this.bytes.toString('latin1', this.position, this.position + Math.min(length, 128));
       classifySopClass(value.replace(/[\0 ]+$/, ''));
     }
+    this.visitor.value(tag, this.position, this.position + length);
     this.position += length;
   }
 }
 
 /**
- * Walks a data set once, without recursion and without objects for elements, and throws a ReadFailure where the file
- * ends early, its lengths contradict each other, or a limit is passed. The DICOM library is called only after this:
- * it accepts cut files and short lengths in silence and descends by recursion.
+ * Walks a data set once, without recursion and without objects for elements, and tells the visitor what it meets.
+ * Throws a ReadFailure where the file ends early, its lengths contradict each other, or a limit is passed.
  */
-export function scanStructure(bytes: Buffer, encoding: ElementEncoding): void {
-  new StructureScan(bytes, encoding).run();
+export function scanDataSet(bytes: Buffer, encoding: ElementEncoding, visitor: DataSetVisitor): void {
+  new DataSetScan(bytes, encoding, visitor).run();
 }
