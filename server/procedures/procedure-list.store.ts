@@ -93,7 +93,7 @@ const rowColumns = `
             procedure.record_state as "recordState", procedure.missing, procedure.is_withdrawn as "isWithdrawn",
             case when heir.id is not null then json_build_object('id', heir.id, 'caseNumber', heir.case_number) end as "mergedInto",
             procedure.is_manual as "isManual", procedure.is_quarantined as "isInDoubt",
-            not procedure.is_generated as "hasOriginal", procedure.patient_identity_id as "patientIdentityId"`;
+            not (procedure.is_generated or procedure.is_manual) as "hasOriginal", procedure.patient_identity_id as "patientIdentityId"`;
 
 const rowJoins = `       left join procedure_type kind on kind.id = procedure.procedure_type_id
        left join room on room.id = procedure.room_id

@@ -31,5 +31,8 @@ export async function recomputeProcedure(
     timeZone: hospital.timeZone,
     now,
   });
-  await updateProcedure(db, hospital.id, procedure.id, summary);
+  const isTyped = reports.length > 0 && reports.every(({ channel }) => channel === 'manual');
+  // A generated entry has no typed one behind it and stays what it is.
+  const isManual = procedure.isGenerated ? procedure.isManual : isTyped;
+  await updateProcedure(db, hospital.id, procedure.id, { ...summary, isManual });
 }
