@@ -34,24 +34,42 @@ function merge(a: Bin, b: Bin): Bin {
   return { ...a, toS, rate: (ka + kb) / Math.max(toS - a.fromS, 1e-6), kvp };
 }
 
-/** Merges the pair with the smallest gap of its plane and part until at most 64 bins are left. */
+/** A bin and its neighbours of the same plane and part; what the bin and the one before it would span together. */
+type Link = { bin: Bin; before: Link | null; after: Link | null; spanS: number };
+
+const measure = (link: Link) => {
+  link.spanS = link.before === null ? Infinity : link.bin.toS - link.before.bin.fromS;
+};
+
+function linkNeighbours(bins: Bin[]): Link[] {
+  const lastOf = new Map<string, Link>();
+  return bins.map((bin) => {
+    const key = `${bin.plane}${bin.part}`;
+    const link: Link = { bin, before: lastOf.get(key) ?? null, after: null, spanS: Infinity };
+    if (link.before) link.before.after = link;
+    measure(link);
+    lastOf.set(key, link);
+    return link;
+  });
+}
+
+/** Merges the pair of one plane and part that spans least until at most 64 bins are left. */
 function thin(bins: Bin[]): Bin[] {
-  const kept = [...bins];
-  while (kept.length > mostBins) {
-    let best = { index: -1, other: -1, gap: Infinity };
-    const lastOf = new Map<string, number>();
-    kept.forEach((bin, index) => {
-      const key = `${bin.plane}${bin.part}`;
-      const other = lastOf.get(key);
-      const gap = other === undefined ? Infinity : bin.toS - (kept[other] as Bin).fromS;
-      if (other !== undefined && gap < best.gap) best = { index, other, gap };
-      lastOf.set(key, index);
-    });
-    if (best.index < 0) break;
-    kept[best.other] = merge(kept[best.other] as Bin, kept[best.index] as Bin);
-    kept.splice(best.index, 1);
+  const links = linkNeighbours(bins);
+  while (links.length > mostBins) {
+    const least = links.reduce((best, link) => (link.spanS < best.spanS ? link : best));
+    const { before, after } = least;
+    if (before === null) break;
+    before.bin = merge(before.bin, least.bin);
+    before.after = after;
+    measure(before);
+    if (after) {
+      after.before = before;
+      measure(after);
+    }
+    links.splice(links.indexOf(least), 1);
   }
-  return kept;
+  return links.map(({ bin }) => bin);
 }
 
 /** The procedure in one picture: time along, rate up, kVp as shade. Null where no event has a rate. */
