@@ -1,8 +1,13 @@
-import { deflateRawSync, inflateRawSync } from 'node:zlib';
+import { promisify } from 'node:util';
+import { deflateRaw, inflateRaw } from 'node:zlib';
 import type { EntityManager } from 'typeorm';
 import { newId } from '../kernel/new-id';
 import { DoseReport } from './dose-report.entity';
 import { OriginalFile } from './original-file.entity';
+
+/** Off the request's thread: a large file takes some tenths of a second. */
+const deflate = promisify(deflateRaw);
+const inflate = promisify(inflateRaw);
 
 export type Arrival = Pick<DoseReport, 'hospitalId' | 'fileName' | 'channel' | 'receivedById'> & {
   bytes: Buffer;
@@ -16,7 +21,7 @@ export async function keepArrival(
 ): Promise<string> {
   const id = newId();
   const originalFileId = newId();
-  const deflatedBytes = deflateRawSync(bytes, { level: 3 });
+  const deflatedBytes = await deflate(bytes, { level: 3 });
   await db.transaction(async (tx) => {
     await tx.insert(OriginalFile, {
       id: originalFileId,
@@ -42,7 +47,7 @@ export async function readOriginal(
   originalFileId: string,
 ): Promise<Buffer | null> {
   const file = await db.findOneBy(OriginalFile, { hospitalId, id: originalFileId });
-  return file && inflateRawSync(file.deflatedBytes);
+  return file && inflate(file.deflatedBytes);
 }
 
 /** The report that holds a SOP Instance UID now; serialises those who would store the same one. */

@@ -1,3 +1,4 @@
+import { setImmediate } from 'node:timers/promises';
 import type { Report } from '../../shared/contract/report';
 import type { ReportEvent } from '../../shared/contract/report-event';
 import { newId } from '../kernel/new-id';
@@ -56,18 +57,22 @@ function detailsOf(event: ReportEvent): Record<string, unknown> {
   return details;
 }
 
+/** Rows made in one go: some milliseconds, between which other requests are answered. */
+const rowsInOneGo = 250;
+
 /** The events of a report as rows; the same UID and plane twice counts once. */
-export function toEventRows(
+export async function toEventRows(
   report: Report,
   doseReportId: string,
   timeZone: string,
   fallback: Date,
-): NewEvent[] {
+): Promise<NewEvent[]> {
   const readInstant = createInstantReader(timeZone);
   const rows = new Map<string, NewEvent>();
-  report.events.forEach((event, index) => {
+  for (const [index, event] of report.events.entries()) {
+    if (index > 0 && index % rowsInOneGo === 0) await setImmediate();
     const eventKey = keyOf(event, report.sopInstanceUid, index);
-    if (rows.has(eventKey)) return;
+    if (rows.has(eventKey)) continue;
     const localStartedAt = withOffset(event.startedAt, event.utcOffset);
     const { irradiationEventUid, plane, type, protocol, kvpValues, kvpMean, tubeCurrentMa, pulseWidthMs } =
       event;
@@ -111,6 +116,6 @@ export function toEventRows(
       reported: event.reported,
       details: detailsOf(event),
     });
-  });
+  }
   return [...rows.values()];
 }

@@ -41,7 +41,7 @@ export const importDoseReport = (
     const hospital = await findHospital(tx, hospitalId);
     const equipment = await findOrAddEquipment(tx, hospitalId, report.equipment);
     const procedure = await matchProcedure(tx, hospital, report, equipment, arrival.receivedAt);
-    const events = toEventRows(report, arrival.id, hospital.timeZone, procedure.startedAt);
+    const events = await toEventRows(report, arrival.id, hospital.timeZone, procedure.startedAt);
     await settle(tx, arrival.id, {
       outcome: 'stored',
       reasonCode: null,
