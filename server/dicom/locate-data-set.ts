@@ -35,7 +35,7 @@ function readMetaHeader(bytes: Buffer, start: number): MetaHeader {
     const text = bytes
       .toString('latin1', valueStart, Math.min(valueEnd, valueStart + 64))
       .replace(/[\0 ]+$/, '');
-    if (element === 0x0010) meta.transferSyntaxUid = text;
+    if (element === 0x0010) meta.transferSyntaxUid = text || null;
     if (element === 0x0002) meta.sopClassUid = text;
     meta.end = valueEnd;
   }
@@ -83,7 +83,8 @@ export function locateDataSet(bytes: Buffer): LocatedDataSet {
   if (metaStart === null) return locateBareDataSet(bytes);
   const meta = readMetaHeader(bytes, metaStart);
   if (meta.sopClassUid) classifySopClass(meta.sopClassUid);
-  if (meta.end >= bytes.length) throw new ReadFailure('truncated', 'ends after the file meta information');
+  // Less than an element's tag and length: cut inside the meta information or right behind it.
+  if (bytes.length - meta.end < 8) throw new ReadFailure('truncated', 'ends after the file meta information');
   const rest = bytes.subarray(meta.end);
   const warnings: LocatedDataSet['warnings'] = [];
   if (meta.transferSyntaxUid === null) {

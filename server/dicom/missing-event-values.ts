@@ -4,7 +4,6 @@ import type { WarningCollector } from './warning-collector';
 /** What every event should have: without these, figures of the procedure or of the staff suffer. */
 const always = [
   'irradiationEventUid',
-  'plane',
   'startedAt',
   'kermaAreaProductGyCm2',
   'referenceAirKermaGy',
@@ -27,7 +26,8 @@ export function warnOfMissingEventValues(event: ReportEvent, warnings: WarningCo
   for (const field of expected) {
     if (event[field] === null && !(field in event.reported)) warnings.add('value-missing', field);
   }
-  // An unknown type or unreadable time has a warning of its own.
+  // An unknown code has a warning of its own.
+  if (event.plane === null && event.planeCode === null) warnings.add('value-missing', 'plane');
   if (event.type === null && event.typeCode === null) warnings.add('value-missing', 'type');
   if (event.exposureTimeS === null && event.irradiationDurationS === null) {
     warnings.add('value-missing', 'exposureTimeS and irradiationDurationS');
