@@ -1,6 +1,7 @@
 import type { ErrorRequestHandler, RequestHandler } from 'express';
 import { MulterError } from 'multer';
 import type { Problem as ProblemBody } from '../../shared/contract/problem';
+import { isDatabaseAway } from '../db/is-database-away';
 import { Problem } from '../kernel/problem';
 
 /** What libraries throw, in our own words. */
@@ -16,11 +17,11 @@ function toProblem(error: unknown): Problem | null {
           'malformed-request',
           'The upload could not be read: send the files in the field "files".',
         );
-  const { type, code, status } = error as { type?: string; code?: string; status?: number };
+  const { type, status } = error as { type?: string; status?: number };
   if (type === 'entity.too.large') return new Problem('too-large');
   if (type?.startsWith('entity.') || type === 'charset.unsupported') return new Problem('malformed-request');
   if (status === 404) return new Problem('not-found');
-  if (code === 'ECONNREFUSED' || code === '57P01' || code === '57P03') return new Problem('unavailable');
+  if (isDatabaseAway(error)) return new Problem('unavailable');
   return null;
 }
 
