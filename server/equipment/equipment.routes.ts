@@ -4,10 +4,15 @@ import {
   calibrationFactorSchema,
 } from '../../shared/contract/calibration-factor';
 import { idSchema, listOf } from '../../shared/contract/common';
-import { equipmentInputSchema, equipmentSchema, newEquipmentSchema } from '../../shared/contract/equipment';
+import {
+  equipmentChoiceSchema,
+  equipmentInputSchema,
+  equipmentSchema,
+  newEquipmentSchema,
+} from '../../shared/contract/equipment';
 import { route, type Route } from '../http/route';
 import { enterCalibrationFactor, listFactorsOfEquipment } from './enter-calibration-factor';
-import { listEquipment } from './equipment.store';
+import { listEquipment, listEquipmentChoices } from './equipment.store';
 import { addKnownEquipment, saveEquipment } from './save-equipment';
 
 const params = z.object({ id: idSchema });
@@ -20,6 +25,14 @@ export const equipmentRoutes: Route[] = [
     summary: 'The machines, those without a room first',
     response: listOf(equipmentSchema),
     handle: async ({ deps, actor }) => ({ items: await listEquipment(deps.db, actor.hospitalId) }),
+  }),
+  route({
+    method: 'get',
+    path: '/equipment/choices',
+    permission: 'procedure.enter-by-hand',
+    summary: 'The machines by name and room, for those who choose one',
+    response: listOf(equipmentChoiceSchema),
+    handle: async ({ deps, actor }) => ({ items: await listEquipmentChoices(deps.db, actor.hospitalId) }),
   }),
   route({
     method: 'post',

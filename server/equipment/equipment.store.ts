@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm';
-import type { Equipment as EquipmentContract } from '../../shared/contract/equipment';
+import type { Equipment as EquipmentContract, EquipmentChoice } from '../../shared/contract/equipment';
 import { Equipment } from './equipment.entity';
 
 export type EquipmentFields = Pick<
@@ -26,6 +26,23 @@ export const listEquipment = (db: EntityManager, hospitalId: string): Promise<Eq
   db.query(`${selectEquipment} order by machine.room_id is null desc, machine.label collate "und-x-icu"`, [
     hospitalId,
   ]);
+
+/** Machines that may be chosen: those that are in service, or were a month ago. */
+export const listEquipmentChoices = (db: EntityManager, hospitalId: string): Promise<EquipmentChoice[]> =>
+  db.query(
+    `select machine.id, machine.label,
+            case when room.id is not null then json_build_object('id', room.id, 'name', room.code) end as room,
+            coalesce(latest.planes @> '[{"plane": "B"}]', false) as "isBiplane"
+       from equipment machine
+       left join room on room.id = machine.room_id
+       left join lateral (
+         select procedure.planes from procedure where procedure.equipment_id = machine.id
+          order by procedure.started_at desc limit 1) latest on true
+      where machine.hospital_id = $1
+        and (machine.in_service_to is null or machine.in_service_to > current_date - 31)
+      order by room.code is null, room.code collate "und-x-icu", machine.label collate "und-x-icu"`,
+    [hospitalId],
+  );
 
 export async function findEquipment(
   db: EntityManager,

@@ -9,6 +9,7 @@ import { Person } from '../people/person.entity';
 /** What somebody typed from a machine's screen, to the letter; a correction is a further row that names the one it replaces. */
 @Entity()
 @Index(['doseReportId'])
+@Index(['photoId'])
 export class ManualEntry {
   @PrimaryColumn(uuid) id: string;
   @ForeignKey(() => Hospital)
@@ -25,6 +26,8 @@ export class ManualEntry {
   @Column(optionalUuid)
   photoId: string | null;
   @Column(optionalText) comment: string | null;
+  /** Why it replaces the one before. */
+  @Column(optionalText) reason: string | null;
   @ForeignKey(() => ManualEntry)
   @Column(optionalUuid)
   replacesId: string | null;

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { calendarDateSchema, idSchema, requiredText, versionSchema } from './common';
+import { calendarDateSchema, idSchema, namedSchema, requiredText, versionSchema } from './common';
 
 export const tubePositions = ['under-table', 'over-table'] as const;
 
@@ -19,6 +19,14 @@ export const equipmentSchema = z.object({
   version: versionSchema,
 });
 export type Equipment = z.infer<typeof equipmentSchema>;
+
+/** A machine as far as those need it who choose one. */
+export const equipmentChoiceSchema = equipmentSchema.pick({ id: true, label: true }).extend({
+  room: namedSchema.nullable(),
+  /** Its latest procedure had planes A and B. */
+  isBiplane: z.boolean(),
+});
+export type EquipmentChoice = z.infer<typeof equipmentChoiceSchema>;
 
 export const equipmentInputSchema = z.object({
   label: requiredText(120),
