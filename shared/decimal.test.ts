@@ -35,3 +35,18 @@ it.each([
 it('does not scale what is no number', () => {
   expect(scaleDecimal('0,5', 10)).toBeNull();
 });
+
+it.each([
+  ['1e-99999999999999999999999', 60, 0],
+  ['0.0e99999999999999999999999', 10, 0],
+  ['1e308', 10, null],
+])('keeps to finite numbers with %j times %d', (text, factor, value) => {
+  expect(scaleDecimal(text, factor)).toBe(value);
+});
+
+it('passes over a megabyte of digits at once', () => {
+  const startedMs = performance.now();
+  expect(scaleDecimal(`${'1'.repeat(1_000_000)}x`, 60)).toBeNull();
+  expect(scaleDecimal('1'.repeat(1_000_000), 60)).toBeNull();
+  expect(performance.now() - startedMs).toBeLessThan(500);
+});

@@ -1,4 +1,7 @@
-const decimalString = /^[+-]?(\d+\.?\d*|\.\d+)([eE][+-]?\d+)?$/;
+const decimalString = /^[+-]?(?:\d+(?:\.\d*)?|\.\d+)(?:[eE][+-]?\d+)?$/;
+
+/** The standard allows 16 characters, devices write up to about 25; longer is damage or an attack on the reader. */
+const MOST_CHARACTERS = 100;
 
 /**
  * A decimal string (VR DS, PS3.5 6.2) as a number; null unless the whole text is one. Blanks around it are allowed,
@@ -6,7 +9,7 @@ const decimalString = /^[+-]?(\d+\.?\d*|\.\d+)([eE][+-]?\d+)?$/;
  */
 export function parseDecimal(text: string): number | null {
   const trimmed = text.trim();
-  if (!decimalString.test(trimmed)) return null;
+  if (trimmed.length > MOST_CHARACTERS || !decimalString.test(trimmed)) return null;
   const value = Number(trimmed);
   return Number.isFinite(value) ? value : null;
 }
@@ -31,7 +34,13 @@ function splitDecimal(text: string): { digits: string; exponent: number } {
  */
 export function scaleDecimal(text: string, factor: number): number | null {
   const value = parseDecimal(text);
-  if (value === null) return null;
+  // Most numbers stand in the canonical unit; a zero may have any exponent.
+  if (value === null || factor === 1 || value === 0) return value;
+  const scaled = multiplyDecimal(text, value, factor);
+  return Number.isFinite(scaled) ? scaled : null;
+}
+
+function multiplyDecimal(text: string, value: number, factor: number): number {
   const shift = powerOfTen(factor);
   const { digits, exponent } = splitDecimal(text);
   if (shift !== null) return Number(`${digits}e${exponent + shift}`);

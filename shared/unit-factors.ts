@@ -49,6 +49,6 @@ const factorsOfKind = new Map(
  * quantity. Codes are case-sensitive. `unitFactor('kermaAreaProduct', 'uGy.m2')` is 0.01.
  */
 export function unitFactor(kind: QuantityKind, ucumCode: string): number | null {
-  const bare = ucumCode.replace(/\{[^{}]*\}/g, '');
+  const bare = ucumCode.includes('{') ? ucumCode.replace(/\{[^{}]*\}/g, '') : ucumCode;
   return factorsOfKind.get(kind)?.get(bare) ?? null;
 }

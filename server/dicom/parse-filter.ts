@@ -29,8 +29,8 @@ export function parseFilter(item: ContentItem, reported: Reported, warnings: War
   // Filters repeat: their strings stand in the order of the filters, each field's in one list.
   for (const [field, { text, unit }] of Object.entries(own)) {
     const known = reported[`filters.${field}`];
-    if (known) known.text.push(...text);
-    else reported[`filters.${field}`] = { text, unit };
+    if (known) for (const one of text) known.text.push(one);
+    else reported[`filters.${field}`] = { text: [...text], unit };
   }
   return filter;
 }

@@ -11,8 +11,7 @@ function mapFields<Name extends string, Value>(
   read: (name: Name, concept: ConceptName, kind: QuantityKind) => Value,
 ): Record<Name, Value> {
   const values = {} as Record<Name, Value>;
-  for (const name of Object.keys(fields) as Name[])
-    values[name] = read(name, fields[name][0], fields[name][1]);
+  for (const name in fields) values[name] = read(name, fields[name][0], fields[name][1]);
   return values;
 }
 

@@ -20,39 +20,49 @@ function factorOf(
   }
   const factor = unit.scheme.toUpperCase() === 'UCUM' ? unitFactor(kind, unit.value) : null;
   if (factor === null)
-    warnings.add('unit-unknown', `${field} in ${JSON.stringify(unit.value)} (${unit.scheme})`);
+    warnings.add(
+      'unit-unknown',
+      `${field} in ${JSON.stringify(unit.value.slice(0, 40))} (${unit.scheme.slice(0, 40)})`,
+    );
   return factor;
 }
 
+/** Adds the item's readable values to `values`; of a list, the first unreadable one is named. */
 function readItem(
   item: ContentItem,
   field: string,
   kind: QuantityKind,
   warnings: WarningCollector,
-): number[] {
+  values: number[],
+): void {
   const measurement = item.measurement;
   if (!measurement || measurement.text.length === 0) {
-    warnings.add(
-      'value-empty',
-      measurement?.qualifier ? `${field} (${measurement.qualifier.meaning})` : field,
-    );
-    return [];
+    const { qualifier } = measurement ?? {};
+    warnings.add('value-empty', qualifier ? `${field} (${qualifier.meaning})` : field);
+    return;
   }
   if (measurement.text.length > 1) warnings.add('value-list', field);
   const factor = factorOf(item, field, kind, warnings);
-  if (factor === null) return [];
-  return measurement.text.flatMap((text) => {
+  if (factor === null) return;
+  let unreadable: string | null = null;
+  for (const text of measurement.text) {
     const value = scaleDecimal(text, factor);
-    if (value === null) warnings.add('number-unreadable', `${field} ${JSON.stringify(text.slice(0, 40))}`);
-    return value === null ? [] : [value];
-  });
+    if (value === null) unreadable ??= text;
+    else values.push(value);
+  }
+  if (unreadable !== null)
+    warnings.add('number-unreadable', `${field} ${JSON.stringify(unreadable.slice(0, 40))}`);
 }
 
-/** Keeps the strings as written; units of a list that differ from item to item stand joined. */
-function keepReported(items: ContentItem[], field: string, reported: Reported): void {
+/** The strings as written; units of a list that differ from item to item stand joined. */
+function reportedOf(items: ContentItem[]): ReportedQuantity {
+  if (items.length === 1) {
+    const measurement = items[0]?.measurement;
+    return { text: measurement?.text ?? [], unit: measurement?.unit?.value ?? null };
+  }
   const units = new Set(items.map((item) => item.measurement?.unit?.value ?? null));
   const given = [...units].filter((unit) => unit !== null);
-  reported[field] = {
+  return {
     text: items.flatMap((item) => item.measurement?.text ?? []),
     unit: given.length === 0 ? null : given.join(', '),
   };
@@ -66,9 +76,11 @@ export function readQuantities(
   reported: Reported,
   warnings: WarningCollector,
 ): number[] {
-  if (!items) return [];
-  keepReported(items, field, reported);
-  return items.flatMap((item) => readItem(item, field, kind, warnings));
+  const values: number[] = [];
+  if (!items) return values;
+  reported[field] = reportedOf(items);
+  for (const item of items) readItem(item, field, kind, warnings, values);
+  return values;
 }
 
 /** A quantity that stands once, in its canonical unit; null if absent, empty, unreadable or of an unknown unit. */
@@ -81,9 +93,11 @@ export function readQuantity(
 ): number | null {
   const first = items?.[0];
   if (!items || !first) return null;
-  keepReported(items, field, reported);
+  reported[field] = reportedOf(items);
   if (items.length > 1) warnings.add('value-repeated', field);
-  return readItem(first, field, kind, warnings)[0] ?? null;
+  const values: number[] = [];
+  readItem(first, field, kind, warnings, values);
+  return values[0] ?? null;
 }
 
 /** The plain mean of the values given; null for none. */
