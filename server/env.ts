@@ -33,6 +33,18 @@ const variables = z.object({
   DEMO_ANCHOR: calendarDate.optional(),
   TLS_CERT_FILE: optionalText,
   TLS_KEY_FILE: optionalText,
+  REFUSED_KEEP_DAYS: z.coerce
+    .number({ error: 'must be a number of days' })
+    .int('must be a whole number of days')
+    .min(0, 'must be 0 (for ever) or more')
+    .max(36_500, 'must be at most 36500')
+    .default(180),
+  ARCHIVE_UNPACKED_MB: z.coerce
+    .number({ error: 'must be a number of megabytes' })
+    .int('must be a whole number of megabytes')
+    .min(1, 'must be at least 1')
+    .max(2000, 'must be at most 2000')
+    .default(200),
   LOG_LEVEL: z.enum(logLevels, { error: `must be one of ${logLevels.join(', ')}` }).default('info'),
 });
 
@@ -63,6 +75,10 @@ const environmentSchema = variables
       given.TLS_CERT_FILE && given.TLS_KEY_FILE
         ? { certificate: given.TLS_CERT_FILE, key: given.TLS_KEY_FILE }
         : null,
+    /** How long the bytes of refused files are kept; 0: for ever. */
+    refusedKeepDays: given.REFUSED_KEEP_DAYS,
+    /** What all entries of a zip archive together may unpack to. */
+    archiveUnpackedBytes: given.ARCHIVE_UNPACKED_MB * 1_048_576,
     logLevel: given.LOG_LEVEL,
   }));
 

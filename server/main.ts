@@ -58,7 +58,7 @@ export async function startLeeward(options: StartOptions): Promise<{ url: string
     const url = `${isHttps ? 'https' : 'http'}://${env.host.includes(':') ? `[${env.host}]` : env.host}:${env.port}`;
     await offerFirstAdministrator(dataSource.manager, url, report);
     // What a crash left between "received" and its outcome is settled now.
-    await settleReceived(dataSource.manager);
+    await settleReceived(dataSource.manager, systemClock(), env.archiveUnpackedBytes);
     const jobs = await startJobs(poolOf(dataSource), listTasks(dataSource.manager, systemClock), logger);
     return {
       url,

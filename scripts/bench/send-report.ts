@@ -1,4 +1,4 @@
-import { receivedFilesSchema, type ReceivedFile } from '../../shared/contract/dose-report';
+import { receivedFilesSchema, type ReceivedFile } from '../../shared/contract/received-files';
 
 /** Hands one file over as the page does; it is committed when the answer comes. Throws unless it was stored. */
 export async function sendReport(

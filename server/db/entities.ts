@@ -2,6 +2,7 @@ import { Attachment } from '../attachments/attachment.entity';
 import { AuditEntry } from '../audit/audit-entry.entity';
 import { CheckSetting } from '../data-checks/check-setting.entity';
 import { CheckSettlement } from '../data-checks/check-settlement.entity';
+import { ArchivePart, ReceivedArchive } from '../dose-reports/archive.entity';
 import { DoseReport } from '../dose-reports/dose-report.entity';
 import { OriginalFile } from '../dose-reports/original-file.entity';
 import { CalibrationFactor } from '../equipment/calibration-factor.entity';
@@ -34,6 +35,8 @@ export const entities = [
   Garment,
   Level,
   OriginalFile,
+  ReceivedArchive,
+  ArchivePart,
   DoseReport,
   PatientIdentity,
   Procedure,

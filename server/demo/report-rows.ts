@@ -52,6 +52,7 @@ export function toReportRows(
       originalFileId: null,
       fileName: isManual ? 'entered by hand' : `${procedure.accessionNumber}-${part.number}.dcm`,
       archiveName: null,
+      archiveId: null,
       uploadKey: null,
       channel: 'generated',
       receivedById: null,

@@ -17,6 +17,7 @@ import { Equipment } from '../equipment/equipment.entity';
 import { Hospital } from '../hospital/hospital.entity';
 import { Person } from '../people/person.entity';
 import { Procedure } from '../procedures/procedure.entity';
+import { ReceivedArchive } from './archive.entity';
 import { OriginalFile } from './original-file.entity';
 
 /** A report without patient, planes and events, which stand in tables and columns of their own. */
@@ -28,6 +29,8 @@ export type ReportContext = Omit<Report, 'patient' | 'planes' | 'events'>;
 @Index(['hospitalId', 'receivedAt', 'id'])
 @Index(['procedureId'])
 @Index(['equipmentId'])
+@Index(['archiveId'])
+@Index(['originalFileId'])
 @Index(['hospitalId', 'uploadKey'], { unique: true, where: 'upload_key is not null' })
 export class DoseReport {
   @PrimaryColumn(uuid) id: string;
@@ -40,6 +43,9 @@ export class DoseReport {
   @Column(text) fileName: string;
   /** The folder path inside an archive, where it came in one, stands in `fileName`. */
   @Column(optionalText) archiveName: string | null;
+  @ForeignKey(() => ReceivedArchive)
+  @Column(optionalUuid)
+  archiveId: string | null;
   /** The sender's own key for this file: a repeated sending finds the first. */
   @Column(optionalUuid) uploadKey: string | null;
   @Column(text) channel: 'page' | 'generated' | 'manual';

@@ -5,19 +5,21 @@ import { newId } from '../kernel/new-id';
 import { DoseReport } from './dose-report.entity';
 import { OriginalFile } from './original-file.entity';
 
+/** Who sent a file, under which name and key, and in which archive. */
+export type Sending = Pick<DoseReport, 'hospitalId' | 'fileName' | 'channel' | 'receivedById'> &
+  Partial<Pick<DoseReport, 'uploadKey' | 'archiveId' | 'archiveName'>>;
+
 /** Off the request's thread: a large file takes some tenths of a second. */
 const deflate = promisify(deflateRaw);
 const inflate = promisify(inflateRaw);
 
-export type Arrival = Pick<DoseReport, 'hospitalId' | 'fileName' | 'channel' | 'receivedById'> & {
-  bytes: Buffer;
-  sha256: string;
-};
+export type Arrival = Sending & { bytes: Buffer; sha256: string };
 
 /** The first of two commits: the bytes and a row that says they came. Nothing is acknowledged before. */
 export async function keepArrival(
   db: EntityManager,
-  { bytes, sha256, ...arrival }: Arrival,
+  { bytes, sha256, ...sending }: Arrival,
+  outcome: Partial<DoseReport> = { outcome: 'received' },
 ): Promise<string> {
   const id = newId();
   const originalFileId = newId();
@@ -25,15 +27,56 @@ export async function keepArrival(
   await db.transaction(async (tx) => {
     await tx.insert(OriginalFile, {
       id: originalFileId,
-      hospitalId: arrival.hospitalId,
+      hospitalId: sending.hospitalId,
       sha256,
       byteCount: bytes.length,
       deflatedBytes,
     });
-    await tx.insert(DoseReport, { ...arrival, id, originalFileId, outcome: 'received' });
+    await tx.insert(DoseReport, { ...sending, ...(outcome as object), id, originalFileId });
   });
   return id;
 }
+
+/** A row for what came without bytes of its own, or with bytes that are kept already. */
+export async function noteArrival(
+  db: EntityManager,
+  sending: Sending,
+  outcome: Partial<DoseReport>,
+): Promise<string> {
+  const id = newId();
+  await db.insert(DoseReport, { ...sending, ...(outcome as object), id, settledAt: new Date() });
+  return id;
+}
+
+export const findByUploadKey = (
+  db: EntityManager,
+  hospitalId: string,
+  uploadKey: string,
+): Promise<DoseReport | null> => db.findOneBy(DoseReport, { hospitalId, uploadKey });
+
+/** A stored report of exactly these bytes. */
+export async function findStoredBytes(
+  db: EntityManager,
+  hospitalId: string,
+  sha256: string,
+): Promise<DoseReport | null> {
+  const [found]: { id: string }[] = await db.query(
+    `select report.id from original_file file join dose_report report on report.original_file_id = file.id
+      where file.hospital_id = $1 and file.sha256 = $2 and report."outcome" = 'stored' limit 1`,
+    [hospitalId, sha256],
+  );
+  return found ? db.findOneBy(DoseReport, { hospitalId, id: found.id }) : null;
+}
+
+/** Hash of the bytes of a kept file. */
+export async function findSha256(db: EntityManager, originalFileId: string): Promise<string | null> {
+  const file = await db.findOne(OriginalFile, { where: { id: originalFileId }, select: { sha256: true } });
+  return file?.sha256 ?? null;
+}
+
+/** Whether a row was refused because its upload key is taken. */
+export const isUploadKeyTaken = (error: unknown): boolean =>
+  /upload_key$/.test(String((error as { constraint?: string }).constraint ?? ''));
 
 export const findDoseReport = (
   db: EntityManager,
@@ -65,6 +108,22 @@ export async function findStoredInstance(
 export async function settle(db: EntityManager, id: string, outcome: Partial<DoseReport>): Promise<void> {
   await db.update(DoseReport, { id }, { ...(outcome as object), settledAt: new Date() });
 }
+
+/** Writes columns of a report that has its outcome already. */
+export async function changeReport(
+  db: EntityManager,
+  id: string,
+  changes: Partial<DoseReport>,
+): Promise<void> {
+  await db.update(DoseReport, { id }, changes as object);
+}
+
+/** The report stored under a SOP Instance UID, without keeping others from storing it. */
+export const findInstance = (
+  db: EntityManager,
+  hospitalId: string,
+  sopInstanceUid: string,
+): Promise<DoseReport | null> => db.findOneBy(DoseReport, { hospitalId, sopInstanceUid, outcome: 'stored' });
 
 export const listReportsOf = (
   db: EntityManager,

@@ -20,7 +20,7 @@ export type Imported =
   { outcome: 'stored' | 'duplicate'; procedureId: string | null } | { outcome: 'held'; code: ReasonCode };
 
 /** What a report says beside patient, planes and events. */
-function contextOf({ patient: _, planes: __, events: ___, ...context }: Report): ReportContext {
+export function contextOf({ patient: _, planes: __, events: ___, ...context }: Report): ReportContext {
   return context;
 }
 
@@ -82,6 +82,8 @@ async function settleAgainst(
   contentHash: string,
   sopInstanceUid: string,
 ): Promise<Imported> {
+  // A second reading of the same row, after a crash or beside the first: the report is not its own duplicate.
+  if (stored.id === arrival.id) return { outcome: 'stored', procedureId: stored.procedureId };
   if (stored.contentHash === contentHash) {
     await settle(tx, arrival.id, {
       outcome: 'duplicate',

@@ -1,10 +1,13 @@
-import type { ReceivedFile } from '../../shared/contract/dose-report';
+import type { ReceivedFile } from '../../shared/contract/received-files';
 import { sentenceOfReason, type ReasonCode, type UnreadOutcome } from '../../shared/contract/outcome';
 import type { Db } from '../db/db';
+import { isDatabaseAway } from '../db/is-database-away';
+import { readerVersion } from '../dicom/reader-version';
 import type { DoseReport } from './dose-report.entity';
 import { settle } from './dose-report.store';
 import { importDoseReport, type ReadReport } from './import-dose-report';
 import { readInBounds } from './read-in-bounds';
+import { reasonInWords } from './reason-in-words';
 
 /** Reads kept bytes and brings the row to its outcome. */
 export async function settleArrival(
@@ -14,10 +17,12 @@ export async function settleArrival(
   now: Date,
 ): Promise<ReceivedFile> {
   const read = await readInBounds(bytes);
-  if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, inWords(read.reason));
+  if (read.outcome !== 'read') return giveUp(db, arrival, read.outcome, inWords(read.reason, bytes));
   try {
     return await store(db, arrival, read, now);
   } catch (error) {
+    // Nothing is wrong with the file: it stays as received and is taken up again when the database is back.
+    if (isDatabaseAway(error)) throw error;
     // One file's failure is told as its outcome: the files after it, or a start, must not stop for it.
     const { name, code } = error as Error & { code?: string };
     console.error(`Dose report ${arrival.id} is held: storing it failed with ${code ?? name}`);
@@ -25,10 +30,9 @@ export async function settleArrival(
   }
 }
 
-/** The sentence for a person, then what the reader stumbled over, for whoever is asked for help. */
-const inWords = ({ code, detail }: { code: ReasonCode; detail: string }) => ({
+const inWords = ({ code, detail }: { code: ReasonCode; detail: string }, bytes: Buffer) => ({
   code,
-  detail: `${sentenceOfReason(code)} (${detail})`,
+  detail: reasonInWords(code, detail, bytes),
 });
 
 const reasonOf = (code: ReasonCode) => ({ code, detail: sentenceOfReason(code) });
@@ -50,6 +54,11 @@ async function giveUp(
   outcome: UnreadOutcome,
   reason: { code: string; detail: string },
 ): Promise<ReceivedFile> {
-  await settle(db, arrival.id, { outcome, reasonCode: reason.code, reasonDetail: reason.detail });
+  await settle(db, arrival.id, {
+    outcome,
+    reasonCode: reason.code,
+    reasonDetail: reason.detail,
+    readerVersion,
+  });
   return { fileName: arrival.fileName, outcome, doseReportId: arrival.id, procedureId: null, reason };
 }

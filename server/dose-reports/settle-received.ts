@@ -1,14 +1,23 @@
 import type { Db } from '../db/db';
+import { runArchive } from './archive-runs';
+import { archiveLimits } from './archive-limits';
+import { listUnsettledArchives } from './archive.store';
 import { listUnsettled, readOriginal } from './dose-report.store';
 import { settleArrival } from './settle-arrival';
 
-/** Takes up again what a crash left between "received" and its outcome. */
-export async function settleReceived(db: Db, now: Date = new Date()): Promise<number> {
+/** Takes up again what a crash left between "received" and its outcome: files first, then archives half unpacked. */
+export async function settleReceived(
+  db: Db,
+  now: Date = new Date(),
+  unpackedBytes: number = archiveLimits.unpackedBytes,
+): Promise<number> {
   const arrivals = await listUnsettled(db);
   for (const arrival of arrivals) {
     const bytes =
       arrival.originalFileId && (await readOriginal(db, arrival.hospitalId, arrival.originalFileId));
     if (bytes) await settleArrival(db, arrival, bytes, now);
   }
-  return arrivals.length;
+  const archives = await listUnsettledArchives(db);
+  for (const archive of archives) await runArchive(db, archive, null, unpackedBytes, now);
+  return arrivals.length + archives.length;
 }

@@ -1,3 +1,5 @@
+import { archiveReasons } from './archive-reasons';
+
 /** Refused: a better reader cannot help. Held: may become readable, or waits for a decision. */
 export type UnreadOutcome = 'refused' | 'held';
 
@@ -9,6 +11,7 @@ interface ReasonEntry {
 
 /** Every reason why a received file gives no dose report. The codes are stable: scripts rely on them. */
 export const reasons = {
+  ...archiveReasons,
   empty: {
     outcome: 'refused',
     sentence: 'The file is empty. Its name was noted. Export the dose report again and send it once more.',

@@ -1,5 +1,5 @@
 import { useMutation } from '@tanstack/react-query';
-import { receivedFileSchema } from '../../../shared/contract/dose-report';
+import { receivedFileSchema } from '../../../shared/contract/received-files';
 import { request } from '../../lib/api';
 import { doseReportsKey } from './queries';
 

@@ -1,4 +1,4 @@
-import type { Outcome } from '../../../shared/contract/dose-report';
+import type { Outcome } from '../../../shared/contract/received-files';
 import type { Upload } from './upload-store';
 
 export const outcomeNames: Record<Outcome, string> = {

@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import type { ReceivedFile } from '../../../shared/contract/dose-report';
+import type { ReceivedFile } from '../../../shared/contract/received-files';
 import { createUploadStore } from './upload-store';
 
 const files = (count: number) => Array.from({ length: count }, (_, index) => new File(['x'], `${index}.dcm`));

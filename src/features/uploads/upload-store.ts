@@ -1,4 +1,4 @@
-import { receivedFilesSchema, type ReceivedFile } from '../../../shared/contract/dose-report';
+import { receivedFilesSchema, type ReceivedFile } from '../../../shared/contract/received-files';
 import { ApiProblem } from '../../lib/api-problem';
 import { upload } from '../../lib/api';
 
