@@ -23,6 +23,7 @@ export default defineConfig({
         },
       },
       { test: { name: 'api', include: ['tests/api/**/*.test.ts'], testTimeout: 30_000, ...needsDatabase } },
+      { test: { name: 'crash', include: ['tests/crash/**/*.test.ts'], testTimeout: 600_000 } },
       {
         test: {
           name: 'browser',

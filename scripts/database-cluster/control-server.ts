@@ -25,11 +25,14 @@ function prepareLog(directory: string): string {
   return log;
 }
 
-/** Starts the server on a free port and returns the port when it accepts connections. */
-export async function startServer({ programs, directory, owner, mode }: Server): Promise<number> {
+/** Starts the server, on a free port unless one is wanted, and returns the port when it accepts connections. */
+export async function startServer(
+  { programs, directory, owner, mode }: Server,
+  wantedPort: number | null = null,
+): Promise<number> {
   const log = prepareLog(directory);
   for (let attempt = 1; ; attempt += 1) {
-    const port = await findFreePort();
+    const port = wantedPort ?? (await findFreePort());
     const options = [`-p ${port}`, ...listSettings(mode).map((setting) => `-c ${setting}`)].join(' ');
     const { code, output } = await runProgram(
       join(programs, 'pg_ctl'),

@@ -71,6 +71,16 @@ afterEach(async () => {
 
 // Making a durable cluster waits for the disk: up to twenty seconds on a machine that is busy writing.
 describe('startCluster', { timeout: 120_000 }, () => {
+  it('starts a killed server again, where it was, with everything that was committed', async () => {
+    const { url } = await start();
+    await query(url, 'create table kept (n integer)');
+    await query(url, 'insert into kept values (42)');
+    process.kill(readServerPid(), 'SIGKILL');
+    const findKept = () => query(url, 'select n from kept').catch(() => null);
+    await expect.poll(findKept, { timeout: 60_000, interval: 250 }).toBeNull();
+    await expect.poll(findKept, { timeout: 60_000, interval: 250 }).toEqual([{ n: 42 }]);
+  });
+
   it('joins the server that a killed process left running, then stops it', async () => {
     await kill(await startElsewhere());
     const serverPid = readServerPid();

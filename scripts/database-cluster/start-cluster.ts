@@ -7,6 +7,7 @@ import { stopServer, type Server } from './control-server';
 import { chooseDataFolder, makeThrowAwayFolder } from './data-folder';
 import { holdLock } from './hold-lock';
 import { hasCluster, initialiseCluster } from './initialise-cluster';
+import { keepRunning } from './keep-running';
 import { findRunningPort } from './postmaster-file';
 import { reachServer } from './reach-server';
 import { requirePostgres } from './require-postgres';
@@ -69,8 +70,14 @@ export async function startCluster(request: ClusterRequest): Promise<Cluster> {
     registerUser(folder);
     const server = await prepareServer(folder, request);
     const url = await reachServer(server, folder);
+    const endWatch =
+      mode === 'durable' ? keepRunning(server, folder, Number(new URL(url).port), report) : async () => {};
     let leaving: Promise<void> | null = null;
-    return { url, stop: () => (leaving ??= leaveCluster(folder, server)) };
+    const leave = async () => {
+      await endWatch();
+      await leaveCluster(folder, server);
+    };
+    return { url, stop: () => (leaving ??= leave()) };
   } catch (error) {
     unregisterUser(folder);
     if (mode === 'throw-away') rmSync(folder, { recursive: true, force: true });
