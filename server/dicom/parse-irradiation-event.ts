@@ -27,11 +27,20 @@ function readContrastAgents(index: ItemIndex): ContrastAgent[] {
     .flatMap(({ code, text }) => (code === null && text === null ? [] : [{ code, text }]));
 }
 
-function readStart(index: ItemIndex, defaultOffset: string | null, warnings: WarningCollector) {
+function readStart(
+  index: ItemIndex,
+  defaultOffset: string | null,
+  reported: Reported,
+  warnings: WarningCollector,
+) {
   const text = index.text('startedAt');
   if (text === null) return null;
   const parsed = parseDateTime(text, defaultOffset);
-  if (!parsed) warnings.add('date-time-unreadable', `startedAt ${JSON.stringify(text.slice(0, 40))}`);
+  if (!parsed) {
+    // What could not be read is kept as written.
+    reported['startedAt'] = { text: [text], unit: null };
+    warnings.add('date-time-unreadable', `startedAt ${JSON.stringify(text.slice(0, 40))}`);
+  }
   if (parsed?.isImprecise) warnings.add('date-time-imprecise', 'startedAt');
   return parsed;
 }
@@ -87,7 +96,7 @@ export function parseIrradiationEvent(
 ): ReportEvent {
   const index = new ItemIndex(item);
   const reported: Reported = {};
-  const start = readStart(index, defaultOffset, warnings);
+  const start = readStart(index, defaultOffset, reported, warnings);
   const quantities = readQuantityFields(index, eventQuantities, reported, warnings);
   const lists = readQuantityLists(index, eventQuantityLists, reported, warnings);
   const event: ReportEvent = {
