@@ -1,4 +1,4 @@
-import type { DemoProcedure } from './demo-types';
+import type { DemoPlaneTotals, DemoProcedure } from './demo-types';
 import { createRandom } from './random';
 
 function multiplyKermaAreaProduct(procedure: DemoProcedure, factor: number): DemoProcedure {
@@ -41,8 +41,22 @@ function enterByHand(procedure: DemoProcedure): DemoProcedure {
   };
 }
 
-/** What the planted fault does to the procedure's data; faults of the record's life change nothing here. */
-export function applyDefect(procedure: DemoProcedure): DemoProcedure {
+/** The counter of K a,r went on from what it showed at the end of the machine's procedure before. */
+function leaveKermaStanding(procedure: DemoProcedure, before: readonly DemoPlaneTotals[]): DemoProcedure {
+  return {
+    ...procedure,
+    planes: procedure.planes.map((plane) => {
+      const shownGy = before.find((one) => one.plane === plane.plane)?.referenceAirKermaGy ?? 0;
+      return { ...plane, referenceAirKermaGy: Number((plane.referenceAirKermaGy + shownGy).toPrecision(6)) };
+    }),
+  };
+}
+
+/**
+ * What the planted fault does to the procedure's data; faults of the record's life change nothing here. `before` are
+ * the totals that the same machine displayed at its procedure before.
+ */
+export function applyDefect(procedure: DemoProcedure, before: readonly DemoPlaneTotals[]): DemoProcedure {
   const random = createRandom('defect', procedure.studyInstanceUid);
   switch (procedure.defect) {
     case 'missing-weight':
@@ -55,16 +69,8 @@ export function applyDefect(procedure: DemoProcedure): DemoProcedure {
       return enterByHand(procedure);
     case 'no-report':
       return { ...procedure, planes: [], events: [] };
-    case 'kerma-not-reset': {
-      const previousGy = (procedure.type.referenceAirKermaMGy.median / 1000) * random.between(0.5, 1.5);
-      return {
-        ...procedure,
-        planes: procedure.planes.map((plane) => ({
-          ...plane,
-          referenceAirKermaGy: Number((plane.referenceAirKermaGy + previousGy).toPrecision(6)),
-        })),
-      };
-    }
+    case 'kerma-not-reset':
+      return leaveKermaStanding(procedure, before);
     default:
       return procedure;
   }

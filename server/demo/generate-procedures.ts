@@ -1,5 +1,5 @@
 import { DateTime } from 'luxon';
-import type { DemoProcedure } from './demo-types';
+import type { DemoPlaneTotals, DemoProcedure } from './demo-types';
 import { applyDefect } from './apply-defect';
 import { bookProcedures } from './book-procedures';
 import { startOfAnchorDay } from './calendar';
@@ -63,13 +63,15 @@ export function* generateProcedures(anchor: Date): Generator<DemoProcedure, void
       proceduresPerYear: findProcedureType(booking.typeKey).proceduresPerYear,
     })),
   );
+  /** Machine → what it displayed last. */
+  const displayed = new Map<string, DemoPlaneTotals[]>();
   for (const [index, { placed, start }] of planned.entries()) {
     const { booking } = placed;
     const type = findProcedureType(booking.typeKey);
     const equipment = findEquipment(type.room, booking.month);
     const studyInstanceUid = makeStudyUid(booking.typeKey, booking.index);
     const events = makeEvents({ type, equipment, placed, studyInstanceUid });
-    yield applyDefect({
+    const sound: DemoProcedure = {
       number: index + 1,
       type,
       room: type.room,
@@ -91,6 +93,9 @@ export function* generateProcedures(anchor: Date): Generator<DemoProcedure, void
       events,
       staff: staffInRoom(type, booking),
       defect: defects[index] ?? null,
-    });
+    };
+    const procedure = applyDefect(sound, displayed.get(equipment.key) ?? []);
+    if (procedure.planes.length > 0) displayed.set(equipment.key, procedure.planes);
+    yield procedure;
   }
 }

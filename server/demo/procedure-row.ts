@@ -1,4 +1,5 @@
 import type { MissingPart } from '../../shared/contract/record';
+import { plainChecking } from '../data-checks/check-data';
 import type { DoseReport } from '../dose-reports/dose-report.entity';
 import type { CalibrationFactor } from '../equipment/calibration-factor.entity';
 import type { Level } from '../levels/level.entity';
@@ -6,6 +7,7 @@ import type { IrradiationEvent } from '../procedures/irradiation-event.entity';
 import { patientKeyOf } from '../procedures/patient-identity.store';
 import type { Procedure } from '../procedures/procedure.entity';
 import { summariseProcedure } from '../procedures/summarise-procedure';
+import type { CheckMemory } from './check-memory';
 import type { DemoProcedure } from './demo-types';
 import { demoHospital } from './hospital';
 import type { EstimateRegisters } from './estimate-rows';
@@ -20,6 +22,7 @@ export interface DemoContext {
   levels: readonly Level[];
   equipmentLabels: Map<string, string>;
   registers: EstimateRegisters;
+  checkMemory: CheckMemory;
 }
 
 export const isRecordUnfinished = (procedure: DemoProcedure): boolean =>
@@ -96,7 +99,11 @@ export function toProcedureRow(
   const receivedAt = arrivalOf(procedure);
   const kind = { fieldsOverlap: null, procedureClass: 'clinical', deviceClass: 'fluoroscopy' } as const;
   const summary = summariseProcedure({
-    procedure: kind,
+    procedure: {
+      ...kind,
+      patientHeightM: procedure.patient.heightM,
+      patientWeightKg: procedure.patient.weightKg,
+    },
     reports: rows.reports.filter((report) => report.outcome === 'stored'),
     events: [...rows.events],
     equipmentLabels: context.equipmentLabels,
@@ -106,8 +113,12 @@ export function toProcedureRow(
     receivedAt,
     timeZone: demoHospital.timeZone,
     now: receivedAt,
+    checking: {
+      ...plainChecking,
+      context: context.checkMemory.contextOf(idOf(ids.types, procedure.type.key), equipmentId),
+    },
   });
-  return {
+  const row: Procedure = {
     ...parts,
     hospitalId: ids.hospitalId,
     studyInstanceUid: procedure.studyInstanceUid,
@@ -126,4 +137,6 @@ export function toProcedureRow(
     version: 1,
     createdAt: receivedAt,
   };
+  context.checkMemory.add(row);
+  return row;
 }

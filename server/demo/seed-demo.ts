@@ -3,6 +3,7 @@ import { hashPassword, isPasswordRight } from '../people/password';
 import { readRegisters } from '../staff-exposure/registers.store';
 import { findSignIn, setPassword } from '../people/account.store';
 import type { Db } from '../db/db';
+import { rememberProcedures } from './check-memory';
 import {
   analyseTables,
   findFinishedDemo,
@@ -68,6 +69,7 @@ async function writeDemo(
     levels: await listAllLevels(db, ids.hospitalId),
     equipmentLabels: await labelMachines(db, ids.hospitalId),
     registers: await readRegisters(db, ids.hospitalId),
+    checkMemory: rememberProcedures(),
   };
   const newest: DemoProcedure[] = [];
   await seedGenerated(

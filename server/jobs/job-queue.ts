@@ -1,4 +1,4 @@
-import { Logger, parseCronItems, run, runMigrations, runOnce, type TaskList } from 'graphile-worker';
+import { Logger, parseCrontab, run, runMigrations, runOnce, type TaskList } from 'graphile-worker';
 import type { Pool } from 'pg';
 import type { Logger as AppLogger } from 'pino';
 
@@ -8,6 +8,12 @@ const loggerFor = (logger: AppLogger) =>
     if (level === 'error') logger.error({ part: 'jobs' }, message);
     if (level === 'warning') logger.warn({ part: 'jobs' }, message);
   });
+
+/** Minute, hour, day, month, weekday (UTC), and the job. */
+const timetable = `
+*/5 * * * * settle-received
+17 3 * * * purge-refused
+`;
 
 const silent = new Logger(() => () => {});
 
@@ -26,7 +32,7 @@ export async function startJobs(
     concurrency: 1,
     noHandleSignals: true,
     logger: loggerFor(logger),
-    parsedCronItems: parseCronItems([]),
+    parsedCronItems: parseCrontab(timetable),
   });
   return { stop: () => runner.stop() };
 }

@@ -3,7 +3,9 @@ import type { EntityManager } from 'typeorm';
 /** Work that goes on after the answer, by name, with what it needs to know. */
 export type Jobs = {
   'recompute-machine': { hospitalId: string; equipmentId: string; day: string; reason: string };
+  'recompute-findings': { hospitalId: string; ruleCode: string };
   'purge-refused': Record<string, never>;
+  'settle-received': Record<string, never>;
 };
 
 /**

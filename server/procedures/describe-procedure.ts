@@ -1,15 +1,15 @@
 import type { Procedure as ProcedureContract } from '../../shared/contract/procedure';
 import { scopeOf } from '../../shared/permissions';
+import { describeChecks } from '../data-checks/describe-checks';
 import { listHistory } from '../audit/audit.store';
 import type { Db } from '../db/db';
-import { listReportsOf } from '../dose-reports/dose-report.store';
 import type { Actor } from '../kernel/actor';
 import { listLevels } from '../levels/level.store';
 import { listQuartiles } from './comparison.store';
 import { describeRecord } from './describe-record';
+import { describeReports } from './describe-reports';
 import { findRow } from './procedure-list.store';
 import type { Procedure } from './procedure.entity';
-import { findCountingReport } from './total-planes';
 
 /** One procedure as its page shows it. Other people's names in the record and the history are for those who see all. */
 export async function describeProcedure(
@@ -20,13 +20,6 @@ export async function describeProcedure(
   const { hospitalId, id } = procedure;
   const seesAll = scopeOf(actor, 'procedure.read') === 'all';
   const row = await findRow(db, hospitalId, id);
-  const reports = await listReportsOf(db, hospitalId, id);
-  const counting = new Set(
-    [...new Set(reports.map((report) => report.equipmentId))].flatMap(
-      (equipmentId) =>
-        findCountingReport(reports.filter((report) => report.equipmentId === equipmentId))?.id ?? [],
-    ),
-  );
   const levels = await listLevels(db, hospitalId, procedure.procedureTypeId, procedure.localDate);
   const record = await describeRecord(db, procedure);
   return {
@@ -40,14 +33,9 @@ export async function describeProcedure(
         levels.find((level) => level.quantity === quartiles.quantity && level.strength === 'notify')?.value ??
         null,
     })),
-    dataChecks: procedure.dataChecks,
-    reports: reports.map((report) => ({
-      id: report.id,
-      receivedAt: report.receivedAt.toISOString(),
-      counts: counting.has(report.id),
-      hasOriginal: report.originalFileId !== null,
-      isGenerated: report.channel === 'generated',
-    })),
+    settledFigures: procedure.settledFigures,
+    dataChecks: await describeChecks(db, actor, procedure, seesAll),
+    reports: await describeReports(db, procedure),
     record: seesAll
       ? record
       : { ...record, presences: [], people: record.people.filter((person) => person.id === actor.id) },

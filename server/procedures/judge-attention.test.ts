@@ -24,7 +24,7 @@ const together = (
   isUpperBound: false,
   isCorrected: corrected !== null,
 });
-const levelOf = (figures: Together, of = input()) => judgeAttention(of, figures, []).attentionLevel;
+const levelOf = (figures: Together, of = input()) => judgeAttention(of, figures, [], null).attentionLevel;
 
 // Own acceptance check: 4,999, 5,000 and 5,001 mGy against a level of 5 Gy: no, yes, yes.
 test.each([
@@ -49,8 +49,31 @@ test('fluoroscopy time counts only where both kerma figures are missing', () => 
 
 test('a failed data check is a note and never silences a level', () => {
   const failed = [{ code: 'mean-field-area', result: 'failed' as const, detail: 'a unit slip?' }];
-  expect(judgeAttention(input(), together(6), failed)).toMatchObject({ attentionLevel: 'act' });
-  expect(judgeAttention(input(), together(1), failed)).toMatchObject({ attentionLevel: 'note' });
+  const reached = judgeAttention(input(), together(6), failed, null);
+  expect(reached.attentionLevel).toBe('act');
+  expect(reached.attentionReasons[0]?.detail).toContain('5000 mGy; value in doubt');
+  expect(judgeAttention(input(), together(1), failed, null).attentionLevel).toBe('note');
+});
+
+test('a settled finding asks for nobody any more', () => {
+  const settled = [
+    { code: 'mean-field-area', result: 'failed' as const, detail: 'a unit slip?', settlementId: 'some id' },
+  ];
+  expect(judgeAttention(input(), together(1), settled, null).attentionLevel).toBeNull();
+  const reached = judgeAttention(input(), together(6), settled, null);
+  expect(reached.attentionReasons[0]?.detail).not.toContain('in doubt');
+});
+
+test('once a physicist typed the total in place of a wrong one, it alone decides', () => {
+  const typed = (referenceAirKermaGy: number) => ({
+    referenceAirKermaGy,
+    kermaAreaProductGyCm2: null,
+    fluoroscopyTimeS: null,
+  });
+  expect(judgeAttention(input(), together(350), [], typed(0.35)).attentionLevel).toBeNull();
+  const reached = judgeAttention(input(), together(0.006, 0.007), [], typed(6));
+  expect(reached.attentionLevel).toBe('act');
+  expect(reached.attentionReasons[0]?.detail).toContain('6000 mGy as corrected by the physicist');
 });
 
 test('a phantom exposure calls for nobody', () => {

@@ -28,12 +28,16 @@ const kinds: Record<ProcedureFilter['kind'], string> = {
   withdrawn: 'procedure.is_withdrawn',
 };
 
+/** A hard finding waits for a decision; without one a quarantined procedure was left out for good. */
+const hasDoubt = `jsonb_path_exists(procedure.data_checks, '$[*] ? (@.result == "failed" && !(@.settlementId != null))')`;
+
 const attentions: Record<ProcedureFilter['attention'], string> = {
   any: 'true',
   flagged: 'procedure.attention_level is not null',
   note: `procedure.attention_level = 'note'`,
   notify: `procedure.attention_level = 'notify'`,
   act: `procedure.attention_level = 'act'`,
+  'in-doubt': `(procedure.is_quarantined and ${hasDoubt})`,
 };
 
 export type ListScope = {
@@ -92,7 +96,9 @@ const rowColumns = `
               json_build_object('level', procedure.attention_level, 'reasons', procedure.attention_reasons) end as attention,
             procedure.record_state as "recordState", procedure.missing, procedure.is_withdrawn as "isWithdrawn",
             case when heir.id is not null then json_build_object('id', heir.id, 'caseNumber', heir.case_number) end as "mergedInto",
-            procedure.is_manual as "isManual", procedure.is_quarantined as "isInDoubt",
+            procedure.is_manual as "isManual", 
+            (procedure.is_quarantined and ${hasDoubt}) as "isInDoubt",
+            (procedure.is_quarantined and not ${hasDoubt}) as "isLeftOut",
             not (procedure.is_generated or procedure.is_manual) as "hasOriginal", procedure.patient_identity_id as "patientIdentityId"`;
 
 const rowJoins = `       left join procedure_type kind on kind.id = procedure.procedure_type_id

@@ -1,4 +1,5 @@
 import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
+import type { SettledFigures } from '../../shared/contract/data-check';
 import type {
   AttentionLevel,
   Procedure as ProcedureContract,
@@ -24,6 +25,7 @@ import {
   version,
   yesNo,
 } from '../db/columns';
+import type { StoredCheck } from '../data-checks/check-data';
 import { Equipment } from '../equipment/equipment.entity';
 import { Hospital } from '../hospital/hospital.entity';
 import { Person } from '../people/person.entity';
@@ -45,6 +47,7 @@ import { PatientIdentity } from './patient-identity.entity';
 @Index(['equipmentId', 'startedAt'])
 // Partial, with further columns, which a decorator cannot say: made by its migration.
 @Index('ix_procedure_exposure', { synchronize: false })
+@Index(['hospitalId', 'startedAt'], { where: 'attention_level is not null' })
 export class Procedure {
   @PrimaryColumn(uuid) id: string;
   @ForeignKey(() => Hospital)
@@ -91,7 +94,9 @@ export class Procedure {
   @Column(count) eventCount: number;
   @Column(optionalDocument) strip: Strip | null;
   @Column(documents) planes: ProcedureContract['planes'];
-  @Column(documents) dataChecks: ProcedureContract['dataChecks'];
+  @Column(documents) dataChecks: StoredCheck[];
+  /** Typed by a physicist in place of reported totals, which were wrong. */
+  @Column(optionalDocument) settledFigures: SettledFigures | null;
   /** A value failed a hard check: outside every statistic until a physicist settles it. */
   @Column(yesNo) isQuarantined: boolean;
   @Column(optionalText) attentionLevel: AttentionLevel | null;

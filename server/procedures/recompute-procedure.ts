@@ -1,8 +1,10 @@
+import { loadChecking } from '../data-checks/load-checking';
 import { labelsOf, listFactorsOf } from '../equipment/factors-in-use.store';
 import type { Db } from '../db/db';
 import { listReportsOf } from '../dose-reports/dose-report.store';
 import type { Hospital } from '../hospital/hospital.entity';
 import { listLevels } from '../levels/level.store';
+import { findStudyTime } from './find-study-time';
 import { listEventFigures } from './irradiation-event.store';
 import { updateProcedure } from './procedure.store';
 import type { Procedure } from './procedure.entity';
@@ -26,10 +28,14 @@ export async function recomputeProcedure(
     equipmentLabels: await labelsOf(db, hospital.id, equipmentIds),
     factors: await listFactorsOf(db, hospital.id, equipmentIds),
     levels: await listLevels(db, hospital.id, procedure.procedureTypeId, procedure.localDate),
-    studyStartedAt: studyStartedAt ?? (procedure.timeBasis === 'study' ? procedure.localStartedAt : null),
+    studyStartedAt:
+      findStudyTime(reports, hospital.timeZone) ??
+      studyStartedAt ??
+      (procedure.timeBasis === 'study' ? procedure.localStartedAt : null),
     receivedAt: reports[0]?.receivedAt ?? procedure.createdAt,
     timeZone: hospital.timeZone,
     now,
+    checking: await loadChecking(db, hospital, procedure, equipmentIds, now),
   });
   const isTyped = reports.length > 0 && reports.every(({ channel }) => channel === 'manual');
   // A generated entry has no typed one behind it and stays what it is.

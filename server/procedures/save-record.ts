@@ -15,6 +15,9 @@ import { recomputeProcedure } from './recompute-procedure';
 
 type RecordInput = z.output<typeof recordInputSchema>;
 
+/** What levels and data checks depend on. */
+const checkedFields = ['procedureTypeId', 'patientHeightM', 'patientWeightKg'] as const;
+
 /** What a person filled in or overruled is no longer "from the file". */
 const stillFromFile = (procedure: Procedure, input: RecordInput) =>
   procedure.fromFile.filter(
@@ -66,7 +69,7 @@ export const saveRecord = (
       completedAt: isComplete ? (procedure.completedAt ?? now) : null,
     });
     const saved = await reload(tx, actor, id);
-    if (answers.procedureTypeId !== procedure.procedureTypeId)
+    if (checkedFields.some((field) => answers[field] !== procedure[field]))
       await recomputeProcedure(tx, await findHospital(tx, actor.hospitalId), saved, null, now);
     const current = await reload(tx, actor, id);
     if (isComplete) await refreshEstimates(tx, current, reason);

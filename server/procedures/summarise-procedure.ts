@@ -1,6 +1,7 @@
 import { kapWeightedKvp } from '../../shared/dosimetry/kap-weighted-kvp';
+import { checkData, isKeptOut, settledFiguresOf } from '../data-checks/check-data';
 import { buildStrip } from './build-strip';
-import { checkData } from './check-data';
+import { countFigures } from './count-figures';
 import { judgeAttention, type Attention } from './judge-attention';
 import { placeInTime, type PlacedInTime } from './place-in-time';
 import type { Procedure } from './procedure.entity';
@@ -24,6 +25,7 @@ export type Summary = PlacedInTime &
     | 'strip'
     | 'planes'
     | 'dataChecks'
+    | 'settledFigures'
     | 'isQuarantined'
   >;
 
@@ -32,16 +34,14 @@ export function summariseProcedure(input: SummaryInput): Summary {
   const when = placeInTime(input);
   const planes = totalPlanes(input, when.localDate);
   const together = totalTogether(planes, input.procedure.fieldsOverlap);
-  const dataChecks = checkData({ input, planes, together });
+  const dataChecks = checkData({ input, planes, together }, input.checking);
+  const settledFigures = settledFiguresOf(dataChecks, input.checking);
   return {
     ...when,
-    fluoroscopyTimeS: together.fluoroscopyTimeS,
-    referenceAirKermaGy: together.referenceAirKerma.corrected ?? together.referenceAirKerma.displayed,
+    ...countFigures(together, settledFigures),
     displayedReferenceAirKermaGy: together.referenceAirKerma.displayed,
     isReferenceAirKermaUpperBound: together.isUpperBound,
-    kermaAreaProductGyCm2: together.kermaAreaProduct.corrected ?? together.kermaAreaProduct.displayed,
     displayedKermaAreaProductGyCm2: together.kermaAreaProduct.displayed,
-    isCorrected: together.isCorrected,
     kvpMean: kapWeightedKvp(
       input.events.map((event) => ({
         kvp: event.kvpMean,
@@ -52,7 +52,8 @@ export function summariseProcedure(input: SummaryInput): Summary {
     strip: buildStrip(input.events),
     planes,
     dataChecks,
-    isQuarantined: dataChecks.some((check) => check.result === 'failed'),
-    ...judgeAttention(input, together, dataChecks),
+    settledFigures,
+    isQuarantined: isKeptOut(dataChecks, input.checking),
+    ...judgeAttention(input, together, dataChecks, settledFigures),
   };
 }

@@ -1,4 +1,5 @@
 import type { CalibrationFactor } from '../equipment/calibration-factor.entity';
+import type { Checking } from '../data-checks/check-data';
 import type { DoseReport } from '../dose-reports/dose-report.entity';
 import type { Level } from '../levels/level.entity';
 import type { IrradiationEvent } from './irradiation-event.entity';
@@ -7,7 +8,15 @@ import type { Procedure } from './procedure.entity';
 /** A stored report as far as a procedure's totals need it. */
 export type SummaryReport = Pick<
   DoseReport,
-  'id' | 'equipmentId' | 'receivedAt' | 'contentAt' | 'eventKeys' | 'reportedPlanes' | 'warnings'
+  | 'id'
+  | 'equipmentId'
+  | 'channel'
+  | 'receivedAt'
+  | 'contentAt'
+  | 'eventKeys'
+  | 'reportedPlanes'
+  | 'warnings'
+  | 'context'
 >;
 
 export type SummaryEvent = Omit<IrradiationEvent, 'procedureId' | 'reported' | 'details' | 'filters'>;
@@ -19,7 +28,10 @@ export type SummaryFactor = Pick<
 
 /** Everything that a procedure's totals, strip, checks and attention follow from. */
 export type SummaryInput = {
-  procedure: Pick<Procedure, 'fieldsOverlap' | 'procedureClass' | 'deviceClass'>;
+  procedure: Pick<
+    Procedure,
+    'fieldsOverlap' | 'procedureClass' | 'deviceClass' | 'patientHeightM' | 'patientWeightKg'
+  >;
   reports: SummaryReport[];
   events: SummaryEvent[];
   equipmentLabels: Map<string, string>;
@@ -30,4 +42,6 @@ export type SummaryInput = {
   receivedAt: Date;
   timeZone: string;
   now: Date;
+  /** The department's settings, what was settled, and what other procedures say. */
+  checking: Checking;
 };

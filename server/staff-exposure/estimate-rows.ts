@@ -11,6 +11,7 @@ import type { Garment } from '../garments/garment.entity';
 import type { EventFigures } from '../procedures/irradiation-event.store';
 import type { Presence } from '../procedures/presence.entity';
 import type { Procedure } from '../procedures/procedure.entity';
+import { findSettledScale } from './settled-kerma';
 import type { StaffEstimate } from './staff-estimate.entity';
 
 /** The registers that an estimate needs beside the procedure's own rows. */
@@ -31,7 +32,11 @@ export type EstimateRowOptions = {
   draws?: number;
 };
 
-function toExposureEvent(event: EventFigures, procedure: Procedure): ExposureEvent {
+function toExposureEvent(
+  event: EventFigures,
+  procedure: Procedure,
+  settledScale: number | null,
+): ExposureEvent {
   const copper = event.filters.filter((filter) => filter.type === 'flat' && filter.material === 'Cu');
   const plane =
     procedure.planes.length === 1
@@ -41,7 +46,10 @@ function toExposureEvent(event: EventFigures, procedure: Procedure): ExposureEve
     type: event.type,
     plane: event.plane,
     kvp: event.kvpMean,
-    kermaAreaProductGyCm2: event.kermaAreaProductGyCm2,
+    kermaAreaProductGyCm2:
+      event.kermaAreaProductGyCm2 === null || settledScale === null
+        ? event.kermaAreaProductGyCm2
+        : event.kermaAreaProductGyCm2 * settledScale,
     copperMm:
       event.filters.length === 0
         ? null
@@ -50,22 +58,23 @@ function toExposureEvent(event: EventFigures, procedure: Procedure): ExposureEve
     secondaryAngleDeg: event.secondaryAngleDeg,
     primaryEndAngleDeg: event.primaryEndAngleDeg,
     secondaryEndAngleDeg: event.secondaryEndAngleDeg,
-    kapCalibrationFactor: plane?.factors.kermaAreaProduct ?? null,
+    kapCalibrationFactor: settledScale === null ? (plane?.factors.kermaAreaProduct ?? null) : null,
   };
 }
 
 /** A procedure without events has its totals only: one event of unknown angle. */
-const totalAsEvent = (procedure: Procedure): ExposureEvent => ({
+const totalAsEvent = (procedure: Procedure, settledGyCm2: number | null): ExposureEvent => ({
   type: 'fluoroscopy',
   plane: null,
   kvp: procedure.kvpMean,
-  kermaAreaProductGyCm2: procedure.displayedKermaAreaProductGyCm2,
+  kermaAreaProductGyCm2: settledGyCm2 ?? procedure.displayedKermaAreaProductGyCm2,
   copperMm: null,
   primaryAngleDeg: null,
   secondaryAngleDeg: null,
   primaryEndAngleDeg: null,
   secondaryEndAngleDeg: null,
-  kapCalibrationFactor: procedure.planes[0]?.factors.kermaAreaProduct ?? null,
+  kapCalibrationFactor:
+    settledGyCm2 === null ? (procedure.planes[0]?.factors.kermaAreaProduct ?? null) : null,
 });
 
 function toGarment(presence: Presence, garment: Garment | undefined): ExposedPerson['garment'] {
@@ -160,8 +169,11 @@ export function toEstimateRows(
     accessSide: procedure.accessSide === 'head' ? null : procedure.accessSide,
     typicalKvp: procedureTypeId === null ? null : (registers.typicalKvps.get(procedureTypeId) ?? null),
   };
+  const settledScale = findSettledScale(procedure, events);
   const beams =
-    events.length > 0 ? events.map((event) => toExposureEvent(event, procedure)) : [totalAsEvent(procedure)];
+    events.length > 0
+      ? events.map((event) => toExposureEvent(event, procedure, settledScale))
+      : [totalAsEvent(procedure, procedure.settledFigures?.kermaAreaProductGyCm2 ?? null)];
   const persons = presences.map((presence) => toPerson(presence, procedure, registers));
   return estimateStaffExposures(beams, persons, context, { draws }).map((estimate, index): StaffEstimate => {
     const presence = presences[index] as Presence;

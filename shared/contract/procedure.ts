@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { idSchema, localDateTimeSchema, namedSchema } from './common';
-import { dataCheckSchema } from './data-check';
+import { dataCheckSchema, settledFiguresSchema } from './data-check';
 import { missingParts, recordSchema } from './record';
 
 const measured = z.number().nullable();
@@ -71,6 +71,8 @@ export const procedureRowSchema = z.object({
   isManual: z.boolean(),
   /** A value failed a hard check and nobody settled it: outside every statistic. */
   isInDoubt: z.boolean(),
+  /** A physicist decided that it stays outside every statistic. */
+  isLeftOut: z.boolean(),
   hasOriginal: z.boolean(),
   patient: patientSchema.optional(),
 });
@@ -98,7 +100,7 @@ export const procedureFilterSchema = z.object({
   room: idSchema.optional(),
   operator: idSchema.optional(),
   period: z.enum(periods).default('90d'),
-  attention: z.enum(['any', 'flagged', ...attentionLevels]).default('any'),
+  attention: z.enum(['any', 'flagged', ...attentionLevels, 'in-doubt']).default('any'),
   record: z.enum(['any', 'incomplete', 'complete']).default('any'),
   kind: z.enum(['fluoroscopy', 'radiography', 'quality-control', 'withdrawn']).default('fluoroscopy'),
   find: z.string().trim().max(80).optional(),
@@ -154,21 +156,42 @@ export const comparisonSchema = z.object({
 });
 export type Comparison = z.infer<typeof comparisonSchema>;
 
+/** A report of a procedure, what it is worth beside the others, and why it is here. */
+export const procedureReportSchema = z.object({
+  id: idSchema,
+  receivedAt: z.string(),
+  /** The machine's own time of writing. */
+  contentAt: z.string().nullable(),
+  machine: z.string().nullable(),
+  eventCount: z.int().nullable(),
+  isPartial: z.boolean(),
+  /** Its totals are taken as reported. */
+  counts: z.boolean(),
+  /**
+   * `adds`: a part of the sum. `superseded`: another report tells everything it tells. `repeats`: another holds
+   * exactly the same exposures.
+   */
+  standing: z.enum(['counts', 'adds', 'superseded', 'repeats']),
+  /** The report that supersedes it or that it repeats. */
+  byId: idSchema.nullable(),
+  /** `followed`: its study's procedure was merged into this one before it came. */
+  origin: z.enum(['study', 'order', 'moved', 'followed']),
+  movedBy: z.string().nullable(),
+  hasOriginal: z.boolean(),
+  isGenerated: z.boolean(),
+  isManual: z.boolean(),
+});
+export type ProcedureReport = z.infer<typeof procedureReportSchema>;
+
 export const procedureSchema = procedureRowSchema.omit({ patient: true, strip: true }).extend({
   endedAt: localDateTimeSchema.nullable(),
   planes: z.array(planeTotalsSchema),
   fieldsOverlap: z.boolean().nullable(),
   comparisons: z.array(comparisonSchema),
+  /** Totals that a physicist typed in place of wrong ones; they alone count and decide about levels. */
+  settledFigures: settledFiguresSchema.nullable(),
   dataChecks: z.array(dataCheckSchema),
-  reports: z.array(
-    z.object({
-      id: idSchema,
-      receivedAt: z.string(),
-      counts: z.boolean(),
-      hasOriginal: z.boolean(),
-      isGenerated: z.boolean(),
-    }),
-  ),
+  reports: z.array(procedureReportSchema),
   record: recordSchema,
   history: z.array(
     z.object({ at: z.string(), by: z.string(), action: z.string(), reason: z.string().nullable() }),
