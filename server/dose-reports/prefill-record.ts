@@ -31,8 +31,18 @@ function answer(codes: (string | undefined)[], yes: Set<string>, no: Set<string>
   return hasYes === hasNo ? null : hasYes;
 }
 
+/** As much of a report as the record can be prefilled from. */
+export type PrefillSource = Pick<Report, 'studyDescription' | 'persons'> & {
+  patient: Pick<Report['patient'], 'heightM' | 'weightKg'>;
+  events: {
+    protocol: string | null;
+    patientTableRelationship: { value: string } | null;
+    patientOrientationModifier: { value: string } | null;
+  }[];
+};
+
 /** What a report already says of the record: nothing of it is asked again, all of it may be overruled. */
-export async function prefillRecord(db: Db, hospitalId: string, report: Report): Promise<Prefilled> {
+export async function prefillRecord(db: Db, hospitalId: string, report: PrefillSource): Promise<Prefilled> {
   const described = [report.studyDescription, ...report.events.map((event) => event.protocol)]
     .filter((text) => text !== null)
     .join('\n')

@@ -55,6 +55,8 @@ export async function addEvents(db: EntityManager, procedureId: string, events: 
   const statement = `insert into irradiation_event (procedure_id, ${targets})
      select $1, ${names.map((name) => `given."${name}"`).join(', ')}
        from json_to_recordset($2::json) as given(${shape})
+      where not exists (select 1 from irradiation_event known
+                         where known.procedure_id = $1 and known.event_key = given."eventKey")
      on conflict (procedure_id, event_key, started_at) do nothing`;
   for (let start = 0; start < events.length; start += rowsPerStatement) {
     const rows = events

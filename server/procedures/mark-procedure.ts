@@ -33,6 +33,12 @@ export const markProcedure = (
           current: before,
         },
       );
+    if (marks.isWithdrawn === false && procedure.mergedIntoId !== null)
+      throw new Problem(
+        'conflict',
+        'Its reports are in another procedure, so there is nothing to restore here. Take the merge back: then it counts again.',
+        { current: before },
+      );
     const changes = Object.fromEntries(Object.entries(marks).filter(([, value]) => value !== undefined));
     await updateProcedure(tx, actor.hospitalId, id, changes);
     await recomputeProcedure(

@@ -1,6 +1,7 @@
 import type { PlaneTotals } from '../../shared/contract/procedure';
 import type { ReportPlane } from '../../shared/contract/report';
-import type { SummaryEvent, SummaryFactor, SummaryInput, SummaryReport } from './summary-input';
+import { standReports } from './stand-reports';
+import type { SummaryEvent, SummaryFactor, SummaryInput } from './summary-input';
 
 type Quantity = 'kermaAreaProductGyCm2' | 'referenceAirKermaGy';
 
@@ -11,15 +12,8 @@ function sum(values: (number | null)[]): number | null {
 }
 
 const isFluoroscopy = (event: SummaryEvent) => event.type === 'fluoroscopy';
-const newestFirst = (a: SummaryReport, b: SummaryReport) =>
-  (b.contentAt ?? '').localeCompare(a.contentAt ?? '') || b.receivedAt.getTime() - a.receivedAt.getTime();
-
-/** The newest report that holds every event known of its machine: the one whose totals count. */
-export function findCountingReport(reports: SummaryReport[]): SummaryReport | null {
-  const known = new Set(reports.flatMap((report) => report.eventKeys));
-  const holdsAll = (report: SummaryReport) => new Set(report.eventKeys).size === known.size;
-  return reports.toSorted(newestFirst).find(holdsAll) ?? null;
-}
+/** Adds what is known; null where nothing is. */
+const addKnown = (...values: (number | null | undefined)[]) => sum(values.map((value) => value ?? null));
 
 /** The factor in force for a plane on a day: the newest that had begun. */
 function factorFor(
@@ -41,14 +35,20 @@ function factorFor(
 const times = (value: number | null, factor: number | undefined) =>
   value === null || factor === undefined ? null : value * factor;
 
-function totalPlane(
-  equipment: { id: string | null; label: string | null },
-  plane: PlaneTotals['plane'],
-  events: SummaryEvent[],
-  reported: ReportPlane | null,
-  factors: SummaryFactor[],
-  day: string,
-): PlaneTotals {
+type PlaneInput = {
+  equipment: { id: string | null; label: string | null };
+  plane: PlaneTotals['plane'];
+  events: SummaryEvent[];
+  /** Of the report that holds every event of the machine. */
+  held: ReportPlane | null;
+  /** Of reports without events, which tell what no event tells. */
+  totalsOnly: ReportPlane[];
+  factors: SummaryFactor[];
+  day: string;
+};
+
+function totalPlane(input: PlaneInput): PlaneTotals {
+  const { equipment, plane, events, held, totalsOnly, factors, day } = input;
   const add = (quantity: Quantity, list = events) => sum(list.map((event) => event[quantity]));
   const fluoroscopy = events.filter(isFluoroscopy);
   const acquisition = events.filter((event) => !isFluoroscopy(event));
@@ -57,22 +57,29 @@ function totalPlane(
     referenceAirKermaGy: add('referenceAirKermaGy'),
     fluoroscopyTimeS: sum(fluoroscopy.map((event) => event.irradiationDurationS ?? event.exposureTimeS)),
   };
+  const alone = (quantity: keyof PlaneTotals['summed']) =>
+    addKnown(...totalsOnly.map((total) => total[quantity]));
+  const together = (quantity: keyof PlaneTotals['summed']) =>
+    addKnown(held?.[quantity] ?? summed[quantity], alone(quantity));
   const displayed = {
-    kermaAreaProductGyCm2: reported?.kermaAreaProductGyCm2 ?? summed.kermaAreaProductGyCm2,
-    referenceAirKermaGy: reported?.referenceAirKermaGy ?? summed.referenceAirKermaGy,
-    fluoroscopyTimeS: reported?.fluoroscopyTimeS ?? summed.fluoroscopyTimeS,
+    kermaAreaProductGyCm2: together('kermaAreaProductGyCm2'),
+    referenceAirKermaGy: together('referenceAirKermaGy'),
+    fluoroscopyTimeS: together('fluoroscopyTimeS'),
   };
+  // Beside the sum over events stands only what a report says of these same events.
+  const isTotalsOnly = held === null && events.length === 0 && totalsOnly.length > 0;
+  const told = isTotalsOnly ? displayed : held;
   const productFactor = factorFor(factors, plane, 'kerma-area-product', day);
   const kermaFactor = factorFor(factors, plane, 'reference-air-kerma', day);
   return {
     equipmentId: equipment.id,
     equipmentLabel: equipment.label,
     plane,
-    basis: reported ? 'reported' : 'summed',
-    reported: reported && {
-      kermaAreaProductGyCm2: reported.kermaAreaProductGyCm2,
-      referenceAirKermaGy: reported.referenceAirKermaGy,
-      fluoroscopyTimeS: reported.fluoroscopyTimeS,
+    basis: told ? 'reported' : 'summed',
+    reported: told && {
+      kermaAreaProductGyCm2: told.kermaAreaProductGyCm2,
+      referenceAirKermaGy: told.referenceAirKermaGy,
+      fluoroscopyTimeS: told.fluoroscopyTimeS,
     },
     summed,
     displayed,
@@ -85,10 +92,14 @@ function totalPlane(
       referenceAirKerma: kermaFactor?.factor ?? null,
       validFrom: kermaFactor?.validFrom ?? productFactor?.validFrom ?? null,
     },
-    fluoroscopyKermaAreaProductGyCm2:
-      reported?.fluoroscopyKermaAreaProductGyCm2 ?? add('kermaAreaProductGyCm2', fluoroscopy),
-    acquisitionKermaAreaProductGyCm2:
-      reported?.acquisitionKermaAreaProductGyCm2 ?? add('kermaAreaProductGyCm2', acquisition),
+    fluoroscopyKermaAreaProductGyCm2: addKnown(
+      held?.fluoroscopyKermaAreaProductGyCm2 ?? add('kermaAreaProductGyCm2', fluoroscopy),
+      ...totalsOnly.map((total) => total.fluoroscopyKermaAreaProductGyCm2),
+    ),
+    acquisitionKermaAreaProductGyCm2: addKnown(
+      held?.acquisitionKermaAreaProductGyCm2 ?? add('kermaAreaProductGyCm2', acquisition),
+      ...totalsOnly.map((total) => total.acquisitionKermaAreaProductGyCm2),
+    ),
   };
 }
 
@@ -100,26 +111,47 @@ function planesOf(events: SummaryEvent[], reported: ReportPlane[]): PlaneTotals[
   return named.includes('all') ? ['all'] : named.slice(0, 1);
 }
 
+/** A total that names no plane of the machine goes to the only one, else it stands as a row of its own. */
+function toPlane(total: ReportPlane, planes: PlaneTotals['plane'][]): PlaneTotals['plane'] {
+  if (planes.includes(total.plane)) return total.plane;
+  return planes.length === 1 ? (planes[0] ?? null) : 'all';
+}
+
 /** Totals of each plane of each machine: as reported, as summed over unique events, and corrected. */
 export function totalPlanes(input: SummaryInput, day: string): PlaneTotals[] {
-  const equipmentIds = [...new Set(input.reports.map((report) => report.equipmentId))];
-  return equipmentIds.flatMap((id) => {
-    const reports = input.reports.filter((report) => report.equipmentId === id);
-    const reportIds = new Set<string | null>(reports.map((report) => report.id));
-    const events = input.events.filter((event) => reportIds.has(event.doseReportId));
-    const reported = findCountingReport(reports)?.reportedPlanes ?? [];
+  const machineOf = new Map<string | null, string | null>(
+    input.reports.map((one) => [one.id, one.equipmentId]),
+  );
+  const { machines } = standReports(input.reports);
+  const told = new Set(machines.flatMap(({ eventKeys }) => [...eventKeys]));
+  return machines.flatMap(({ equipmentId: id, holder, totalsOnly, eventKeys }) => {
+    const events = input.events.filter((event) =>
+      told.has(event.eventKey) ? eventKeys.has(event.eventKey) : machineOf.get(event.doseReportId) === id,
+    );
+    const held = holder?.reportedPlanes ?? [];
+    // One report's "all planes" beside its planes is their total, not a further plane.
+    const alone = totalsOnly.flatMap(({ reportedPlanes }) => {
+      const planes = planesOf([], reportedPlanes);
+      return reportedPlanes.filter(({ plane }) => planes.includes(plane));
+    });
     const factors = input.factors.filter((factor) => factor.equipmentId === id);
     const label = id === null ? null : (input.equipmentLabels.get(id) ?? null);
-    const planes = planesOf(events, reported);
-    return planes.map((plane) =>
-      totalPlane(
-        { id, label },
+    const known = planesOf(events, held);
+    const planes = known.length > 0 ? known : planesOf([], alone);
+    const rows = [...new Set([...planes, ...alone.map((total) => toPlane(total, planes))])];
+    // Summed, an event that names no plane counts too, apart from the planes.
+    if (rows.length > 1 && !holder && events.some(({ plane }) => !rows.includes(plane))) rows.push(null);
+    const placeOf = (event: SummaryEvent) => (rows.includes(event.plane) ? event.plane : null);
+    return rows.map((plane) =>
+      totalPlane({
+        equipment: { id, label },
         plane,
-        planes.length === 1 ? events : events.filter((event) => event.plane === plane),
-        reported.find((entry) => entry.plane === plane) ?? null,
+        events: rows.length === 1 ? events : events.filter((event) => placeOf(event) === plane),
+        held: held.find((entry) => entry.plane === plane) ?? null,
+        totalsOnly: alone.filter((total) => toPlane(total, planes) === plane),
         factors,
         day,
-      ),
+      }),
     );
   });
 }

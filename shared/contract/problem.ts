@@ -24,6 +24,7 @@ export const problemCodes = {
   'not-found': { status: 404, title: 'There is nothing here' },
   conflict: { status: 409, title: 'Somebody changed this in the meantime' },
   'already-exists': { status: 409, title: 'This exists already' },
+  'cannot-regroup': { status: 422, title: 'Reports cannot be grouped like that' },
   'link-spent': { status: 410, title: 'This link has been used or has expired' },
   'too-large': { status: 413, title: 'The file is larger than the limit' },
   'too-many-requests': { status: 429, title: 'Too many tries' },

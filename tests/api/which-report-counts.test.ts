@@ -1,8 +1,7 @@
 import { afterAll, beforeAll, expect, test } from 'vitest';
-import { caseContent, fluoroscopyEvent } from '../../scripts/samples/case-content';
-import type { DoseReportContent } from '../../server/dicom-writer/dose-report-content';
-import { writeDoseReport } from '../../server/dicom-writer/write-dose-report';
+import type { ProcedureReport } from '../../shared/contract/procedure';
 import { makeHospital, makePerson, testPassword } from '../factories';
+import { createSender, cumulative, later, withTotal } from '../report-series';
 import { signIn, startTestApp, type Agent, type TestApp } from '../test-app';
 
 let app: TestApp;
@@ -16,47 +15,7 @@ beforeAll(async () => {
 });
 afterAll(() => app.close());
 
-const send = async (content: DoseReportContent) => {
-  const { body } = await technologist
-    .post('/api/dose-reports')
-    .attach('files', Buffer.from(writeDoseReport(content)), 'report.dcm')
-    .expect(200);
-  return body.results[0] as { outcome: string; procedureId: string; reason: { code: string } | null };
-};
-const open = async (id: string) => (await technologist.get(`/api/procedures/${id}`).expect(200)).body;
-
-/** A report of one study with events from..to, each of 0.01 Gy, 1 Gy·cm² and 10 s; its totals add up. */
-function cumulative(
-  sample: number,
-  report: number,
-  from: number,
-  to: number,
-  overrides: Partial<DoseReportContent> = {},
-) {
-  const events = Array.from({ length: to - from }, (_, index) =>
-    fluoroscopyEvent(sample, from + index, {
-      kermaAreaProductGyCm2: 1,
-      referenceAirKermaGy: 0.01,
-      irradiationDurationS: 10,
-    }),
-  );
-  const base = caseContent(sample);
-  return {
-    ...base,
-    sopInstanceUid: `${base.sopInstanceUid}${report}`,
-    contentAt: `2026-03-04T1${report}:20:00`,
-    events,
-    planes: [
-      {
-        plane: 'single' as const,
-        kermaAreaProductGyCm2: events.length,
-        referenceAirKermaGy: events.length * 0.01,
-        fluoroscopyTimeS: events.length * 10,
-      },
-    ],
-    ...overrides,
-  };
-}
+const { send, open, standingsOf } = createSender(() => technologist);
 
 // Own acceptance check: files A (40 events), B (A and 12 more), C (30 others of the same study).
 test('a later report that holds the earlier events and a continuation give each event once', async () => {
@@ -76,6 +35,10 @@ test('a later report that holds the earlier events and a continuation give each 
   expect(all.referenceAirKermaGy).toBeCloseTo(0.82, 9);
   expect(all.fluoroscopyTimeS).toBeCloseTo(820, 9);
   expect(all.planes[0].basis).toBe('summed');
+  const [listedA, listedB, listedC] = all.reports as ProcedureReport[];
+  expect([listedA?.standing, listedB?.standing, listedC?.standing]).toEqual(['superseded', 'adds', 'adds']);
+  expect(listedA?.byId).toBe(listedB?.id);
+  await technologist.get(`/api/dose-reports/${listedA?.id}/original`).expect(200);
   const again = await send(a);
   expect(again.outcome).toBe('duplicate');
   expect((await open(first.procedureId)).kermaAreaProductGyCm2).toBeCloseTo(82, 9);
@@ -157,4 +120,83 @@ test('the hospital’s zone decides the day: ten in the evening in Denver is not
     [procedureId],
   );
   expect([row.day, row.started_at.toISOString()]).toEqual(['2026-03-04', '2026-03-05T05:30:00.000Z']);
+});
+
+test('one report for each exposure: they add up', async () => {
+  const { procedureId } = await send(cumulative(350, 0, 0, 1));
+  await send(cumulative(350, 1, 1, 2));
+  await send(cumulative(350, 2, 2, 3));
+  expect(await standingsOf(procedureId)).toEqual(['adds', 'adds', 'adds']);
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(3, 9);
+});
+
+test('where clocks disagree, the stated predecessor decides which of two equal reports counts', async () => {
+  const first = withTotal(cumulative(351, 5, 0, 10), 10.1);
+  const { procedureId } = await send(first);
+  const sopClassUid = '1.2.840.10008.5.1.4.1.1.88.67';
+  await send({
+    ...withTotal(cumulative(351, 1, 0, 10), 10.4),
+    predecessors: [{ sopClassUid, sopInstanceUid: first.sopInstanceUid }],
+  });
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(10.4, 9);
+  expect(await standingsOf(procedureId)).toEqual(['repeats', 'counts']);
+});
+
+test('a complete report counts before a partial one, whichever came first', async () => {
+  const { procedureId } = await send(withTotal(cumulative(352, 1, 0, 10), 10.4));
+  await send({ ...withTotal(cumulative(352, 5, 0, 10), 9.5), completionFlag: 'PARTIAL' });
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(10.4, 9);
+  await send({ ...withTotal(cumulative(352, 6, 0, 12), 12.5), completionFlag: 'PARTIAL' });
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(12.5, 9);
+});
+
+const step = (uid: string) => ({ kind: 'performed-procedure-step' as const, uid });
+
+test('totals without exposures: superseded by a full report of the machine, added for a step of their own', async () => {
+  const totals = { ...withTotal(cumulative(353, 0, 0, 0), 7), scope: step('2.25.1') };
+  const { procedureId } = await send(totals);
+  await send({ ...withTotal(cumulative(353, 1, 0, 0), 8), scope: step('2.25.1') });
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(8, 9);
+  await send({ ...withTotal(cumulative(353, 2, 0, 0), 5), scope: step('2.25.2') });
+  expect((await open(procedureId)).kermaAreaProductGyCm2).toBeCloseTo(13, 9);
+  await send(cumulative(353, 3, 0, 14));
+  const full = await open(procedureId);
+  expect(full.kermaAreaProductGyCm2).toBeCloseTo(14, 9);
+  expect(await standingsOf(procedureId)).toEqual(['superseded', 'superseded', 'superseded', 'counts']);
+});
+
+test('a copy that lost the machine’s serial number on its way is no second machine', async () => {
+  const content = cumulative(356, 0, 0, 10);
+  const { procedureId } = await send(content);
+  const equipment = { ...content.equipment, serialNumber: null, manufacturer: null };
+  await send({ ...cumulative(356, 1, 0, 10), equipment });
+  const procedure = await open(procedureId);
+  expect([procedure.planes.length, procedure.eventCount]).toEqual([1, 10]);
+  expect(procedure.kermaAreaProductGyCm2).toBeCloseTo(10, 9);
+});
+
+test('a copy whose clock was set right counts its exposures once', async () => {
+  const { procedureId } = await send(cumulative(357, 0, 0, 10));
+  await send(later(cumulative(357, 1, 0, 12), 1));
+  const procedure = await open(procedureId);
+  expect([procedure.eventCount, procedure.planes[0].summed.kermaAreaProductGyCm2]).toEqual([12, 12]);
+});
+
+// Own acceptance check: A 1.80 Gy, 130 Gy·cm², 21.0 min; B 1.20, 60, 13.5; "all planes" repeats their sum.
+test('two planes: 3.00 Gy as an upper bound, 190 Gy·cm², 34.5 min; the maker’s own sum is not added', async () => {
+  const plane = (name: 'A' | 'B' | 'all', gy: number, product: number, minutes: number) => ({
+    plane: name,
+    referenceAirKermaGy: gy,
+    kermaAreaProductGyCm2: product,
+    fluoroscopyTimeS: minutes * 60,
+  });
+  const { procedureId } = await send({
+    ...cumulative(358, 0, 0, 0),
+    planes: [plane('A', 1.8, 130, 21), plane('B', 1.2, 60, 13.5), plane('all', 3, 190, 34.5)],
+  });
+  const procedure = await open(procedureId);
+  expect(procedure.planes.map((one: { plane: string }) => one.plane)).toEqual(['A', 'B']);
+  expect([procedure.referenceAirKermaGy, procedure.isReferenceAirKermaUpperBound]).toEqual([3, true]);
+  expect(procedure.kermaAreaProductGyCm2).toBeCloseTo(190, 9);
+  expect(procedure.fluoroscopyTimeS).toBeCloseTo(34.5 * 60, 9);
 });
