@@ -59,7 +59,7 @@ export async function startLeeward(options: StartOptions): Promise<{ url: string
     await offerFirstAdministrator(dataSource.manager, url, report);
     // What a crash left between "received" and its outcome is settled now.
     await settleReceived(dataSource.manager, systemClock(), env.archiveUnpackedBytes);
-    const jobs = await startJobs(poolOf(dataSource), listTasks(dataSource.manager, systemClock), logger);
+    const jobs = await startJobs(poolOf(dataSource), listTasks(dataSource.manager, env, systemClock), logger);
     return {
       url,
       close: async () => {

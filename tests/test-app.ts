@@ -24,9 +24,10 @@ export type TestApp = {
 export async function startTestApp(now: Clock = () => new Date()): Promise<TestApp> {
   const database = await createTestDatabase();
   const dataSource = await createDataSource(database.url).initialize();
+  const env = readEnvironment({ LOG_LEVEL: 'silent' });
   const app = createApp({
     dataSource,
-    env: readEnvironment({ LOG_LEVEL: 'silent' }),
+    env,
     logger: pino({ level: 'silent' }),
     now,
     sessionSecret: 'only for tests',
@@ -38,7 +39,7 @@ export async function startTestApp(now: Clock = () => new Date()): Promise<TestA
     app,
     dataSource,
     url: database.url,
-    runJobs: () => runWaitingJobs(poolOf(dataSource), listTasks(dataSource.manager, now)),
+    runJobs: () => runWaitingJobs(poolOf(dataSource), listTasks(dataSource.manager, env, now)),
     close: async () => {
       await dataSource.destroy();
       await database.drop();

@@ -1,6 +1,6 @@
 import { promisify } from 'node:util';
 import { deflateRaw, inflateRaw } from 'node:zlib';
-import type { EntityManager } from 'typeorm';
+import { LessThanOrEqual, type EntityManager } from 'typeorm';
 import { newId } from '../kernel/new-id';
 import { DoseReport } from './dose-report.entity';
 import { OriginalFile } from './original-file.entity';
@@ -135,6 +135,10 @@ export const listReportsOf = (
     order: { receivedAt: 'ASC' },
   });
 
-/** What was received but never settled: the server stopped in between. */
-export const listUnsettled = (db: EntityManager): Promise<DoseReport[]> =>
-  db.find(DoseReport, { where: { outcome: 'received' }, order: { receivedAt: 'ASC' }, take: 1000 });
+/** What was received until a moment and never settled: the server stopped in between, or the database was away. */
+export const listUnsettled = (db: EntityManager, until: Date): Promise<DoseReport[]> =>
+  db.find(DoseReport, {
+    where: { outcome: 'received', receivedAt: LessThanOrEqual(until) },
+    order: { receivedAt: 'ASC' },
+    take: 1000,
+  });

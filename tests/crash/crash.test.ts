@@ -1,4 +1,4 @@
-import { createHash } from 'node:crypto';
+import { createHash, randomUUID } from 'node:crypto';
 import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { chmod } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
@@ -60,9 +60,10 @@ async function signIn(): Promise<string> {
 }
 
 const makeFiles = (): OutgoingFile[] =>
-  Array.from({ length: fileCount }, () => {
+  Array.from({ length: fileCount }, (_, index) => {
     const bytes = writeNewReport(eventsOfFile);
-    return { bytes, sha256: createHash('sha256').update(bytes).digest('hex') };
+    const sha256 = createHash('sha256').update(bytes).digest('hex');
+    return { bytes, sha256, uploadKey: index % 2 === 0 ? randomUUID() : null };
   });
 
 const readPostmasterPid = () =>
@@ -124,8 +125,10 @@ test('killed at random moments, server or database, nothing acknowledged is lost
   await server.start();
   const kept = await listKept();
   expect(kept.size).toBe(fileCount);
-  for (const { sha256 } of files) {
+  for (const { sha256, uploadKey } of files) {
     const file = kept.get(sha256);
+    // Sent again under its key, a file is known; without one the second sending is told as such.
+    if (uploadKey) expect(file?.outcomes).toEqual(['stored']);
     expect(file?.ids).toContain(acknowledged.get(sha256)?.doseReportId);
     expect(file?.outcomes.filter((outcome) => outcome === 'stored')).toHaveLength(1);
     expect(file?.outcomes.filter((outcome) => !['stored', 'duplicate'].includes(outcome))).toEqual([]);

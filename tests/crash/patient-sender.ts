@@ -1,7 +1,8 @@
 import { setTimeout as pause } from 'node:timers/promises';
-import { receivedFilesSchema, type ReceivedFile } from '../../shared/contract/dose-report';
+import { receivedFilesSchema, type ReceivedFile } from '../../shared/contract/received-files';
 
-export type OutgoingFile = { sha256: string; bytes: Uint8Array<ArrayBuffer> };
+/** Every second file has an upload key, as the page gives one; a script may send without. */
+export type OutgoingFile = { sha256: string; bytes: Uint8Array<ArrayBuffer>; uploadKey: string | null };
 
 const inFlight = 3;
 const patienceMs = 150;
@@ -12,7 +13,7 @@ async function sendOnce(url: string, cookie: string, file: OutgoingFile): Promis
   try {
     const response = await fetch(`${url}/api/dose-reports`, {
       method: 'POST',
-      headers: { cookie },
+      headers: file.uploadKey ? { cookie, 'upload-key': file.uploadKey } : { cookie },
       body: form,
       signal: AbortSignal.timeout(30_000),
     });
