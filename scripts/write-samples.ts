@@ -1,6 +1,6 @@
 import { mkdirSync, writeFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
-import { readableSamples } from './samples/readable-samples';
+import { readableGroups } from './samples/readable-samples';
 import type { Sample } from './samples/sample';
 import { unreadableSamples } from './samples/unreadable-samples';
 
@@ -28,11 +28,13 @@ function line({ fileName, how, isValid, expected }: Sample): string {
 }
 
 mkdirSync(folder, { recursive: true });
-const samples = [...readableSamples(), ...unreadableSamples()];
+const groups: Record<string, Sample[]> = { ...readableGroups(), 'Not read': unreadableSamples() };
+const samples = Object.values(groups).flat();
 for (const { fileName, bytes, expected, isValid } of samples) {
   writeFileSync(folder + fileName, bytes);
   const name = fileName.replace(/\.[^.]+$/, '');
   writeFileSync(`${folder}${name}.expected.json`, `${JSON.stringify({ fileName, isValid, ...expected })}\n`);
 }
-writeFileSync(`${folder}README.md`, introduction + samples.map(line).join(''));
+const list = Object.entries(groups).map(([title, members]) => `## ${title}\n\n${members.map(line).join('')}`);
+writeFileSync(`${folder}README.md`, introduction + list.join('\n'));
 process.stdout.write(`${samples.length} samples written to samples/\n`);

@@ -142,3 +142,8 @@ export function caseContent(sample: number, overrides: Partial<DoseReportContent
     ...overrides,
   };
 }
+
+/** One fluoroscopy event and totals without its acquisition: small, and complete enough for no warning. */
+export function smallCase(sample: number, overrides: Partial<DoseReportContent> = {}): DoseReportContent {
+  return caseContent(sample, { events: [fluoroscopyEvent(sample, 0)], persons: [], ...overrides });
+}

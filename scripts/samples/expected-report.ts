@@ -34,7 +34,7 @@ function value(quantity: Maybe): number | null {
   if ('qualifier' in quantity || quantity.unit === null || (quantity.scheme ?? 'UCUM') !== 'UCUM')
     return null;
   const factor = factors[quantity.unit];
-  return factor === undefined || !/^[ +-]*[\d.]+(e[+-]?\d+)?\s*$/i.test(quantity.text)
+  return factor === undefined || !/^[ +-]*(\d+\.?\d*|\.\d+)(e[+-]?\d+)?\s*$/i.test(quantity.text)
     ? null
     : Number(quantity.text) * factor;
 }

@@ -106,9 +106,9 @@ export function secondaryCapture(sample: number): DataSet {
   ];
 }
 
-/** A report whose comment unpacks to 80 MiB. */
-export function hugeReport(sample: number): DataSet {
-  const comment = ' '.repeat(80 * 1024 * 1024);
+/** A report with a comment of blanks that deflates to almost nothing; 80 MiB unless told. */
+export function hugeReport(sample: number, byteCount = 80 * 1024 * 1024): DataSet {
+  const comment = ' '.repeat(byteCount);
   return structuredReport(sample, `${SR}67`, doseTitle, [
     contentItem.text('CONTAINS', dcm('121106', 'Comment'), comment),
   ]);
@@ -123,10 +123,62 @@ export function deepReport(sample: number, depth: number): DataSet {
   return structuredReport(sample, `${SR}67`, doseTitle, [item]);
 }
 
+/** Anything but a report, in the class of one without pixels. */
+function otherObject(sample: number, sopClassUid: string, modality: string): DataSet {
+  const header = headerElements(caseContent(sample, { sopClassUid }));
+  return [
+    ...header.filter((element) => element.tag < 0x00400000 && element.tag !== 0x00080060),
+    textElement(0x00080060, 'CS', modality),
+  ];
+}
+
+/** Encapsulated PDF Storage with a few bytes in place of the document. */
+export function encapsulatedDocument(sample: number): DataSet {
+  return [
+    ...otherObject(sample, '1.2.840.10008.5.1.4.1.1.104.1', 'DOC'),
+    { tag: 0x00420011, vr: 'OB', value: new TextEncoder().encode('%PDF-1.7\n%%EOF\n') },
+  ];
+}
+
+export function radiotherapyPlan(sample: number): DataSet {
+  return otherObject(sample, '1.2.840.10008.5.1.4.1.1.481.5', 'RTPLAN');
+}
+
+/** TID 10040's first container under the class of TID 10001. */
+export function enhancedInUsualClass(sample: number): DataSet {
+  return structuredReport(sample, `${SR}67`, doseTitle, [
+    procedureReported(dcm('113704', 'Projection X-Ray')),
+    contentItem.container(dcm('130500', 'Accumulated Dose Data'), [
+      contentItem.text('CONTAINS', dcm('121106', 'Comment'), 'Totals'),
+    ]),
+  ]);
+}
+
+export function reportWithPixels(sample: number): DataSet {
+  return [
+    ...structuredReport(sample, `${SR}67`, doseTitle, []),
+    { tag: 0x7fe00010, vr: 'OW', value: new Uint8Array(64).fill(128) },
+  ];
+}
+
+const CONTENT_SEQUENCE = Buffer.from([0x40, 0x00, 0x30, 0xa7, 0x53, 0x51, 0x00, 0x00]);
+
+/** States another length for the root's Content Sequence (explicit little endian). */
+export function withContentLength(file: Uint8Array, length: number): Uint8Array {
+  const bytes = Buffer.from(file);
+  bytes.writeUInt32LE(length, bytes.indexOf(CONTENT_SEQUENCE) + 8);
+  return new Uint8Array(bytes);
+}
+
+/** Adds an empty item at the top level of the data set. */
+export function withStrayItem(file: Uint8Array): Uint8Array {
+  return new Uint8Array(Buffer.concat([file, Buffer.from([0xfe, 0xff, 0x00, 0xe0, 0, 0, 0, 0])]));
+}
+
 /** Shortens the stated length of the root's Content Sequence by its last item (explicit little endian). */
 export function withShortContentLength(file: Uint8Array): Uint8Array {
   const bytes = Buffer.from(file);
-  const start = bytes.indexOf(Buffer.from([0x40, 0x00, 0x30, 0xa7, 0x53, 0x51, 0x00, 0x00]));
+  const start = bytes.indexOf(CONTENT_SEQUENCE);
   const end = start + 12 + bytes.readUInt32LE(start + 8);
   let position = start + 12;
   let lastItem = position;

@@ -10,6 +10,7 @@ function unread(fileName: string, how: string, reasonCode: ReasonCode, bytes: Ui
 }
 
 const whole = () => writeDoseReport(caseContent(40));
+const deflated = () => writeDoseReport(caseContent(58), { transferSyntax: 'deflated' });
 
 /** Every sample that gives no report, with the reason that it must give. */
 export function unreadableSamples(): Sample[] {
@@ -98,6 +99,60 @@ export function unreadableSamples(): Sample[] {
       'The length of the content sequence is one item too short.',
       'malformed',
       objects.withShortContentLength(whole()),
+    ),
+    unread(
+      '55-length-beyond-end.dcm',
+      'The length of the content sequence passes the end of the file.',
+      'truncated',
+      objects.withContentLength(whole(), 0x00ffff00),
+    ),
+    unread(
+      '56-item-outside-sequence.dcm',
+      'An item stands after the content sequence, outside any sequence.',
+      'malformed',
+      objects.withStrayItem(whole()),
+    ),
+    unread(
+      '57-long-text.dcm',
+      'A comment of 1.5 MiB, deflated.',
+      'limit-text-length',
+      writeFile(objects.hugeReport(57, 1.5 * 1024 * 1024), { transferSyntax: 'deflated' }),
+    ),
+    unread(
+      '58-deflated-and-cut.dcm',
+      'A deflated report cut off after 70 % of its bytes.',
+      'truncated',
+      deflated().subarray(0, Math.floor(deflated().length * 0.7)),
+    ),
+    unread(
+      '59-encapsulated-document.dcm',
+      'A document of another format inside DICOM.',
+      'encapsulated-document',
+      writeFile(objects.encapsulatedDocument(59)),
+    ),
+    unread(
+      '119-radiotherapy-plan.dcm',
+      'An object that is neither image nor structured report.',
+      'not-structured-report',
+      writeFile(objects.radiotherapyPlan(119)),
+    ),
+    unread(
+      '120-enhanced-class-usual-title.dcm',
+      'Containers of TID 10040 stored under the usual dose report class.',
+      'enhanced-report',
+      writeFile(objects.enhancedInUsualClass(120)),
+    ),
+    unread(
+      '121-dose-picture.dcm',
+      'A dose report class with pixel data in it.',
+      'image',
+      writeFile(objects.reportWithPixels(121)),
+    ),
+    unread(
+      '122-cut-in-meta-information.dcm',
+      'The file ends inside the file meta information.',
+      'truncated',
+      whole().subarray(0, 200),
     ),
   ];
 }

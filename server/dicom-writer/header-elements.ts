@@ -54,6 +54,27 @@ function orderElements({ requests = [], procedureCodes = [], studyInstanceUid }:
   ];
 }
 
+/** Images that items refer to must be listed as evidence too (PS3.3 C.17.2). */
+function evidenceElements({
+  doseImages = [],
+  events,
+  studyInstanceUid,
+  seriesInstanceUid,
+}: DoseReportContent): DataSet {
+  const images = [...doseImages, ...events.flatMap(({ acquiredImages = [] }) => acquiredImages)];
+  if (images.length === 0) return [];
+  const instances = images.map(({ sopClassUid, sopInstanceUid }) => [
+    textElement(0x00081150, 'UI', sopClassUid),
+    textElement(0x00081155, 'UI', sopInstanceUid),
+  ]);
+  const series = [
+    textElement(0x0020000e, 'UI', `${seriesInstanceUid}.1`),
+    sequenceElement(0x00081199, instances),
+  ];
+  const study = [textElement(0x0020000d, 'UI', studyInstanceUid), sequenceElement(0x00081115, [series])];
+  return [sequenceElement(0x0040a375, [study])];
+}
+
 function predecessorElements(content: DoseReportContent): DataSet {
   const instances = (content.predecessors ?? []).map(({ sopClassUid, sopInstanceUid }) => [
     textElement(0x00081150, 'UI', sopClassUid),
@@ -97,6 +118,7 @@ export function headerElements(content: DoseReportContent): DataSet {
     textElement(0x00200013, 'IS', String(content.instanceNumber ?? 1)),
     ...orderElements(content),
     ...predecessorElements(content),
+    ...evidenceElements(content),
     sequenceElement(0x0040a372, []),
     textElement(0x0040a491, 'CS', content.completionFlag ?? 'COMPLETE'),
     textElement(0x0040a493, 'CS', 'UNVERIFIED'),
