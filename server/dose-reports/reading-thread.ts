@@ -2,6 +2,7 @@ import { once } from 'node:events';
 import { setImmediate } from 'node:timers/promises';
 import { Worker, type TransferListItem } from 'node:worker_threads';
 import type { DoseReportReading } from '../dicom/read-dose-report';
+import { joinBytes } from '../kernel/join-bytes';
 import { readingLimits } from './reading-limits';
 import type { ReadingAnswer, ReadingQuestion } from './reading-messages';
 
@@ -33,7 +34,7 @@ export class ReadingThread {
   /** Rejects when reading takes longer or needs more memory than it may: the thread is then of no further use. */
   async read(bytes: Uint8Array): Promise<DoseReportReading> {
     this.worker.ref();
-    const copy = new Uint8Array(bytes);
+    const copy = await joinBytes([bytes]);
     const { reading, eventCount } = await this.ask('reading', { bytes: copy }, [copy.buffer]);
     if (reading.outcome === 'read') {
       const { events } = reading.report;
