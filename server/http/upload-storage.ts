@@ -1,6 +1,7 @@
 import { createHash } from 'node:crypto';
 import type { FileHandle } from 'node:fs/promises';
 import { MulterError, type StorageEngine } from 'multer';
+import { joinBytes } from '../kernel/join-bytes';
 import { isZip, zipHeadBytes } from '../kernel/is-zip';
 import { openNamelessFile } from '../kernel/nameless-file';
 import type { UploadedContent } from '../kernel/uploaded-file';
@@ -59,7 +60,7 @@ async function takeIn(stream: AsyncIterable<Buffer>): Promise<UploadedContent> {
       }
     }
     if (!isDecided) await decide();
-    return disk ? (disk as DiskCopy).finish() : { kind: 'file', buffer: Buffer.concat(chunks, byteCount) };
+    return disk ? (disk as DiskCopy).finish() : { kind: 'file', buffer: await joinBytes(chunks) };
   } catch (error) {
     await (disk as DiskCopy | null)?.discard();
     throw error;
