@@ -71,7 +71,9 @@ async function takeIn(stream: AsyncIterable<Buffer>): Promise<UploadedContent> {
 export const uploadStorage: StorageEngine = {
   _handleFile(request, file, done) {
     // A sender that goes away never ends its file: without this the reading would wait for ever.
-    request.once('close', () => file.stream.destroy());
+    request.once('close', () => {
+      if (!request.complete) file.stream.destroy();
+    });
     takeIn(file.stream).then(
       (content) => done(null, { content } as unknown as Partial<Express.Multer.File>),
       (error: unknown) => done(error),
