@@ -43,6 +43,7 @@ async function prepareContext(stopper: Stopper): Promise<BenchContext> {
   stopper.add(() => cluster.stop());
   return {
     url: warm.url,
+    processId: warm.processId,
     demoPassword,
     databaseUrl: cluster.url,
     clientFolder: join(folder, 'dist'),

@@ -2,6 +2,8 @@
 export interface BenchContext {
   /** A running Leeward: started by `npm start` from a copy of the tree, demo hospital, durable database. */
   url: string;
+  /** The process that serves it; null where the system does not tell. */
+  processId: number | null;
   /** Password of every demo account. */
   demoPassword: string;
   /** The same server's database. */

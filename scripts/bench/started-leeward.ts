@@ -2,9 +2,12 @@ import { spawn } from 'node:child_process';
 import { createInterface } from 'node:readline';
 import { findFreePort } from '../database-cluster/free-port';
 import type { Stopper } from '../stopper';
+import { findServingProcess } from './process-memory';
 
 export interface StartedLeeward {
   url: string;
+  /** The process that serves; null where the system does not tell. */
+  processId: number | null;
   /** Seconds from the command to the first served page. */
   startS: number;
   /** Seconds it said that writing the demo hospital took; null if it wrote none. */
@@ -55,5 +58,7 @@ export async function startLeewardIn(
   const response = await fetch(url);
   if (!response.ok) throw new Error(`The page answered ${response.status}.`);
   await response.text();
-  return { url, startS: (performance.now() - startedMs) / 1000, demoS, stop };
+  const startS = (performance.now() - startedMs) / 1000;
+  const processId = child.pid === undefined ? null : findServingProcess(child.pid);
+  return { url, processId, startS, demoS, stop };
 }
