@@ -139,10 +139,11 @@ export async function countProcedures(
   db: EntityManager,
   filter: ProcedureFilter,
   scope: ListScope,
-): Promise<{ total: number; incomplete: number }> {
+): Promise<{ total: number; incomplete: number; enteredByHand: number }> {
   const { parts, values } = conditions(filter, scope);
   const [counts] = await db.query(
-    `select count(*)::int as total, count(*) filter (where procedure.record_state = 'incomplete')::int as incomplete
+    `select count(*)::int as total, count(*) filter (where procedure.record_state = 'incomplete')::int as incomplete,
+            count(*) filter (where procedure.is_manual)::int as "enteredByHand"
        from procedure where ${parts.join(' and ')}`,
     values,
   );

@@ -118,7 +118,11 @@ export const procedurePageSchema = z.object({
 });
 export type ProcedurePage = z.infer<typeof procedurePageSchema>;
 
-export const procedureCountSchema = z.object({ total: z.int(), incomplete: z.int() });
+export const procedureCountSchema = z.object({
+  total: z.int(),
+  incomplete: z.int(),
+  enteredByHand: z.int(),
+});
 
 /** The totals of one plane of one machine: as reported, as summed over events, and corrected. */
 const totals = z.object({

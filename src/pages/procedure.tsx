@@ -3,6 +3,7 @@ import { useParams } from 'react-router-dom';
 import { idSchema } from '../../shared/contract/common';
 import type { Procedure } from '../../shared/contract/procedure';
 import { can, scopeOf } from '../../shared/permissions';
+import { EnteredSection } from '../features/manual-entry/entered-section';
 import { AttentionReasons } from '../features/procedure/attention-reasons';
 import { DataChecksNote } from '../features/procedure/data-checks-note';
 import { EventsSection } from '../features/procedure/events-section';
@@ -21,6 +22,7 @@ import { NotFound } from '../frame/not-found';
 import { Page } from '../frame/page';
 import { paths } from '../paths';
 import { ButtonLink } from '../ui/button';
+import { EnteredByHand } from '../ui/entered-by-hand';
 
 export function Component() {
   const { id = '' } = useParams();
@@ -46,11 +48,19 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
       title={nameProcedure(procedure)}
       eyebrow={describePlace(procedure)}
       lead={<Lead procedure={procedure} />}
-      deeds={canComplete && recordLink}
+      deeds={
+        <>
+          {canEnter(user, procedure) && (
+            <ButtonLink to={paths.enterFigures(procedure.id)}>Enter the figures by hand</ButtonLink>
+          )}
+          {canComplete && recordLink}
+        </>
+      }
       margin={<Margin procedure={procedure} />}
     >
       <TotalsSection procedure={procedure} />
-      <EventsSection procedure={procedure} />
+      <EnteredFigures procedure={procedure} />
+      {!procedure.isManual && <EventsSection procedure={procedure} />}
       <ExposureSection
         procedureId={procedure.id}
         next={
@@ -58,6 +68,35 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
         }
       />
     </Page>
+  );
+}
+
+/** Where no report tells any figure. */
+const canEnter = (user: Parameters<typeof can>[0], { planes, isManual, isWithdrawn }: Procedure) =>
+  can(user, 'procedure.enter-by-hand') &&
+  !isManual &&
+  !isWithdrawn &&
+  planes.every(({ displayed }) => Object.values(displayed).every((value) => value === null));
+
+function EnteredFigures({ procedure }: { procedure: Procedure }) {
+  const user = useUser();
+  const { hospital } = useSession();
+  if (!procedure.isManual && !procedure.reports.some(({ isManual }) => isManual)) return null;
+  return (
+    <EnteredSection
+      procedureId={procedure.id}
+      timeZone={hospital?.timeZone ?? 'UTC'}
+      isCounted={procedure.isManual}
+      correct={
+        can(user, 'procedure.enter-by-hand')
+          ? (entryId) => (
+              <ButtonLink isSmall to={paths.correctEntry(procedure.id, entryId)}>
+                Correct what was typed
+              </ButtonLink>
+            )
+          : null
+      }
+    />
   );
 }
 
@@ -73,6 +112,11 @@ const Lead = ({ procedure }: { procedure: Procedure }) => (
         .filter(Boolean)
         .join(' · ')}
     </p>
+    {procedure.isManual && (
+      <p className="text-base text-ink">
+        <EnteredByHand words="Entered by hand: no report came." />
+      </p>
+    )}
     {procedure.isWithdrawn && (
       <p className="font-semibold text-ink">Withdrawn: it counts in no list and no statistic.</p>
     )}

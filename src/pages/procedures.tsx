@@ -20,9 +20,12 @@ import { uploads } from '../features/uploads/uploads';
 import { Page } from '../frame/page';
 import { kvpShadeLimits } from '../lib/kvp-shades';
 import { useUrlFilter } from '../lib/url-filter';
+import { paths } from '../paths';
+import { ButtonLink } from '../ui/button';
 import { Caution } from '../ui/caution';
 import { FileDrop } from '../ui/file-drop';
 import { MarginNote } from '../ui/margin-note';
+import { TextLink } from '../ui/text-link';
 
 export function Component() {
   const user = useUser();
@@ -34,6 +37,7 @@ export function Component() {
   const { data: types = [] } = useQuery(procedureTypeQueries.list());
   const { data: people = [] } = useQuery({ ...personQueries.choices(), enabled: can(user, 'person.choose') });
   const canReceive = can(user, 'dose-report.receive');
+  const canEnter = can(user, 'procedure.enter-by-hand');
   const ledger = (openPicker: (() => void) | null) => (
     <Page
       title="Procedures"
@@ -55,6 +59,11 @@ export function Component() {
             }
           />
           {openPicker && <UploadBrief onChoose={openPicker} />}
+          {canEnter && (
+            <TextLink to={paths.enterByHand} className="target self-start margin:hidden">
+              No report? Enter by hand
+            </TextLink>
+          )}
         </div>
       }
       deeds={
@@ -65,7 +74,9 @@ export function Component() {
           canFindPatients={can(user, 'procedure.read-patient')}
         />
       }
-      margin={<LedgerMargin upload={openPicker && <UploadPanel onChoose={openPicker} />} />}
+      margin={
+        <LedgerMargin upload={openPicker && <UploadPanel onChoose={openPicker} />} canEnter={canEnter} />
+      }
     >
       <LedgerTable
         filter={shown}
@@ -84,9 +95,15 @@ export function Component() {
   );
 }
 
-const LedgerMargin = ({ upload }: { upload: ReactNode }) => (
+const LedgerMargin = ({ upload, canEnter }: { upload: ReactNode; canEnter: boolean }) => (
   <>
     {upload}
+    {canEnter && (
+      <MarginNote title="No dose report?">
+        <p className="text-sm text-ink-2">For a machine that writes none, or whose report is lost.</p>
+        <ButtonLink to={paths.enterByHand}>Enter by hand</ButtonLink>
+      </MarginNote>
+    )}
     <MarginNote title="The strip, explained once">
       <StripLegend
         plainName="fluoroscopy"

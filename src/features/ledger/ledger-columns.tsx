@@ -9,9 +9,10 @@ import { formatDate, formatTime } from '../../lib/clock';
 import { AttentionMark } from '../../ui/attention-mark';
 import type { Column } from '../../ui/data-table.types';
 import { Quantity } from '../../ui/quantity';
+import { EnteredByHand } from '../../ui/entered-by-hand';
 import { QuantitySign } from '../../ui/quantity-sign';
 import { LedgerStrip } from './ledger-strip';
-import { describeRecordState } from './ledger-words';
+import { describeRecordState, describeTimeBasis } from './ledger-words';
 
 // An upright tablet has no room for them; they stand on the procedure's own page.
 const tooWideForTablets = 'md:max-lg:hidden';
@@ -21,14 +22,12 @@ const started: Column<ProcedureRow> = {
   head: 'Started',
   sortKey: 'started',
   firstOrder: 'descending',
-  cell: ({ startedAt, timeBasis, caseNumber }) => (
+  cell: ({ startedAt, timeBasis, caseNumber, isManual }) => (
     <span className="whitespace-nowrap">
       {formatDate(startedAt)} <span className="text-ink-2">{formatTime(startedAt)}</span>
       <span className="text-sm text-ink-2 max-md:ml-3 md:block">{caseNumber}</span>
       {timeBasis !== 'event' && (
-        <span className="block text-xs text-ink-2">
-          {timeBasis === 'study' ? 'time of the study' : 'time of receipt'}
-        </span>
+        <span className="block text-xs text-ink-2">{describeTimeBasis(timeBasis, isManual)}</span>
       )}
     </span>
   ),
@@ -47,11 +46,16 @@ const procedure: Column<ProcedureRow> = {
   head: 'Procedure',
   phone: 'title',
   className: 'md:min-w-36 margin:min-w-52',
-  cell: ({ procedureType, studyDescription, procedureClass, patient }) => (
+  cell: ({ procedureType, studyDescription, procedureClass, patient, isManual }) => (
     <>
       {procedureType?.name ?? studyDescription ?? 'Type not recorded'}
       {procedureClass !== 'clinical' && (
         <span className="block text-sm font-normal text-ink-2">{procedureClass.replace('-', ' ')}</span>
+      )}
+      {isManual && (
+        <span className="block text-sm font-normal">
+          <EnteredByHand />
+        </span>
       )}
       {patient && <PatientLine patient={patient} />}
     </>
@@ -118,7 +122,7 @@ const strip: Column<ProcedureRow> = {
   unit: 'time along, rate up',
   phone: 'wide',
   className: tooWideForTablets,
-  cell: (row) => <LedgerStrip strip={row.strip} />,
+  cell: (row) => <LedgerStrip strip={row.strip} isManual={row.isManual} />,
 };
 
 const attention: Column<ProcedureRow> = {

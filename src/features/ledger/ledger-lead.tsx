@@ -1,7 +1,7 @@
 import { describeIncomplete, describeTotal } from './ledger-words';
 
 type LedgerLeadProps = {
-  count: { total: number; incomplete: number };
+  count: { total: number; incomplete: number; enteredByHand: number };
   /** Null where they are all that is shown already. */
   onShowIncomplete: (() => void) | null;
 };
@@ -11,7 +11,7 @@ export function LedgerLead({ count, onShowIncomplete }: LedgerLeadProps) {
   const incomplete = describeIncomplete(count.incomplete);
   return (
     <p>
-      <span role="status">{describeTotal(count.total)}</span>{' '}
+      <span role="status">{describeTotal(count.total, count.enteredByHand)}</span>{' '}
       {incomplete && onShowIncomplete && (
         <button type="button" className="link-line target" onClick={onShowIncomplete}>
           {incomplete}

@@ -23,7 +23,7 @@ function describe(strip: Strip): string {
 }
 
 /** A procedure in one picture, drawn to its own scale, which stands below it. */
-export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
+export const LedgerStrip = ({ strip, isManual }: Pick<ProcedureRow, 'strip' | 'isManual'>) =>
   strip ? (
     // Narrower where the page has no margin column yet.
     <div className="md:w-[8.5rem] margin:w-[10.5rem] [&>svg]:w-full">
@@ -43,5 +43,5 @@ export const LedgerStrip = ({ strip }: Pick<ProcedureRow, 'strip'>) =>
       </span>
     </div>
   ) : (
-    <span className="text-sm text-ink-2">no events with a rate</span>
+    <span className="text-sm text-ink-2">{isManual ? 'none, entered by hand' : 'no events with a rate'}</span>
   );

@@ -17,11 +17,12 @@ test('an incomplete record says what it needs', () => {
 });
 
 test('the count speaks of one as of one and groups thousands', () => {
-  expect([0, 1, 7356].map(describeTotal)).toEqual([
+  expect([0, 1, 7356].map((total) => describeTotal(total))).toEqual([
     '0 procedures.',
     '1 procedure.',
     '7\u202f356 procedures.',
   ]);
+  expect(describeTotal(918, 12)).toBe('918 procedures, 12 of them entered by hand.');
   expect([0, 1, 2].map(describeIncomplete)).toEqual([null, '1 needs details', '2 need details']);
 });
 

@@ -79,8 +79,16 @@ export function describeRecordState({
 }
 
 /** "7 356 procedures." */
-export const describeTotal = (total: number): string =>
-  `${formatInteger(total)} ${total === 1 ? 'procedure' : 'procedures'}.`;
+export function describeTotal(total: number, enteredByHand = 0): string {
+  const typed = enteredByHand === 0 ? '' : `, ${formatInteger(enteredByHand)} of them entered by hand`;
+  return `${formatInteger(total)} ${total === 1 ? 'procedure' : 'procedures'}${typed}.`;
+}
+
+/** Where the start of a procedure comes from, where no event tells it. */
+export function describeTimeBasis(basis: ProcedureRow['timeBasis'], isManual: boolean): string {
+  if (isManual) return 'time as typed';
+  return basis === 'study' ? 'time of the study' : 'time of receipt';
+}
 
 /** "17 need details"; null when nothing is outstanding. */
 export const describeIncomplete = (incomplete: number): string | null =>

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 import type { ManualEntry, TypedQuantity } from '../../../shared/contract/manual-entry';
 import { formatDateTime, formatInstant } from '../../lib/clock';
 import { DefinitionList, DefinitionRow } from '../../ui/definition-row';
-import { DrawnSign } from '../../ui/drawn-signs';
+import { EnteredByHand } from '../../ui/entered-by-hand';
 import { Section } from '../../ui/margin-note';
 import { ProblemNote } from '../../ui/problem-note';
 import { quantityNames, writeConverted, writeTyped } from './conversion-words';
@@ -58,15 +58,7 @@ export function EnteredSection({ procedureId, timeZone, isCounted, correct }: En
   const current = entries?.filter(({ isCurrent }) => isCurrent) ?? [];
   const earlier = entries?.filter(({ isCurrent }) => !isCurrent) ?? [];
   return (
-    <Section
-      title={
-        <>
-          <DrawnSign name="entered by hand" />
-          Entered by hand
-        </>
-      }
-      aside={current[0] && correct?.(current[0].id)}
-    >
+    <Section title={<EnteredByHand words="Entered by hand" />} aside={current[0] && correct?.(current[0].id)}>
       <p>
         {isCounted
           ? 'No report came. There are no irradiation events, so there is no strip and no kVp, and the staff estimate rests on the totals.'

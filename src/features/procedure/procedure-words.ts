@@ -34,9 +34,10 @@ export function describeTime({
   startedAt,
   endedAt,
   timeBasis,
-}: Pick<Procedure, 'startedAt' | 'endedAt' | 'timeBasis'>): string {
+  isManual,
+}: Pick<Procedure, 'startedAt' | 'endedAt' | 'timeBasis'> & { isManual?: boolean }): string {
   const start = formatDateTime(startedAt);
-  const note = timeNotes[timeBasis];
+  const note = isManual ? ' (as typed)' : timeNotes[timeBasis];
   if (endedAt === null || formatDateTime(endedAt) === start) return start + note;
   const isSameDay = endedAt.slice(0, 10) === startedAt.slice(0, 10);
   return `${start}–${isSameDay ? formatTime(endedAt) : formatDateTime(endedAt)}${note}`;

@@ -16,7 +16,7 @@ export const ReportsNote = ({ reports, timeZone, originalHref }: ReportsNoteProp
     <ul>
       {reports.map((report) => (
         <li key={report.id} className="border-b border-rule py-1.5 text-sm">
-          Received {formatInstant(report.receivedAt, timeZone)}
+          {report.isManual ? 'Entered by hand' : 'Received'} {formatInstant(report.receivedAt, timeZone)}
           <span className="block text-ink-2">
             {report.counts ? 'its totals count' : 'superseded: its totals do not count'}
             {report.isGenerated && '; generated for the demo, no file behind it'}
