@@ -1,3 +1,4 @@
+import { isUtf8 } from 'node:buffer';
 import type { WarningCode } from '../../shared/contract/outcome';
 import { decodeWithEscapes } from './code-extensions';
 import type { SliceableBuffer } from './latin1-text';
@@ -22,6 +23,9 @@ const encodings = new Map([
   ['GBK', 'gbk'],
 ]);
 
+const utf8 = new TextDecoder('utf-8');
+const windows1252 = new TextDecoder('windows-1252');
+
 export interface TextReader {
   decode(bytes: Uint8Array): string;
 }
@@ -37,11 +41,7 @@ function isAscii(bytes: Uint8Array, start: number, end: number): boolean {
 }
 
 function decodeUtf8(bytes: Uint8Array): string | null {
-  try {
-    return new TextDecoder('utf-8', { fatal: true }).decode(bytes);
-  } catch {
-    return null;
-  }
+  return isUtf8(bytes) ? utf8.decode(bytes) : null;
 }
 
 /** NUL cannot be stored and pads odd lengths; trailing blanks are padding by the standard. */
@@ -55,7 +55,7 @@ function trimPadding(text: string): string {
 
 /** UTF-8 if the bytes are that, else Windows-1252: the two that undeclared bytes turn out to be. */
 function decodeUndeclared(bytes: Uint8Array): string {
-  return decodeUtf8(bytes) ?? new TextDecoder('windows-1252').decode(bytes);
+  return decodeUtf8(bytes) ?? windows1252.decode(bytes);
 }
 
 function readerOf(terms: string[], notice: CharacterSetNotice): (bytes: Uint8Array) => string {
@@ -79,7 +79,7 @@ function readerOf(terms: string[], notice: CharacterSetNotice): (bytes: Uint8Arr
       const text = decodeUtf8(bytes);
       if (text !== null) return text;
       notice('character-set-wrong', `declared ${first}`);
-      return new TextDecoder('windows-1252').decode(bytes);
+      return windows1252.decode(bytes);
     };
   }
   const decoder = new TextDecoder(encoding);

@@ -11,7 +11,7 @@ const ascii: GraphicSet = { bytesPerCharacter: 1, encoding: 'windows-1252', half
 const single = (encoding: string): GraphicSet => ({ bytesPerCharacter: 1, encoding, half: 'G1' });
 
 /** Escape sequences without the leading ESC (PS3.3 C.12.1.1.2, tables C.12-3 and C.12-4). */
-const escapes: [string, GraphicSet][] = [
+const escapes = new Map<string, GraphicSet>([
   ['(B', ascii],
   ['(J', ascii],
   [')I', single('shift_jis')],
@@ -31,20 +31,67 @@ const escapes: [string, GraphicSet][] = [
   ['$(D', { bytesPerCharacter: 2, encoding: 'euc-jp', prefix: 0x8f, half: 'G0' }],
   ['$)C', { bytesPerCharacter: 2, encoding: 'euc-kr', half: 'G1' }],
   ['$)A', { bytesPerCharacter: 2, encoding: 'gbk', half: 'G1' }],
-];
+]);
 
 const ESC = 0x1b;
 /** PS3.5 6.1.2.5.3: after these the sets of the first value count again. */
 const delimiters = new Set([0x5c, 0x5e, 0x3d, 0x0a, 0x0c, 0x0d, 0x09]);
 
-function decode(encoding: string, bytes: number[]): string {
-  return new TextDecoder(encoding).decode(Uint8Array.from(bytes));
+const decoders = new Map<string, InstanceType<typeof TextDecoder>>();
+
+function decoderFor(encoding: string): InstanceType<typeof TextDecoder> {
+  let decoder = decoders.get(encoding);
+  if (!decoder) decoders.set(encoding, (decoder = new TextDecoder(encoding)));
+  return decoder;
 }
 
-function findEscape(bytes: Uint8Array, position: number): [string, GraphicSet] | undefined {
-  return escapes.find(([sequence]) =>
-    [...sequence].every((letter, index) => bytes[position + 1 + index] === letter.charCodeAt(0)),
-  );
+/** The bytes of an escape sequence as one number; comparing those is cheaper than comparing texts. */
+const keyOf = (letters: Iterable<number>) => [...letters].reduce((key, letter) => (key << 8) | letter, 0);
+const setsByKey = new Map([...escapes].map(([letters, set]) => [keyOf(Buffer.from(letters)), set]));
+
+/** The set that the escape sequence behind an ESC at this position calls in, and its letters: two or three. */
+function findEscape(bytes: Uint8Array, position: number): { set: GraphicSet; length: number } | null {
+  const two = ((bytes[position + 1] ?? 0) << 8) | (bytes[position + 2] ?? 0);
+  const three = (two << 8) | (bytes[position + 3] ?? 0);
+  const long = setsByKey.get(three);
+  if (long) return { set: long, length: 3 };
+  const short = setsByKey.get(two);
+  return short ? { set: short, length: 2 } : null;
+}
+
+/** Gathers bytes of one encoding after the other and decodes each stretch at once. */
+class StretchDecoder {
+  private readonly stretch: Uint8Array;
+  private length = 0;
+  private encoding = ascii.encoding;
+  private readonly texts: string[] = [];
+
+  constructor(mostBytes: number) {
+    this.stretch = new Uint8Array(mostBytes);
+  }
+
+  add(byte: number): void {
+    this.stretch[this.length] = byte;
+    this.length += 1;
+  }
+
+  /** What is added from now on is in this encoding. */
+  use(encoding: string): void {
+    if (encoding === this.encoding) return;
+    this.flush();
+    this.encoding = encoding;
+  }
+
+  finish(): string {
+    this.flush();
+    return this.texts.join('');
+  }
+
+  private flush(): void {
+    if (this.length === 0) return;
+    this.texts.push(decoderFor(this.encoding).decode(this.stretch.subarray(0, this.length)));
+    this.length = 0;
+  }
 }
 
 /**
@@ -55,33 +102,34 @@ export function decodeWithEscapes(bytes: Uint8Array, initialHigh: string): strin
   const startHigh = single(initialHigh);
   let low = ascii;
   let high = startHigh;
-  let text = '';
+  // A two-byte character may grow by its prefix.
+  const decoder = new StretchDecoder(bytes.length * 2);
   let position = 0;
   while (position < bytes.length) {
     const byte = bytes[position] as number;
     if (byte === ESC) {
       const found = findEscape(bytes, position);
-      if (found?.[1].half === 'G0') low = found[1];
-      if (found?.[1].half === 'G1') high = found[1];
-      position += found ? 1 + found[0].length : 1;
+      if (found?.set.half === 'G0') low = found.set;
+      if (found?.set.half === 'G1') high = found.set;
+      position += 1 + (found?.length ?? 0);
       continue;
     }
-    const isHigh = byte >= 0x80;
-    const set = isHigh ? high : low;
     // Control characters are never part of a two-byte character.
-    const isControl = !isHigh && byte < 0x21;
-    const size = isControl ? 1 : set.bytesPerCharacter;
-    const own = [...bytes.subarray(position, position + size)];
-    const isDouble = size === 2;
-    text += decode(
-      isControl ? 'windows-1252' : set.encoding,
-      isDouble ? [...(set.prefix ? [set.prefix] : []), ...own.map((one) => one | 0x80)] : own,
-    );
-    position += size;
-    if (!isDouble && delimiters.has(byte)) {
-      low = ascii;
-      high = startHigh;
+    const set = byte < 0x21 ? ascii : byte < 0x80 ? low : high;
+    // ASCII is the same in every encoding used here, so that it does not end a stretch.
+    if (set !== ascii) decoder.use(set.encoding);
+    if (set.bytesPerCharacter === 2) {
+      if (set.prefix) decoder.add(set.prefix);
+      decoder.add(byte | 0x80);
+      if (position + 1 < bytes.length) decoder.add((bytes[position + 1] as number) | 0x80);
+    } else {
+      decoder.add(byte);
+      if (delimiters.has(byte)) {
+        low = ascii;
+        high = startHigh;
+      }
     }
+    position += set.bytesPerCharacter;
   }
-  return text;
+  return decoder.finish();
 }

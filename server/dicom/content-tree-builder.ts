@@ -35,6 +35,12 @@ function isRead(outer: number, tag: number): boolean {
   return outer === tags.measuredValues && tag === tags.unitCodes;
 }
 
+/** True for an item that says nothing: kept by the hundred thousand, such items would only fill memory. */
+function isBlank(item: ContentItem): boolean {
+  const { concept, code, text, children } = item;
+  return concept === null && code === null && text === null && children.length === 0;
+}
+
 /** Builds the content tree (PS3.3 C.17.3) while a data set is scanned. */
 export class ContentTreeBuilder implements DataSetVisitor {
   /** For each open sequence and item the tag of the sequence; the data set counts as an item of the content. */
@@ -132,7 +138,7 @@ export class ContentTreeBuilder implements DataSetVisitor {
     if (current.outer === null) return;
     this.current = current.outer;
     if (current.isPlaceOfEvents && item.name === 'event') this.listener.takeEvent(item);
-    else this.current.item?.children.push(item);
+    else if (!isBlank(item)) this.current.item?.children.push(item);
   }
 
   /** What an item is stands before its children: none of its attributes sorts after the content sequence. */

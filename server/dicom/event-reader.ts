@@ -1,6 +1,8 @@
 import type { ReportEvent } from '../../shared/contract/report-event';
 import type { ContentItem } from './content-tree';
+import { limits } from './limits';
 import { parseIrradiationEvent } from './parse-irradiation-event';
+import { ReadFailure } from './read-failure';
 import type { WarningCollector } from './warning-collector';
 
 /** Reads the irradiation events of a report one after the other, in the order of the file. */
@@ -14,6 +16,8 @@ export class EventReader {
 
   add(item: ContentItem): void {
     const { warnings } = this;
+    if (this.events.length === limits.events)
+      throw new ReadFailure('limit-items', `more than ${limits.events} irradiation events`);
     warnings.atEvent(this.events.length + 1);
     const event = parseIrradiationEvent(item, this.utcOffset, warnings);
     if (event.irradiationEventUid !== null) {

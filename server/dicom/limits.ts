@@ -6,8 +6,10 @@ export const limits = {
   /** dicom-parser descends by recursion and overflows at a depth of about 2,000. */
   depth: 64,
   items: 1_000_000,
+  /** Irradiation events; a long interventional case has some hundreds. */
+  events: 10_000,
   /** Elements before the content, those of nested items included: the DICOM library makes an object of each. */
-  headerElements: 100_000,
+  headerElements: 30_000,
   inflatedBytes: 64 * 1024 * 1024,
   textBytes: 1024 * 1024,
 } as const;
