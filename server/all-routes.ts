@@ -1,6 +1,7 @@
 import type { Authenticator } from './http/passport';
 import { attachmentRoutes } from './attachments/attachment.routes';
 import { dataCheckRoutes } from './data-checks/data-check.routes';
+import { decideReportRoutes } from './dose-reports/decide-report.routes';
 import { doseReportRoutes } from './dose-reports/dose-report.routes';
 import { equipmentRoutes } from './equipment/equipment.routes';
 import { garmentRoutes } from './garments/garment.routes';
@@ -24,6 +25,7 @@ export const allRoutes = ({ authenticator, throttle, version }: Parts): Route[] 
   ...sessionRoutes(authenticator, throttle),
   ...personRoutes,
   ...doseReportRoutes,
+  ...decideReportRoutes,
   ...procedureRoutes,
   ...regroupingRoutes,
   ...dataCheckRoutes,

@@ -5,10 +5,11 @@ import type { Db } from '../db/db';
 import { findOrAddEquipment } from '../equipment/equipment-identity.store';
 import { findHospital } from '../hospital/hospital.store';
 import { addEvents } from '../procedures/irradiation-event.store';
-import { findProcedure } from '../procedures/procedure.store';
+import { findProcedure, lockHeir } from '../procedures/procedure.store';
 import { recomputeProcedure } from '../procedures/recompute-procedure';
 import { refreshEstimates } from '../staff-exposure/refresh-estimates';
 import { readerVersion } from '../dicom/reader-version';
+import { findDecision } from './decide.store';
 import type { DoseReport, ReportContext } from './dose-report.entity';
 import { findStoredInstance, settle } from './dose-report.store';
 import { toEventRows } from './event-rows';
@@ -24,12 +25,16 @@ export function contextOf({ patient: _, planes: __, events: ___, ...context }: R
   return context;
 }
 
-/** The second commit: report, procedure, events, totals, audit line, all or nothing. */
+/**
+ * The second commit: report, procedure, events, totals, audit line, all or nothing. `into` names the procedure where
+ * a person decided about it; else the report is matched.
+ */
 export const importDoseReport = (
   db: Db,
   arrival: DoseReport,
   read: ReadReport,
   now: Date,
+  into: string | null = null,
 ): Promise<Imported> =>
   db.transaction(async (tx) => {
     const { report, warnings, contentHash } = read;
@@ -40,7 +45,9 @@ export const importDoseReport = (
 
     const hospital = await findHospital(tx, hospitalId);
     const equipment = await findOrAddEquipment(tx, hospitalId, report.equipment);
-    const procedure = await matchProcedure(tx, hospital, report, equipment, arrival.receivedAt);
+    const procedure =
+      (into && (await lockHeir(tx, hospitalId, into))) ||
+      (await matchProcedure(tx, hospital, report, equipment, arrival.receivedAt));
     const events = await toEventRows(report, arrival.id, hospital.timeZone, procedure.startedAt);
     await settle(tx, arrival.id, {
       outcome: 'stored',
@@ -93,7 +100,9 @@ async function settleAgainst(
     });
     return { outcome: 'duplicate', procedureId: stored.procedureId };
   }
-  const code = 'sop-instance-conflict';
+  // What a person decided about this content holds for its copies too.
+  const decided = await findDecision(tx, arrival.hospitalId, sopInstanceUid, contentHash);
+  const code = decided ?? 'sop-instance-conflict';
   await settle(tx, arrival.id, {
     outcome: 'held',
     sopInstanceUid,

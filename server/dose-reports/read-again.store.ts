@@ -13,7 +13,7 @@ const candidates = `
   from dose_report report
  where report.hospital_id = $1 and report.original_file_id is not null and report.channel = 'page'
    and report."outcome" in ('stored', 'held', 'refused')
-   and report.reason_code is distinct from 'sop-instance-conflict'
+   and coalesce(report.reason_code, '') not like 'sop-instance-%'
    and (report."outcome" = 'held' or report.reader_version is distinct from $2)
    and not coalesce(${hopeless}, false)`;
 

@@ -120,6 +120,16 @@ export const reasons = {
     sentence:
       'A report with the same identity but other content is already stored. Both were kept, nothing was overwritten. The physicist decides which one counts.',
   },
+  'sop-instance-declined': {
+    outcome: 'held',
+    sentence:
+      'The physicist compared this report with the stored one of the same identity and let the stored one count. Both are kept, and it can be decided anew.',
+  },
+  'sop-instance-replaced': {
+    outcome: 'held',
+    sentence:
+      'The physicist put another report of the same identity in the place of this one. Both are kept, and this one can be put back.',
+  },
   'reader-failure': {
     outcome: 'held',
     sentence:
