@@ -33,9 +33,16 @@ describe('readEnvironment', () => {
     ['LEEWARD_DEMO', 'maybe'],
     ['DEMO_ANCHOR', '2026-02-30'],
     ['LOG_LEVEL', 'loud'],
+    ['REFUSED_KEEP_DAYS', '-1'],
+    ['ARCHIVE_UNPACKED_MB', '0'],
     ['TLS_CERT_FILE', 'cert.pem'],
   ])('refuses %s=%s and names the variable', (name, value) => {
     expect(() => readEnvironment({ [name]: value })).toThrow(new RegExp(`^${name} `));
+  });
+
+  it('keeps refused bytes for half a year and unpacks 200 MB unless told otherwise', () => {
+    expect(readEnvironment({})).toMatchObject({ refusedKeepDays: 180, archiveUnpackedBytes: 209_715_200 });
+    expect(readEnvironment({ REFUSED_KEEP_DAYS: '0' }).refusedKeepDays).toBe(0);
   });
 
   it('names everything that is wrong at once', () => {

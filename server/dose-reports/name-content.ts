@@ -73,12 +73,8 @@ export function nameZipDocument(paths: readonly string[]): string | null {
 export const sentenceForContent = (name: string): string =>
   `This is ${name}, not a DICOM file. It was kept unread. ${stepFor(name)}`;
 
-const directoryClass = '1.2.840.10008.1.3.10';
-
-/** Whether a DICOM file is a disc's table of contents (Media Storage Directory, PS3.10). */
-export const isDicomDirectory = (bytes: Buffer): boolean =>
-  bytes.subarray(0, 1024).includes(`${directoryClass}\0`) ||
-  bytes.subarray(0, 1024).includes(`${directoryClass} `);
+/** Whether the reader, asked why, named the SOP class of a disc's table of contents (Media Storage Directory, PS3.10). */
+export const isDicomDirectory = (detail: string): boolean => /\b1\.2\.840\.10008\.1\.3\.10$/.test(detail);
 
 export const dicomDirectorySentence =
   'This is the table of contents of a DICOM disc (DICOMDIR). It was kept unread. Send the files beside it, or the whole folder.';

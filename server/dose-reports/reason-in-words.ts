@@ -8,6 +8,6 @@ import { dicomDirectorySentence, isDicomDirectory, nameContent, sentenceForConte
 export function reasonInWords(code: ReasonCode, detail: string, bytes: Buffer): string {
   const name = code === 'not-dicom' ? nameContent(bytes) : null;
   if (name) return sentenceForContent(name);
-  if (code === 'not-structured-report' && isDicomDirectory(bytes)) return dicomDirectorySentence;
+  if (code === 'not-structured-report' && isDicomDirectory(detail)) return dicomDirectorySentence;
   return `${sentenceOfReason(code)} (${detail})`;
 }

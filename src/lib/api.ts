@@ -46,12 +46,19 @@ export function upload<Schema extends z.ZodType>(
     schema,
     onProgress,
     signal,
-  }: { schema: Schema; onProgress?: (share: number) => void; signal?: AbortSignal },
+    headers = {},
+  }: {
+    schema: Schema;
+    onProgress?: (share: number) => void;
+    signal?: AbortSignal;
+    headers?: Record<string, string>;
+  },
 ): Promise<z.output<Schema>> {
   return new Promise((resolve, reject) => {
     const sender = new XMLHttpRequest();
     sender.open('POST', path);
     sender.setRequestHeader('accept', 'application/json');
+    for (const [name, value] of Object.entries(headers)) sender.setRequestHeader(name, value);
     sender.upload.addEventListener('progress', (event) => {
       if (event.lengthComputable && event.total > 0) onProgress?.(event.loaded / event.total);
     });

@@ -14,8 +14,7 @@ export function FolderButton({ onFiles }: { onFiles: (files: File[]) => void }) 
         hidden
         aria-label="Choose a folder"
         onChange={({ target }) => {
-          // Files that only the file system of the folder knows are nobody's dose report.
-          onFiles([...(target.files ?? [])].filter(({ name }) => !name.startsWith('.')));
+          onFiles([...(target.files ?? [])]);
           // The same folder can be chosen again.
           target.value = '';
         }}

@@ -3,26 +3,31 @@ import { Button } from '../../ui/button';
 import { Checkbox } from '../../ui/checkbox';
 import { MarginNote } from '../../ui/margin-note';
 import { ProgressBar } from '../../ui/progress-bar';
-import { describeUploads } from './describe-uploads';
+import { describeSkipped, describeUploads, shareOf } from './describe-uploads';
 import { FolderButton } from './folder-button';
-import { isTrouble, UploadLine } from './upload-line';
-import type { Upload } from './upload-store';
-import { uploads, useUploads } from './uploads';
+import { writeOutcomeList } from './outcome-list';
+import { UploadList } from './upload-list';
+import { isTrouble } from './upload-line';
+import { isUnderWay, type Upload } from './upload.types';
+import { uploads, useUploadNotes, useUploads } from './uploads';
 
 /** Where dose reports are handed over, and what became of each. */
 export function UploadPanel({ onChoose }: { onChoose: () => void }) {
   const items = useUploads();
+  const { skippedCount } = useUploadNotes();
   return (
     <>
       <MarginNote title="Hand over dose reports">
-        <p className="text-sm text-ink-2">Drop files or folders anywhere on this page, one or hundreds.</p>
+        <p className="text-sm text-ink-2">
+          Drop files, folders or zip archives anywhere on this page, one or hundreds.
+        </p>
         <Button variant="primary" onClick={onChoose}>
           Choose files
         </Button>
         <FolderButton onFiles={uploads.add} />
         <p className="text-sm text-ink-2">Every file is kept, also one that cannot be read.</p>
       </MarginNote>
-      {items.length > 0 && (
+      {items.length + skippedCount > 0 && (
         <div id="just-received">
           <MarginNote title="Just received">
             <Received items={items} />
@@ -35,38 +40,41 @@ export function UploadPanel({ onChoose }: { onChoose: () => void }) {
 
 function Received({ items }: { items: readonly Upload[] }) {
   const [isTroubleOnly, setTroubleOnly] = useState(false);
-  const troubles = items.filter(isTrouble);
-  const done = items.filter(({ state }) => state === 'answered' || state === 'failed').length;
-  const shown = isTroubleOnly && troubles.length > 0 ? troubles : items;
+  const { isPaused, skippedCount } = useUploadNotes();
+  const isAnyTrouble = items.some(isTrouble);
+  const isDone = !items.some(isUnderWay);
+  const skipped = describeSkipped(skippedCount);
   return (
     <>
       <p role="status" className="text-sm">
-        {describeUploads(items)}
+        {items.length > 0 && describeUploads(items)} {skipped}
       </p>
-      {done < items.length && <ProgressBar share={done / items.length} label="All files" />}
-      {troubles.length > 0 && troubles.length < items.length && (
+      {isPaused && (
+        <p role="alert" className="text-sm font-semibold text-beacon">
+          The server does not answer. What waits goes on by itself as soon as it does; leave this page open.
+        </p>
+      )}
+      {!isDone && <ProgressBar share={shareOf(items)} label="All files" />}
+      {isAnyTrouble && (
         <Checkbox
-          label="Only what was not stored"
+          label="Only what needs attention"
           checked={isTroubleOnly}
           onChange={(event) => setTroubleOnly(event.target.checked)}
         />
       )}
-      <ul
-        className="flex max-h-[28rem] flex-col gap-2 overflow-y-auto"
-        tabIndex={0}
-        aria-label="Files and their outcomes"
-      >
-        {shown.map((item) => (
-          <UploadLine key={item.key} item={item} />
-        ))}
-      </ul>
-      <div className="flex flex-wrap gap-2">
+      {items.length > 0 && <UploadList items={items} isTroubleOnly={isTroubleOnly && isAnyTrouble} />}
+      <div className="flex flex-wrap items-center gap-2">
         {items.some(({ state }) => state === 'failed') && (
           <Button isSmall onClick={uploads.sendFailedAgain}>
             Send again what was not sent
           </Button>
         )}
-        {done > 0 && (
+        {items.some(({ results }) => results.length > 0) && (
+          <Button isSmall onClick={() => saveOutcomeList(items)}>
+            Save this list
+          </Button>
+        )}
+        {items.every((item) => !isUnderWay(item)) && (
           <Button isSmall onClick={uploads.clear}>
             Clear this list
           </Button>
@@ -74,4 +82,15 @@ function Received({ items }: { items: readonly Upload[] }) {
       </div>
     </>
   );
+}
+
+/** Hands the list to the browser as a file; it never leaves this machine. */
+function saveOutcomeList(items: readonly Upload[]): void {
+  const text = `\uFEFF${writeOutcomeList(items, window.location.origin)}`;
+  const address = URL.createObjectURL(new Blob([text], { type: 'text/csv;charset=utf-8' }));
+  const link = document.createElement('a');
+  link.href = address;
+  link.download = 'received-files.csv';
+  link.click();
+  setTimeout(() => URL.revokeObjectURL(address), 10_000);
 }

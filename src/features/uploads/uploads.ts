@@ -1,6 +1,7 @@
 import { useSyncExternalStore } from 'react';
 import { queryClient } from '../../lib/query-client';
-import { createUploadStore, sendFile } from './upload-store';
+import { sendFile } from './send-file';
+import { createUploadStore } from './upload-store';
 
 /** Lives as long as the page: looking elsewhere does not stop an upload. */
 export const uploads = createUploadStore(sendFile, () => {
@@ -9,6 +10,7 @@ export const uploads = createUploadStore(sendFile, () => {
 });
 
 export const useUploads = () => useSyncExternalStore(uploads.subscribe, uploads.read);
+export const useUploadNotes = () => useSyncExternalStore(uploads.subscribe, uploads.readNotes);
 
 // Files still on their way exist only here: closing the tab would lose them without a word.
 window.addEventListener('beforeunload', (event) => {
