@@ -22,6 +22,8 @@ export const paths = {
   room: (id: string) => `/admin/rooms/${id}`,
   equipment: '/admin/equipment',
   machine: (id: string) => `/admin/equipment/${id}`,
+  dataChecks: '/admin/data-checks',
+  dataCheck: (code: string) => `/admin/data-checks/${code}`,
   procedureTypes: '/admin/procedure-types',
   procedureType: (id: string) => `/admin/procedure-types/${id}`,
 } as const;

@@ -30,6 +30,8 @@ const pages: RouteObject[] = [
   { path: paths.room(':id'), lazy: () => import('./pages/admin-room') },
   { path: paths.equipment, lazy: () => import('./pages/admin-equipment') },
   { path: paths.machine(':id'), lazy: () => import('./pages/admin-machine') },
+  { path: paths.dataChecks, lazy: () => import('./pages/admin-data-checks') },
+  { path: paths.dataCheck(':code'), lazy: () => import('./pages/admin-data-check') },
   { path: paths.procedureTypes, lazy: () => import('./pages/admin-procedure-types') },
   { path: paths.procedureType(':id'), lazy: () => import('./pages/admin-procedure-type') },
   { path: '*', Component: NotFound },

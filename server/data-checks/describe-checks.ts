@@ -36,6 +36,7 @@ export async function describeChecks(
     return {
       ...check,
       name: rule?.name ?? check.code,
+      remedy: rule?.remedy ?? '',
       severity: check.severity ?? rule?.severity ?? 'note',
       owner: check.owner ?? rule?.owner ?? 'physicist',
       finding: check.finding ?? null,

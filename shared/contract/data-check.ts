@@ -42,6 +42,8 @@ export type CheckSettlement = z.infer<typeof checkSettlementSchema>;
 /** One rule held against one procedure, as it was when the procedure was last computed. */
 export const dataCheckSchema = remarkSchema.extend({
   name: z.string(),
+  /** What to do about a finding. */
+  remedy: z.string(),
   result: z.enum(checkResults),
   severity: z.enum(checkSeverities),
   owner: z.enum(checkOwners),

@@ -8,6 +8,7 @@ const adminPlaces: readonly AdminPlace[] = [
   { path: paths.rooms, name: 'Rooms', action: 'room.edit' },
   { path: paths.equipment, name: 'Equipment', action: 'equipment.edit' },
   { path: paths.procedureTypes, name: 'Procedure types', action: 'procedure-type.edit' },
+  { path: paths.dataChecks, name: 'Data checks', action: 'data-check.list' },
 ];
 
 /** The registers that a person may edit, in order. */

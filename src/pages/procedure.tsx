@@ -4,8 +4,9 @@ import { idSchema } from '../../shared/contract/common';
 import type { Procedure } from '../../shared/contract/procedure';
 import { can, scopeOf } from '../../shared/permissions';
 import { EnteredSection } from '../features/manual-entry/entered-section';
+import { ChecksNote } from '../features/data-checks/checks-note';
+import { FindingsSection } from '../features/data-checks/findings-section';
 import { AttentionReasons } from '../features/procedure/attention-reasons';
-import { DataChecksNote } from '../features/procedure/data-checks-note';
 import { EventsSection } from '../features/procedure/events-section';
 import { ExposureSection } from '../features/procedure/exposure-section';
 import { FactorsNote } from '../features/procedure/factors-note';
@@ -17,11 +18,13 @@ import { procedureQueries } from '../features/procedure/queries';
 import { ReportedSummedNote } from '../features/procedure/reported-summed-note';
 import { ReportsNote } from '../features/procedure/reports-note';
 import { TotalsSection } from '../features/procedure/totals-section';
+import { RegroupDeeds } from '../features/regrouping/regroup-deeds';
 import { useSession, useUser } from '../features/session/queries';
 import { NotFound } from '../frame/not-found';
 import { Page } from '../frame/page';
 import { paths } from '../paths';
 import { ButtonLink } from '../ui/button';
+import { TextLink } from '../ui/text-link';
 import { EnteredByHand } from '../ui/entered-by-hand';
 
 export function Component() {
@@ -59,6 +62,7 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
       margin={<Margin procedure={procedure} />}
     >
       <TotalsSection procedure={procedure} />
+      <Findings procedure={procedure} />
       <EnteredFigures procedure={procedure} />
       {!procedure.isManual && <EventsSection procedure={procedure} />}
       <ExposureSection
@@ -71,11 +75,27 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
   );
 }
 
+function Findings({ procedure }: { procedure: Procedure }) {
+  const user = useUser();
+  const { hospital } = useSession();
+  return (
+    <FindingsSection
+      procedure={procedure}
+      timeZone={hospital?.timeZone ?? 'UTC'}
+      canSettle={can(user, 'data-check.settle')}
+    />
+  );
+}
+
 /** Where no report tells any figure. */
-const canEnter = (user: Parameters<typeof can>[0], { planes, isManual, isWithdrawn }: Procedure) =>
+const canEnter = (
+  user: Parameters<typeof can>[0],
+  { planes, eventCount, isManual, isWithdrawn }: Procedure,
+) =>
   can(user, 'procedure.enter-by-hand') &&
   !isManual &&
   !isWithdrawn &&
+  eventCount === 0 &&
   planes.every(({ displayed }) => Object.values(displayed).every((value) => value === null));
 
 function EnteredFigures({ procedure }: { procedure: Procedure }) {
@@ -118,7 +138,19 @@ const Lead = ({ procedure }: { procedure: Procedure }) => (
       </p>
     )}
     {procedure.isWithdrawn && (
-      <p className="font-semibold text-ink">Withdrawn: it counts in no list and no statistic.</p>
+      <p className="font-semibold text-ink">
+        Withdrawn: it counts in no list and no statistic.
+        {procedure.mergedInto && (
+          <>
+            {' '}
+            Its reports are in{' '}
+            <TextLink to={paths.procedure(procedure.mergedInto.id)}>
+              {procedure.mergedInto.caseNumber}
+            </TextLink>
+            .
+          </>
+        )}
+      </p>
     )}
     <AttentionReasons attention={procedure.attention} />
   </div>
@@ -134,7 +166,7 @@ function Margin({ procedure }: { procedure: Procedure }) {
       {patientScope !== null && (
         <PatientNote procedureId={procedure.id} isShownAtOnce={user.roles.includes('technologist')} />
       )}
-      <DataChecksNote checks={procedure.dataChecks} />
+      <ChecksNote checks={procedure.dataChecks} />
       <FactorsNote
         planes={procedure.planes}
         machineHref={can(user, 'equipment.edit') ? paths.machine : null}
@@ -144,6 +176,7 @@ function Margin({ procedure }: { procedure: Procedure }) {
         reports={procedure.reports}
         timeZone={timeZone}
         originalHref={can(user, 'dose-report.download') ? (id) => `/api/dose-reports/${id}/original` : null}
+        deeds={can(user, 'procedure.regroup') && <RegroupDeeds procedure={procedure} timeZone={timeZone} />}
       />
       {can(user, 'procedure.complete') && (
         <MarksNote procedure={procedure} canClassify={can(user, 'procedure.classify')} canWithdraw />

@@ -8,6 +8,7 @@ import {
 import { formatDate, formatTime } from '../../lib/clock';
 import { AttentionMark } from '../../ui/attention-mark';
 import type { Column } from '../../ui/data-table.types';
+import { DoubtWords } from '../../ui/doubt-words';
 import { Quantity } from '../../ui/quantity';
 import { EnteredByHand } from '../../ui/entered-by-hand';
 import { QuantitySign } from '../../ui/quantity-sign';
@@ -89,11 +90,14 @@ const figures: Column<ProcedureRow>[] = [
     align: 'end',
     sortKey: 'reference-air-kerma',
     cell: (row) => (
-      <Quantity
-        value={formatReferenceAirKermaMgy(row.referenceAirKermaGy)}
-        isUpperBound={row.isReferenceAirKermaUpperBound}
-        isCorrected={row.isCorrected}
-      />
+      <>
+        <Quantity
+          value={formatReferenceAirKermaMgy(row.referenceAirKermaGy)}
+          isUpperBound={row.isReferenceAirKermaUpperBound}
+          isCorrected={row.isCorrected}
+        />
+        <DoubtWords {...row} />
+      </>
     ),
   },
   {
@@ -103,7 +107,10 @@ const figures: Column<ProcedureRow>[] = [
     align: 'end',
     sortKey: 'kerma-area-product',
     cell: (row) => (
-      <Quantity value={formatKermaAreaProduct(row.kermaAreaProductGyCm2)} isCorrected={row.isCorrected} />
+      <>
+        <Quantity value={formatKermaAreaProduct(row.kermaAreaProductGyCm2)} isCorrected={row.isCorrected} />
+        <DoubtWords {...row} />
+      </>
     ),
   },
   {

@@ -27,6 +27,7 @@ export const attentionChoices: Choice[] = [
   { value: 'act', label: 'flagged act' },
   { value: 'notify', label: 'flagged notify' },
   { value: 'note', label: 'flagged note' },
+  { value: 'in-doubt', label: 'with a value in doubt' },
 ];
 
 export const recordChoices: Choice[] = [

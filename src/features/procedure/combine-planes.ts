@@ -9,6 +9,12 @@ export type Figures = {
 export const totalQuantities = ['fluoroscopy-time', 'reference-air-kerma', 'kerma-area-product'] as const;
 export type TotalQuantity = (typeof totalQuantities)[number];
 
+const fieldOf = {
+  'fluoroscopy-time': 'fluoroscopyTimeS',
+  'reference-air-kerma': 'referenceAirKermaGy',
+  'kerma-area-product': 'kermaAreaProductGyCm2',
+} as const;
+
 /** One quantity of one plane: as the machine displayed it, and with the physicist's factor. */
 export function readPlane(plane: PlaneTotals, quantity: TotalQuantity): Figures {
   if (quantity === 'fluoroscopy-time')
@@ -16,6 +22,12 @@ export function readPlane(plane: PlaneTotals, quantity: TotalQuantity): Figures 
   const field = quantity === 'reference-air-kerma' ? 'referenceAirKermaGy' : 'kermaAreaProductGyCm2';
   return { displayed: plane.displayed[field], corrected: plane.corrected[field] };
 }
+
+/** The total that a physicist typed in place of a wrong one; null where none was. */
+export const readSettled = (
+  { settledFigures }: Pick<Procedure, 'settledFigures'>,
+  quantity: TotalQuantity,
+): number | null => settledFigures?.[fieldOf[quantity]] ?? null;
 
 const add = (one: number, other: number): number => one + other;
 // Not Math.max itself: a fold hands over place and list as well.
@@ -55,13 +67,7 @@ export function combinePlanes(
 
 /** How far the reported total and the sum of the events lie apart, as a share of the reported; null if unknown. */
 export function findDifference(plane: PlaneTotals, quantity: TotalQuantity): number | null {
-  const field = (
-    {
-      'fluoroscopy-time': 'fluoroscopyTimeS',
-      'reference-air-kerma': 'referenceAirKermaGy',
-      'kerma-area-product': 'kermaAreaProductGyCm2',
-    } as const
-  )[quantity];
+  const field = fieldOf[quantity];
   const reported = plane.reported?.[field] ?? null;
   const summed = plane.summed[field];
   return reported === null || summed === null || reported === 0 ? null : summed / reported - 1;

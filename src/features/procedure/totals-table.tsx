@@ -2,7 +2,8 @@ import type { PlaneTotals, Procedure } from '../../../shared/contract/procedure'
 import { formatKermaAreaProduct } from '../../../shared/units';
 import { DataTable } from '../../ui/data-table';
 import type { Column } from '../../ui/data-table.types';
-import { combinePlanes, readPlane, totalQuantities, type TotalQuantity } from './combine-planes';
+import { DoubtWords } from '../../ui/doubt-words';
+import { combinePlanes, readPlane, readSettled, totalQuantities, type TotalQuantity } from './combine-planes';
 import { namePlane } from './procedure-words';
 import { quantityNames, TotalSign } from './quantity-words';
 import { TotalFigure } from './total-figure';
@@ -20,7 +21,12 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
     align: 'end',
     cell: (quantity) => (
       <span className={isOne ? 'font-semibold' : undefined}>
-        <TotalFigure figures={readPlane(plane, quantity)} quantity={quantity} />
+        <TotalFigure
+          figures={readPlane(plane, quantity)}
+          quantity={quantity}
+          settled={isOne ? readSettled(procedure, quantity) : null}
+        />
+        {isOne && <DoubtWords {...procedure} />}
         {quantity === 'kerma-area-product' && <Parts plane={plane} />}
       </span>
     ),
@@ -48,7 +54,9 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
             figures={combinePlanes(procedure, quantity)}
             quantity={quantity}
             isUpperBound={quantity === 'reference-air-kerma' && isReferenceAirKermaUpperBound}
+            settled={readSettled(procedure, quantity)}
           />
+          <DoubtWords {...procedure} />
         </strong>
       ),
     },
@@ -59,10 +67,11 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
       className: isOne ? 'md:w-[56%]' : 'md:w-[44%]',
       cell: (quantity) => {
         const { displayed, corrected } = combinePlanes(procedure, quantity);
+        const settled = readSettled(procedure, quantity);
         return (
           <TotalRule
             quantity={quantity}
-            value={displayed === null ? null : Math.max(displayed, corrected ?? displayed)}
+            value={settled ?? (displayed === null ? null : Math.max(displayed, corrected ?? displayed))}
             comparison={comparisons.find((one) => one.quantity === quantity)}
             isMarked={attention?.reasons.some((reason) => reason.code === quantity) ?? false}
             hasType={procedure.procedureType !== null}
@@ -107,6 +116,13 @@ const basisOf = (planes: readonly PlaneTotals[]): string => {
 const TotalsBasis = ({ procedure }: { procedure: Procedure }) => (
   <>
     {basisOf(procedure.planes)}
+    {procedure.settledFigures && (
+      <>
+        {' '}
+        Totals typed by the physicist stand for the whole procedure: they alone count in statistics and decide
+        about levels.
+      </>
+    )}
     {procedure.isReferenceAirKermaUpperBound && (
       <>
         {' '}
