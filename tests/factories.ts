@@ -7,6 +7,7 @@ import { addDefaultLevels } from '../server/levels/add-default-levels';
 import { saveAccount, setPassword } from '../server/people/account.store';
 import { hashPassword } from '../server/people/password';
 import { addPerson, type PersonFields } from '../server/people/person.store';
+import { Room } from '../server/rooms/room.entity';
 import type { Role } from '../shared/permissions';
 
 export const testPassword = 'a long enough password';
@@ -75,6 +76,17 @@ export async function makeGarment(
     nextDueOn: '2027-06-01',
     ...overrides,
   });
+  return id;
+}
+
+export async function makeRoom(
+  dataSource: DataSource,
+  hospitalId: string,
+  overrides: Partial<Room> = {},
+): Promise<string> {
+  const id = newId();
+  const code = `R-${id.slice(-6)}`;
+  await dataSource.manager.insert(Room, { id, hospitalId, code, name: `Room ${code}`, ...overrides });
   return id;
 }
 

@@ -17,8 +17,8 @@ type Checked = {
   photoId: string | null;
 };
 
-/** Only in a new procedure. */
-type CheckedNew = { roomId: string | null; procedureTypeId: string | null };
+/** Only in a new entry. */
+type CheckedNew = { procedureId: string | null; roomId: string | null; procedureTypeId: string | null };
 
 type Place = { roomId: string | null };
 
@@ -39,6 +39,8 @@ export async function checkEntry(
   const machine = equipmentId === null ? null : await findEquipment(tx, id, equipmentId);
   const room = roomId === null ? null : await findRoom(tx, id, roomId);
   const isTypeKnown = procedureTypeId === null || (await findProcedureType(tx, id, procedureTypeId)) !== null;
+  const isPlaced = input.procedureId !== null || equipmentId !== null || roomId !== null;
+  expect(isPlaced, '/equipmentId', 'Choose the machine, or the room where the machine is in no list.');
   expect(equipmentId === null || machine !== null, '/equipmentId', 'Choose a machine of the list.');
   expect(roomId === null || room !== null, '/roomId', 'Choose a room of the list.');
   expect(isTypeKnown, '/procedureTypeId', 'Choose a type of the list.');

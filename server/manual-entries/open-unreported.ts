@@ -5,8 +5,8 @@ import { lockProcedure, updateProcedure } from '../procedures/procedure.store';
 import type { Procedure } from '../procedures/procedure.entity';
 import { hasTypedReport } from './manual-entry.store';
 
-const hasFigures = ({ planes }: Procedure) =>
-  planes.some(({ displayed }) => Object.values(displayed).some((value) => value !== null));
+const hasFigures = ({ planes, eventCount }: Procedure) =>
+  eventCount > 0 || planes.some(({ displayed }) => Object.values(displayed).some((value) => value !== null));
 
 /** A procedure that waits for its figures; one that has some is not typed over. */
 export async function openUnreported(

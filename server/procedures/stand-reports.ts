@@ -9,6 +9,12 @@ export type Standing = { kind: 'counts' | 'adds' } | { kind: 'superseded' | 'rep
 
 const hasEvents = (report: SummaryReport) => report.eventKeys.length > 0;
 
+const totals = ['kermaAreaProductGyCm2', 'referenceAirKermaGy', 'fluoroscopyTimeS'] as const;
+
+/** Exposures, or at least one readable total. */
+const tellsSomething = (report: SummaryReport) =>
+  hasEvents(report) || report.reportedPlanes.some((plane) => totals.some((total) => plane[total] !== null));
+
 /** Reports whose content a report takes over, by its own statement, step by step. */
 function predecessorsOf(report: SummaryReport, reports: SummaryReport[]): Set<string> {
   const found = new Set<string>();
@@ -120,7 +126,7 @@ export type StoodReports = { standings: Map<string, Standing>; machines: Machine
 /**
  * Which of a procedure's reports count. The keys of the exposures decide, not the order of arrival: a report is
  * superseded by one that holds all of its exposures; what no single report holds is summed over unique exposures.
- * Totals typed by hand give way to any report of the same machine.
+ * Totals typed by hand give way to any report of the same machine that tells something.
  */
 export function standReports(reports: SummaryReport[]): StoodReports {
   const standings = new Map<string, Standing>();
@@ -142,7 +148,7 @@ export function standReports(reports: SummaryReport[]): StoodReports {
     );
     const told = [...own(standing), ...sent];
     const typed = totalsOnly.filter(({ channel }) => channel === 'manual');
-    const superior = pickNewest(told.length > 0 ? told : own(withEvents));
+    const superior = pickNewest((told.length > 0 ? told : own(withEvents)).filter(tellsSomething));
     for (const report of superior ? typed : [])
       standings.set(report.id, { kind: 'superseded', byId: (superior as SummaryReport).id });
     const written = superior ? [] : standWithoutEvents(typed, [], standings);
