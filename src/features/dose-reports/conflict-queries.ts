@@ -1,0 +1,21 @@
+import { queryOptions, useMutation } from '@tanstack/react-query';
+import { conflictSchema, decidedSchema, type DecideInput } from '../../../shared/contract/decide-report';
+import { request } from '../../lib/api';
+import { doseReportsKey } from './queries';
+
+const pathOf = (id: string) => `/api/dose-reports/${encodeURIComponent(id)}`;
+
+/** A held report beside the stored one of the same identity. */
+export const conflictQuery = (id: string) =>
+  queryOptions({
+    queryKey: [...doseReportsKey, 'conflict', id],
+    queryFn: ({ signal }) => request(`${pathOf(id)}/conflict`, { schema: conflictSchema, signal }),
+    staleTime: 0,
+  });
+
+export const useDecide = (id: string) =>
+  useMutation({
+    mutationFn: (body: DecideInput) =>
+      request(`${pathOf(id)}/decide`, { method: 'POST', body, schema: decidedSchema }),
+    meta: { invalidates: [doseReportsKey, ['procedures'], ['staff-exposure']] },
+  });
