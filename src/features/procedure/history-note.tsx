@@ -21,7 +21,7 @@ export function HistoryNote({ history, timeZone }: { history: Procedure['history
       <ol>
         {shown.map(({ at, by, action, reason }, place) => (
           <li key={`${at} ${place}`} className="border-b border-rule py-1.5 text-sm">
-            {action}
+            <span className="block first-letter:uppercase">{action}</span>
             <span className="block text-ink-2">
               {formatInstant(at, timeZone)}, {by}
             </span>

@@ -26,7 +26,9 @@ export function MarksNote({ procedure, canClassify, canWithdraw }: MarksNoteProp
         {hasTwoPlanes && (
           <DefinitionRow name="Fields of the planes">{overlapWords(procedure.fieldsOverlap)}</DefinitionRow>
         )}
-        <DefinitionRow name="Counts">{isWithdrawn ? 'no: withdrawn' : 'yes'}</DefinitionRow>
+        <DefinitionRow name="Counts">
+          {isWithdrawn ? (procedure.mergedInto ? 'no: merged' : 'no: withdrawn') : 'yes'}
+        </DefinitionRow>
       </DefinitionList>
       <div className="flex flex-wrap gap-2">
         {canClassify && (
@@ -39,7 +41,7 @@ export function MarksNote({ procedure, canClassify, canWithdraw }: MarksNoteProp
             Judge the fields
           </Button>
         )}
-        {canWithdraw && (
+        {canWithdraw && !procedure.mergedInto && (
           <Button isSmall onClick={() => setOpened('withdrawal')}>
             {isWithdrawn ? 'Restore' : 'Withdraw'}
           </Button>
