@@ -5,7 +5,7 @@ import type { ContentItem } from './content-tree';
 /** More than any template has; a file that is full of foreign items shall not fill the report. */
 const MOST_KEPT = 100;
 
-const isPrivate = (scheme: string) => /^(99|L)/i.test(scheme);
+const isPrivate = (scheme: string) => /^99|^L$/i.test(scheme);
 
 /** Concept → field of the contract, from one or several tables of quantity fields. */
 export function fieldsByConcept(
@@ -16,11 +16,11 @@ export function fieldsByConcept(
   );
 }
 
-/** Leaves below an item, through containers that no concept known here closes off. */
+/** Leaves below an item, through containers put in between. */
 function leavesOf(parent: ContentItem, leaves: ContentItem[] = []): ContentItem[] {
   for (const item of parent.children) {
     if (item.valueType !== 'CONTAINER') leaves.push(item);
-    else if (item.name === null && !isPrivate(item.concept?.scheme ?? '')) leavesOf(item, leaves);
+    else if (item.name === null) leavesOf(item, leaves);
   }
   return leaves;
 }

@@ -5,6 +5,12 @@ import { ItemIndex } from './item-index';
 import { readQuantity, type Reported } from './read-quantity';
 import type { WarningCollector } from './warning-collector';
 
+/** Units that differ from filter to filter stand joined, as far as a sensible file has them. */
+function joinUnits(known: string | null, added: string | null): string | null {
+  if (known === null || added === null) return known ?? added;
+  return known.split(', ').includes(added) || known.length > 60 ? known : `${known}, ${added}`;
+}
+
 /** X-Ray Filters (113771, TID 10003B): type, material as element symbol, range of thickness. */
 export function parseFilter(item: ContentItem, reported: Reported, warnings: WarningCollector): ReportFilter {
   const index = new ItemIndex(item);
@@ -29,8 +35,10 @@ export function parseFilter(item: ContentItem, reported: Reported, warnings: War
   // Filters repeat: their strings stand in the order of the filters, each field's in one list.
   for (const [field, { text, unit }] of Object.entries(own)) {
     const known = reported[`filters.${field}`];
-    if (known) for (const one of text) known.text.push(one);
-    else reported[`filters.${field}`] = { text: [...text], unit };
+    if (known) {
+      for (const one of text) known.text.push(one);
+      known.unit = joinUnits(known.unit, unit);
+    } else reported[`filters.${field}`] = { text: [...text], unit };
   }
   return filter;
 }

@@ -23,7 +23,7 @@ export function ownEventValues(event: ReportEvent): Record<string, OutsideValue[
     '113605': text(event.label),
     '113605>113606': code(event.labelType),
     '91723000|T-D0005': code(event.anatomy),
-    '91723000>272741003|T-D0005>G-C171': code(event.laterality),
+    '91723000>272741003|91723000>G-C171|T-D0005>272741003|T-D0005>G-C171': code(event.laterality),
     '111031': code(event.imageView),
     '111031>111032': codes(event.imageViewModifiers),
     '113946': code(event.projectionName),

@@ -56,7 +56,7 @@ export interface OutsideReport {
 }
 
 /** Concept codes of TID 10003 and 10004 (PS3.16) → the contract's field, stated apart from the reader's table. */
-const eventFields: Record<string, string> = {
+export const eventFields: Record<string, string> = {
   '122130': 'kermaAreaProductGyCm2',
   '113738': 'referenceAirKermaGy',
   '113791': 'pulseRatePerS',
@@ -112,7 +112,7 @@ const eventFields: Record<string, string> = {
   '111636': 'entranceExposureGy',
   '111633': 'compressionThicknessMm',
 };
-const totalFields: Record<string, string> = {
+export const totalFields: Record<string, string> = {
   '113722': 'kermaAreaProductGyCm2',
   '113725': 'referenceAirKermaGy',
   '113726': 'fluoroscopyKermaAreaProductGyCm2',
@@ -126,7 +126,7 @@ const totalFields: Record<string, string> = {
 };
 
 /** UCUM units → [what the contract's field ends in, factor]; a unit that is missing here has no canonical value. */
-const conversions: Record<string, [string, number][]> = {
+export const conversions: Record<string, [string, number][]> = {
   'Gy.m2': [['GyCm2', 10_000]],
   'uGy.m2': [['GyCm2', 0.01]],
   'Gy.cm2': [['GyCm2', 1]],
@@ -171,7 +171,9 @@ function gather(numbers: OutsideNumber[], fields: Record<string, string>): Recor
     const field = fields[code];
     if (field === undefined) continue;
     const values = text === '' ? [] : text.split('\\').map((one) => one.trim());
-    const known = (gathered[field] ??= { text: [], unit, ucumUnits: [] });
+    const known = (gathered[field] ??= { text: [], unit: null, ucumUnits: [] });
+    const units = new Set([...(known.unit?.split(', ') ?? []), ...(unit === null ? [] : [unit])]);
+    known.unit = units.size === 0 ? null : [...units].join(', ');
     known.text.push(...values);
     known.ucumUnits.push(...values.map(() => (scheme === 'UCUM' ? unit : null)));
   }
