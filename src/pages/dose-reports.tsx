@@ -102,7 +102,12 @@ export function Component() {
       }
     >
       {canDecide && isReadingAgain && <ReadAgainSection onClose={() => setReadingAgain(false)} />}
-      <ReportsTable filter={shown} timeZone={hospital?.timeZone ?? 'UTC'} canHandle={canHandle} />
+      <ReportsTable
+        filter={shown}
+        timeZone={hospital?.timeZone ?? 'UTC'}
+        canHandle={canHandle}
+        canDecide={canDecide}
+      />
     </Page>
   );
 }

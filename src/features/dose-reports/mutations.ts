@@ -1,5 +1,5 @@
 import { useMutation } from '@tanstack/react-query';
-import { receivedFileSchema } from '../../../shared/contract/received-files';
+import { readAgainResultSchema } from '../../../shared/contract/read-again';
 import { request } from '../../lib/api';
 import { doseReportsKey } from './queries';
 
@@ -7,6 +7,6 @@ import { doseReportsKey } from './queries';
 export const useReadAgain = () =>
   useMutation({
     mutationFn: (id: string) =>
-      request(`/api/dose-reports/${id}/read-again`, { method: 'POST', schema: receivedFileSchema }),
+      request(`/api/dose-reports/${id}/read-again`, { method: 'POST', schema: readAgainResultSchema }),
     meta: { invalidates: [doseReportsKey, ['procedures']] },
   });

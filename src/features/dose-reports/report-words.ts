@@ -19,11 +19,18 @@ export const outcomeChoices: Choice[] = [
   { value: 'received', label: 'that wait to be read' },
 ];
 
-/** "344 stored, 2 held, 1 refused." */
-export function describeCounts(counts: Record<string, number>): string {
+/** "344 stored, 2 held, 1 refused." Narrowed: of those that the search or the archive leaves. */
+export function describeCounts(counts: Record<string, number>, isNarrowed = false): string {
   const parts = Object.entries(outcomeWords).flatMap(([outcome, name]) => {
     const count = counts[outcome] ?? 0;
     return count === 0 ? [] : [`${formatInteger(count)} ${name}`];
   });
-  return parts.length === 0 ? 'No file has come yet.' : `${parts.join(', ')}.`;
+  if (parts.length === 0) return isNarrowed ? 'No such file has come.' : 'No file has come yet.';
+  return `${parts.join(', ')}.`;
 }
+
+/** How long bytes are kept, for whoever wonders where they are. */
+export const describeKeeping = (refusedKeepDays: number): string =>
+  refusedKeepDays === 0
+    ? 'Every file is kept as it came, whatever its outcome.'
+    : `Stored and held files are kept as they came; the bytes of refused ones for ${formatInteger(refusedKeepDays)} days, their rows for good.`;
