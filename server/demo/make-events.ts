@@ -93,8 +93,11 @@ export function makeEvents(subject: Subject): DemoIrradiationEvent[] {
       },
       isRotational ? 7 : random.between(...widths),
     );
-    const detectorMm = sourceToDetectorMm + Math.round(15 * random.normal());
     const areaAtReferenceCm2 = share.kermaAreaProductGyCm2 / share.referenceAirKermaGy;
+    const drawnMm = sourceToDetectorMm + Math.round(15 * random.normal());
+    // A wide field fits onto the detector only when it is drawn near.
+    const nearMm = Math.floor(referenceDistanceMm * Math.sqrt(detectorAreaCm2 / areaAtReferenceCm2));
+    const detectorMm = Math.min(drawnMm, nearMm);
     table.longitudinalMm += 8 * random.normal();
     // Automatic exposure control lets the voltage wander within a long press.
     const isWandering = !draft.isAcquisition && draft.segment.durationS > 20 && random.chance(0.3);

@@ -44,6 +44,25 @@ test('a counter that went on from the procedure before is found; so are events t
   expect(checkOf(twin, 'shared-events').detail).toBe(`2 irradiation events are in ${caseNumber} as well`);
 });
 
+test('an event that stands twice in one report counts once, and its total is held against the events', async () => {
+  const content = totalsOf(15, 6);
+  const event = fluoroscopyEvent(currentSample(), 0, {
+    startedAt: '2026-03-15T09:00:00',
+    kermaAreaProductGyCm2: 3,
+    referenceAirKermaGy: 0.02,
+  });
+  const doubled = await story.send({
+    ...content,
+    events: [event, event],
+    planes: [
+      { plane: 'single', kermaAreaProductGyCm2: 6, referenceAirKermaGy: 0.04, fluoroscopyTimeS: 24.8 },
+    ],
+  });
+  expect(doubled.eventCount).toBe(1);
+  expect(checkOf(doubled, 'duplicate-events').result).toBe('noted');
+  expect(checkOf(doubled, 'totals-against-events').result).toBe('noted');
+});
+
 const rules = async (agent = story.physicist): Promise<CheckRule[]> =>
   (await agent.get('/api/data-checks').expect(200)).body.items;
 const rule = async (code: string): Promise<CheckRule> => {

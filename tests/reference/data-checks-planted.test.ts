@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs';
 import { beforeAll, expect, test } from 'vitest';
 import type { DemoProcedure } from '../../server/demo/demo-types';
 import { generateProcedures } from '../../server/demo/generate-procedures';
+import { checkRules } from '../../server/data-checks/check-rules';
 import { findingsOf, startChecking } from './check-generated';
 import { findableFaults, hiddenFaults, type Fault } from './plant-faults';
 
@@ -44,11 +45,14 @@ beforeAll(() => {
   }
   expect(waiting).toEqual([]);
   const listed = (faults: Fault[]) => faults.flatMap((fault) => outcomes.get(fault) ?? []);
-  if (process.env['PRINT_TABLE'])
-    for (const { fault, found, rules } of outcomes.values())
-      console.log(`| ${fault.name} | ${found} of ${copies} | ${rules.join(', ') || '–'} |`);
   [findable, hidden] = [listed(findableFaults), listed(hiddenFaults)];
 }, 120_000);
+
+/** Lines of the document without the padding of its tables. */
+const readTableLines = () =>
+  readFileSync('docs/data-checks.md', 'utf8')
+    .split('\n')
+    .map((line) => line.replace(/ +/g, ' '));
 
 test('500 clean procedures have no finding at all', () => {
   expect(clean).toHaveLength(500);
@@ -64,10 +68,18 @@ test('of the planted faults that can be found at least 95 % are', () => {
   expect(found / planted).toBeGreaterThanOrEqual(0.95);
 });
 
+test('the document lists every rule as it is delivered', () => {
+  const lines = readTableLines();
+  for (const { code, name, severity, owner, low, high, unit } of checkRules) {
+    const passes =
+      low !== null && high !== null ? `${low} to ${high}` : high !== null ? `up to ${high}` : `from ${low}`;
+    const bounds = low === null && high === null ? '–' : `${passes} ${unit}`;
+    expect(lines).toContain(`| ${name} | ${code} | ${bounds} | ${severity} | ${owner} |`);
+  }
+});
+
 test('the document says which planted fault was found by which rule, and which none finds', () => {
-  const lines = readFileSync('docs/data-checks.md', 'utf8')
-    .split('\n')
-    .map((line) => line.replace(/ +/g, ' '));
+  const lines = readTableLines();
   for (const { fault, found, rules } of [...findable, ...hidden])
     expect(lines).toContain(`| ${fault.name} | ${found} of ${copies} | ${rules.join(', ') || '–'} |`);
 });

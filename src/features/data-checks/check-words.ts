@@ -67,14 +67,9 @@ export function describeBounds(
   { low, high }: Pick<CheckRule['inForce'], 'low' | 'high'>,
   unit: string | null,
 ): string {
-  const range =
-    low !== null && high !== null
-      ? `${low} to ${high}`
-      : high !== null
-        ? `up to ${high}`
-        : low !== null
-          ? `from ${low}`
-          : null;
+  // A true minus sign, as in every figure.
+  const [from, to] = [low, high].map((end) => (end === null ? null : String(end).replace('-', '\u2212')));
+  const range = from && to ? `${from} to ${to}` : to ? `up to ${to}` : from ? `from ${from}` : null;
   // A year is its own unit.
   return range === null ? '–' : [range, unit === 'year' ? null : unit].filter(Boolean).join(' ');
 }
