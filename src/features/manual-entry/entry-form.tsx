@@ -16,6 +16,7 @@ import { findEntryIssues, pointToField } from './find-entry-issues';
 import { PatientPart } from './patient-part';
 import { PhotoPart } from './photo-part';
 import { SecondPass } from './second-pass';
+import { useClearedErrors } from './use-cleared-errors';
 import type { SendEntry } from './use-send-entry';
 
 type EntryFormProps = {
@@ -42,6 +43,7 @@ export function EntryForm({ kind, draftName, opened, choices, send, backTo, onEn
   });
   const { register, formState } = form;
   useKeptEntry(form, draftName, key);
+  useClearedErrors(form);
 
   const focusInvalid = () =>
     requestAnimationFrame(() => frame.current?.querySelector<HTMLElement>('[aria-invalid="true"]')?.focus());

@@ -48,7 +48,7 @@ test('an empty entry says everything it lacks; the server’s words find their f
   expect(findEntryIssues(emptyEntry(), 'new').map(({ path }) => path)).toEqual([
     'equipmentId',
     'localStartedAt',
-    'figures.0.reference-air-kerma.text',
+    'root.figures',
   ]);
   const values = emptyEntry({ hasTwoPlanes: true });
   values.figures[1]['kerma-area-product'] = { text: '3', unit: 'Gy.cm2' };

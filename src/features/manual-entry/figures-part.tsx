@@ -1,6 +1,7 @@
+import { useId } from 'react';
 import { get, useController, useFormContext, useFormState, useWatch } from 'react-hook-form';
 import { typedQuantityNames, type TypedQuantityName } from '../../../shared/contract/manual-entry';
-import { Field } from '../../ui/field';
+import { Field, FieldError } from '../../ui/field';
 import { FieldGroup } from '../../ui/field-group';
 import { QuantitySign } from '../../ui/quantity-sign';
 import { RadioGroup } from '../../ui/radio-group';
@@ -56,8 +57,10 @@ const PlaneFigures = ({ index, legend }: { index: 0 | 1; legend: string }) => (
 
 /** The figures with the unit chosen beside each, and what they are in the units of the lists. */
 export function FiguresPart() {
-  const { control } = useFormContext<EntryValues>();
+  const { control, formState } = useFormContext<EntryValues>();
   const { field } = useController({ control, name: 'hasTwoPlanes' });
+  const none = formState.errors.root?.['figures'];
+  const errorId = useId();
   return (
     <>
       <div className="flex flex-col gap-2">
@@ -79,6 +82,7 @@ export function FiguresPart() {
           Type what the screen shows, in its own units. A field left empty stays unknown; it never counts as
           zero.
         </p>
+        {none && <FieldError id={errorId}>{none.message}</FieldError>}
       </div>
       <PlaneFigures index={0} legend={field.value ? 'Figures of plane A' : 'What the screen showed'} />
       {field.value && <PlaneFigures index={1} legend="Figures of plane B" />}

@@ -2,8 +2,7 @@ import { readTypedQuantity } from '../../../shared/read-typed-quantity';
 import { listFigures, unlistedMachine, type EntryValues, type PlacedFigure } from './entry-values';
 
 export type EntryIssue = {
-  path:
-    keyof EntryValues | `${PlacedFigure['path']}.${'text' | 'unit'}` | 'figures.0.reference-air-kerma.text';
+  path: keyof EntryValues | `${PlacedFigure['path']}.${'text' | 'unit'}` | 'root.figures';
   message: string;
 };
 
@@ -27,7 +26,7 @@ export function findEntryIssues(values: EntryValues, kind: 'new' | 'attached' | 
     const { fault } = readTypedQuantity(figure);
     if (fault) issues.push({ path: `${path}.${fault.part}`, message: fault.detail });
   }
-  expect(figures.length > 0, 'figures.0.reference-air-kerma.text', 'Type at least one of the figures.');
+  expect(figures.length > 0, 'root.figures', 'Type at least one of the figures.');
   if (kind === 'correction') expect(values.reason.trim().length >= 3, 'reason', 'Say why in a few words.');
   return issues;
 }
@@ -42,7 +41,7 @@ export function pointToField(pointer: string, figures: readonly PlacedFigure[]):
     '/patient/name': 'patientName',
     '/patient/accessionNumber': 'accessionNumber',
     '/photoId': 'photo',
-    '/quantities': 'figures.0.reference-air-kerma.text',
+    '/quantities': 'root.figures',
   };
   return names[pointer] ?? pointer.slice(1);
 }
