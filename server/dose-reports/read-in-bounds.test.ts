@@ -44,7 +44,7 @@ describe('readInBounds', () => {
   });
 
   it('holds what needs too much memory, and reads the next file', async () => {
-    Object.assign(readingLimits, { heapMb: 16 });
+    Object.assign(readingLimits, { heapMb: 4 });
     expect(await readInBounds(large)).toMatchObject({ outcome: 'held', reason: { code: 'limit-memory' } });
     Object.assign(readingLimits, usual);
     expect(await readInBounds(large)).toMatchObject({ outcome: 'read' });

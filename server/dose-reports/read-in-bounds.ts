@@ -2,6 +2,7 @@ import { outcomeOfReason, type ReasonCode } from '../../shared/contract/outcome'
 import { readDoseReport, type DoseReportReading } from '../dicom/read-dose-report';
 import { readingLimits } from './reading-limits';
 import { ReadingThread } from './reading-thread';
+import { TookTooLong } from './time-limit';
 
 /** Starting a thread takes some tenths of a second; its memory is given back when no large file comes for a while. */
 const keptWarmMs = 30_000;
@@ -58,9 +59,9 @@ export async function endReading(): Promise<void> {
 }
 
 function reasonFor(error: unknown): ReasonCode {
-  const { name, code, cause } = error as { name?: string; code?: string; cause?: { name?: string } };
+  const { code, cause } = error as { code?: string; cause?: unknown };
   if (code === 'ERR_WORKER_OUT_OF_MEMORY') return 'limit-memory';
-  return name === 'AbortError' && cause?.name === 'TimeoutError' ? 'limit-time' : 'reader-failure';
+  return cause instanceof TookTooLong ? 'limit-time' : 'reader-failure';
 }
 
 const details: Partial<Record<ReasonCode, string>> = {

@@ -5,6 +5,7 @@ import type { DoseReportReading } from '../dicom/read-dose-report';
 import { joinBytes } from '../kernel/join-bytes';
 import { readingLimits } from './reading-limits';
 import type { ReadingAnswer, ReadingQuestion } from './reading-messages';
+import { TimeLimit } from './time-limit';
 
 /** A thread of its own for reading, with a bounded heap: a hostile file can end it, but not the server. */
 export class ReadingThread {
@@ -61,8 +62,11 @@ export class ReadingThread {
   }
 
   private async hear<K extends ReadingAnswer['kind']>(kind: K): Promise<Extract<ReadingAnswer, { kind: K }>> {
-    const signal = AbortSignal.any([this.closing.signal, AbortSignal.timeout(readingLimits.timeMs)]);
-    const [answer] = (await once(this.worker, 'message', { signal })) as [ReadingAnswer];
+    const limit = new TimeLimit(readingLimits.timeMs);
+    const signal = AbortSignal.any([this.closing.signal, limit.signal]);
+    const [answer] = (await once(this.worker, 'message', { signal }).finally(() => limit.end())) as [
+      ReadingAnswer,
+    ];
     if (answer.kind !== kind) throw new Error(`the reading thread answered ${answer.kind}, not ${kind}`);
     return answer as Extract<ReadingAnswer, { kind: K }>;
   }
