@@ -61,8 +61,9 @@ test('a phantom exposure under the order, or even the study, of a patient stays 
   const intent = { value: '113680', scheme: 'DCM', meaning: 'Quality Control Intent' };
   const { procedureId } = await send(cumulative(320, 0, 0, 10));
   const sameOrder = await send({ ...newStudy(cumulative(320, 1, 10, 12), 321), intent });
-  const sameStudy = await send({ ...cumulative(320, 2, 12, 14), intent });
-  const again = await send({ ...cumulative(320, 3, 12, 15), intent });
+  const phantom = { intent, accessionNumber: null };
+  const sameStudy = await send({ ...cumulative(320, 2, 12, 14), ...phantom });
+  const again = await send({ ...cumulative(320, 3, 12, 15), ...phantom });
   expect(new Set([procedureId, sameOrder.procedureId, sameStudy.procedureId]).size).toBe(3);
   expect(again.procedureId).toBe(sameStudy.procedureId);
   expect((await open(procedureId)).eventCount).toBe(10);
