@@ -29,6 +29,7 @@ const createRandom = (seed: number) => () => (seed = (seed * 48271) % 2147483647
 
 test.each([1, 2, 3])(
   'whatever is moved about and taken back in turn, all is as before (%i)',
+  { timeout: 120_000 },
   async (seed) => {
     const random = createRandom(seed);
     const upTo = (count: number) => Math.floor(random() * count);
