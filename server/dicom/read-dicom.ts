@@ -16,6 +16,8 @@ export type DicomDataSet = Pick<DataSet, 'elements'> & { byteArray: SliceableBuf
  */
 export function readHeaderElements(bytes: SliceableBuffer, encoding: ElementEncoding): DicomDataSet {
   const dataSet: DicomDataSet = { elements: {}, byteArray: bytes };
+  // The content may come first, with no header before it; the library takes no empty bytes.
+  if (bytes.length === 0) return dataSet;
   const parser = encoding.isBigEndian
     ? dicomParser.bigEndianByteArrayParser
     : dicomParser.littleEndianByteArrayParser;
