@@ -23,6 +23,7 @@ const toReportPlane = (plane: DemoPlaneTotals, procedure: DemoProcedure): Report
   devices: [],
   reported: {},
   qualifiers: {},
+  preciseValues: {},
   furtherItems: [],
 });
 

@@ -65,6 +65,12 @@ describe('character sets', () => {
     expect(read('LATIN-1', '5A 6F EB')).toEqual({ text: 'Zoë', notices: ['character-set-unknown'] });
   });
 
+  it('take a one-byte set for UTF-8 only where that gives letters of the set', () => {
+    expect(read('ISO_IR 144', 'C2 B0')).toEqual({ text: 'ТА', notices: [] });
+    expect(read('ISO_IR 101', 'E8 BE A3')).toEqual({ text: 'čžŁ', notices: [] });
+    expect(read('ISO_IR 144', 'D0 9F D0 B5')).toEqual({ text: 'Пе', notices: ['character-set-wrong'] });
+  });
+
   it('drop padding and NUL, keep markup as it is', () => {
     expect(read(null, '3C 62 3E 00 41 20 20 00').text).toBe('<b>A');
   });

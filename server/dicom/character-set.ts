@@ -58,6 +58,11 @@ function decodeUndeclared(bytes: Uint8Array): string {
   return decodeUtf8(bytes) ?? windows1252.decode(bytes);
 }
 
+/** Every character that a set of one byte has. */
+function repertoireOf(encoding: string): Set<string> {
+  return new Set(new TextDecoder(encoding).decode(Uint8Array.from({ length: 256 }, (_, byte) => byte)));
+}
+
 function readerOf(terms: string[], notice: CharacterSetNotice): (bytes: Uint8Array) => string {
   // "ISO 2022 IR 100" is the same set as "ISO_IR 100", prepared for code extensions.
   const first = (terms[0] ?? '').replace(/^ISO 2022 IR (\d+)$/, 'ISO_IR $1').replace('ISO-IR', 'ISO_IR');
@@ -84,10 +89,13 @@ function readerOf(terms: string[], notice: CharacterSetNotice): (bytes: Uint8Arr
   }
   const decoder = new TextDecoder(encoding);
   const isSingleByte = !['gb18030', 'gbk', 'shift_jis'].includes(encoding);
+  const repertoire = isSingleByte && encoding !== 'iso-8859-1' ? repertoireOf(encoding) : null;
   return (bytes) => {
-    // Text of a one-byte set is hardly ever valid UTF-8 by chance: "é" alone is not, "Ã©" is no name.
+    // Latin-1 is hardly ever valid UTF-8 by chance: "é" alone is not, "Ã©" is no name. In other sets letters are
+    // ("ТА" in Cyrillic), but then what UTF-8 would make of them is no letter of the set.
     const utf8 = isSingleByte ? decodeUtf8(bytes) : null;
-    if (utf8 === null) return decoder.decode(bytes);
+    if (utf8 === null || (repertoire && ![...utf8].every((letter) => repertoire.has(letter))))
+      return decoder.decode(bytes);
     notice('character-set-wrong', `declared ${first}, written in UTF-8`);
     return utf8;
   };

@@ -11,6 +11,11 @@ const schemeNames = new Map([
   ['DCM', 'DCM'],
 ]);
 
+/** Private coding schemes (PS3.16 8.2): designators that start with "99", and the older "L". SNOMED-RT's "99SDM" is none. */
+export function isPrivateScheme(scheme: string): boolean {
+  return (scheme.startsWith('99') && scheme !== '99SDM') || scheme === 'L';
+}
+
 /** Scheme and value as one key; a code is never matched by its value alone. */
 export function codeKey(scheme: string, value: string): string {
   const trimmed = scheme.trim();

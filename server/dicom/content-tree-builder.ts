@@ -6,6 +6,7 @@ import type { ContentItem, ContentTree } from './content-tree';
 import type { DataSetVisitor } from './data-set-visitor';
 import { sliceLatin1, type SliceableBuffer } from './latin1-text';
 import { OpenContentItem } from './open-content-item';
+import { PreciseNumber } from './precise-number';
 import { tags } from './tags';
 
 /** What is told while a file is read. */
@@ -56,6 +57,7 @@ export class ContentTreeBuilder implements DataSetVisitor {
   constructor(
     private readonly bytes: SliceableBuffer,
     private readonly listener: ContentListener,
+    private readonly isBigEndian: boolean,
   ) {
     this.codes = new CodeTable(bytes);
     this.current = new OpenContentItem(null, true, this.textReaderFor(null));
@@ -93,6 +95,7 @@ export class ContentTreeBuilder implements DataSetVisitor {
       else current.takeAttribute(bytes, tag, start, end);
     } else if (role === tags.measuredValues) {
       if (tag === tags.numericValue) current.number = sliceLatin1(bytes, start, end);
+      else (current.precise ??= new PreciseNumber(this.isBigEndian)).take(bytes, tag, start, end);
     } else if (role === tags.referencedInstances) {
       current.takeReference(bytes, tag, start, end);
     } else {

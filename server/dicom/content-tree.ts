@@ -6,6 +6,8 @@ export interface Measurement {
   text: string[];
   unit: Code | null;
   qualifier: Code | null;
+  /** The number in binary or as a fraction, where the file gives it beside the decimal string. */
+  precise: number | null;
 }
 
 /** A content item of the SR tree (PS3.3 C.17.3) with its value, whichever type it is of. */

@@ -1,11 +1,10 @@
-import type { FurtherItem, Qualifiers } from '../../shared/contract/report-parts';
+import type { FurtherItem, PreciseValues, Qualifiers } from '../../shared/contract/report-parts';
+import { isPrivateScheme } from './concepts';
 import type { ConceptName } from './concepts.table-data';
 import type { ContentItem } from './content-tree';
 
 /** More than any template has; a file that is full of foreign items shall not fill the report. */
 const MOST_KEPT = 100;
-
-const isPrivate = (scheme: string) => /^99|^L$/i.test(scheme);
 
 /** Concept → field of the contract, from one or several tables of quantity fields. */
 export function fieldsByConcept(
@@ -26,20 +25,24 @@ function leavesOf(parent: ContentItem, leaves: ContentItem[] = []): ContentItem[
 }
 
 /**
- * What stands in a container under concepts unknown here, and why numbers are empty. Private concepts (PS3.16 8.2:
- * designators that start with "99", and the older "L") count for nothing.
+ * What stands in a container under concepts unknown here, why numbers are empty, and their binary forms. Private concepts
+ * count for nothing.
  */
 export function readFurther(
   parent: ContentItem,
   fields: Map<ConceptName, string>,
-): { furtherItems: FurtherItem[]; qualifiers: Qualifiers } {
+): { furtherItems: FurtherItem[]; qualifiers: Qualifiers; preciseValues: PreciseValues } {
   const furtherItems: FurtherItem[] = [];
   const qualifiers: Qualifiers = {};
+  const preciseValues: PreciseValues = {};
   for (const item of leavesOf(parent)) {
     const field = item.name === null ? undefined : fields.get(item.name);
-    const qualifier = item.measurement?.qualifier;
-    if (field !== undefined && qualifier) qualifiers[field] = qualifier;
-    if (item.name !== null || item.concept === null || isPrivate(item.concept.scheme)) continue;
+    if (field !== undefined && item.measurement) {
+      const { qualifier, precise } = item.measurement;
+      if (qualifier) qualifiers[field] = qualifier;
+      if (precise !== null) (preciseValues[field] ??= []).push(precise);
+    }
+    if (item.name !== null || item.concept === null || isPrivateScheme(item.concept.scheme)) continue;
     if (furtherItems.length === MOST_KEPT) continue;
     furtherItems.push({
       concept: item.concept,
@@ -48,5 +51,5 @@ export function readFurther(
       unit: item.measurement?.unit?.value ?? null,
     });
   }
-  return { furtherItems, qualifiers };
+  return { furtherItems, qualifiers, preciseValues };
 }

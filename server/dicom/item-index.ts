@@ -1,26 +1,43 @@
 import type { Code, ReferencePoint } from '../../shared/contract/report-parts';
+import { isPrivateScheme } from './concepts';
 import type { ConceptName } from './concepts.table-data';
 import type { ContentItem } from './content-tree';
 
 /** Containers that keep their values to themselves: what stands inside belongs to one of several. */
 const closed = new Set<ConceptName | null>(['filters', 'calibration', 'accumulated', 'event']);
 
-/** The content items of a container by concept, also from containers put in between. */
+/**
+ * The content items of a container by concept, also from containers put in between. A private container may group
+ * a maker's own values or hold further ones (predictions, settings) under the same concepts: it counts for nothing
+ * where the concept stands outside of it.
+ */
 export class ItemIndex {
   private readonly byName = new Map<ConceptName, ContentItem[]>();
 
   constructor(parent: ContentItem) {
-    this.gather(parent);
+    const privateContainers: ContentItem[] = [];
+    this.gather(parent, this.byName, privateContainers);
+    for (const container of privateContainers) {
+      const found = new Map<ConceptName, ContentItem[]>();
+      this.gather(container, found);
+      for (const [name, items] of found) if (!this.byName.has(name)) this.byName.set(name, items);
+    }
   }
 
-  private gather(parent: ContentItem): void {
+  private gather(
+    parent: ContentItem,
+    found: Map<ConceptName, ContentItem[]>,
+    privateContainers?: ContentItem[],
+  ): void {
     for (const item of parent.children) {
       if (item.name !== null) {
-        const known = this.byName.get(item.name);
+        const known = found.get(item.name);
         if (known) known.push(item);
-        else this.byName.set(item.name, [item]);
+        else found.set(item.name, [item]);
       }
-      if (item.valueType === 'CONTAINER' && !closed.has(item.name)) this.gather(item);
+      if (item.valueType !== 'CONTAINER' || closed.has(item.name)) continue;
+      if (privateContainers && isPrivateScheme(item.concept?.scheme ?? '')) privateContainers.push(item);
+      else this.gather(item, found, privateContainers);
     }
   }
 

@@ -3,6 +3,7 @@ import { decodeText, type TextReader } from './character-set';
 import type { KnownCode } from './code-table';
 import type { ContentItem } from './content-tree';
 import { sliceLatin1, type SliceableBuffer } from './latin1-text';
+import type { PreciseNumber } from './precise-number';
 import { tags } from './tags';
 
 /** Text of one value type stands in its own attribute. */
@@ -37,6 +38,7 @@ export class OpenContentItem {
   unit: KnownCode | null = null;
   qualifier: KnownCode | null = null;
   number: string | null = null;
+  precise: PreciseNumber | null = null;
   image: ImageReference | null = null;
   private valueType = '';
   private texts: { tag: number; start: number; end: number }[] | null = null;
@@ -91,6 +93,7 @@ export class OpenContentItem {
               text: splitNumbers(this.number),
               unit: this.unit?.code ?? null,
               qualifier: this.qualifier?.code ?? null,
+              precise: this.precise?.value ?? null,
             }
           : null,
       image: valueType === 'IMAGE' ? this.image : null,

@@ -1,6 +1,7 @@
 import { outcomeOfReason, type ReasonCode, type UnreadOutcome } from '../../shared/contract/outcome';
 import type { Report, ReportWarning } from '../../shared/contract/report';
 import { classifyContent } from './classify-content';
+import type { ContentItem } from './content-tree';
 import { ContentTreeBuilder } from './content-tree-builder';
 import { EventReader } from './event-reader';
 import type { SliceableBuffer } from './latin1-text';
@@ -44,13 +45,14 @@ class DoseReportReader {
       this.header = parseHeader(elements, this.warnings);
       return this.header;
     };
-    const builder = new ContentTreeBuilder(data, {
-      headerEnds: (contentStart) => {
+    const listener = {
+      headerEnds: (contentStart: number) => {
         this.events.utcOffset = readHeader(contentStart).utcOffset;
       },
-      takeEvent: (event) => this.events.add(event),
+      takeEvent: (event: ContentItem) => this.events.add(event),
       notice: this.warnings.add,
-    });
+    };
+    const builder = new ContentTreeBuilder(data, listener, located.encoding.isBigEndian);
     scanDataSet(data, located.encoding, builder);
     const tree = builder.finish();
     const header = this.header ?? readHeader(data.length);

@@ -9,6 +9,7 @@ import {
   optionalText as text,
   personParticipantSchema,
   planeSchema,
+  preciseValues,
   qualifiers,
   referencePointSchema,
   reported,
@@ -144,6 +145,7 @@ export const reportEventSchema = printedEventSchema.extend({
   devices: z.array(deviceParticipantSchema),
   reported,
   qualifiers,
+  preciseValues,
   furtherItems: z.array(furtherItemSchema),
 });
 export type ReportEvent = z.infer<typeof reportEventSchema>;

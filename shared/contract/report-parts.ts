@@ -18,6 +18,13 @@ export const qualifiers = z.record(z.string(), codeSchema);
 export type Qualifiers = z.infer<typeof qualifiers>;
 
 /**
+ * Numbers given in binary or as a fraction beside their decimal strings, by field, in the unit of `reported`; the
+ * decimal string stays the value (PS3.3 C.18.1).
+ */
+export const preciseValues = z.record(z.string(), z.array(z.number()));
+export type PreciseValues = z.infer<typeof preciseValues>;
+
+/**
  * A content item whose concept is of a public terminology but of no template known here: kept as written, so that
  * nothing the machine states is lost, and never counted as anything else.
  */

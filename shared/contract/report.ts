@@ -11,6 +11,7 @@ import {
   optionalText as text,
   personParticipantSchema,
   planeSchema,
+  preciseValues,
   qualifiers,
   referencePointSchema,
   reported,
@@ -51,6 +52,7 @@ export const reportPlaneSchema = printedPlaneSchema.extend({
   devices: z.array(deviceParticipantSchema),
   reported,
   qualifiers,
+  preciseValues,
   furtherItems: z.array(furtherItemSchema),
 });
 export type ReportPlane = z.infer<typeof reportPlaneSchema>;

@@ -94,7 +94,7 @@ function arrange(items: fc.Arbitrary<ContentNode[]>): fc.Arbitrary<ContentNode[]
       .tuple(fc.shuffledSubarray(all, { minLength: all.length }), fc.nat(20), fc.nat(20))
       .map(([mixed, from, count]) => {
         if (count < 12) return mixed;
-        const group: ContentNode = { r: 'CONTAINS', t: 'CONTAINER', c: ['G1', '99QUILLON', 'Group'] };
+        const group: ContentNode = { r: 'CONTAINS', t: 'CONTAINER', c: ['121111', 'DCM', 'Summary'] };
         const inner = mixed.slice(from, from + count);
         if (inner.length === 0) return mixed;
         return [...mixed.slice(0, from), { ...group, k: inner }, ...mixed.slice(from + count)];

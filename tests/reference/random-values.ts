@@ -72,7 +72,7 @@ export function numbersFor(fields: Record<string, string>): fc.Arbitrary<Content
         .integer({ min: 0, max: 2 })
         .chain((chance) =>
           chance > 0
-            ? fc.constant([])
+            ? fc.constant<ContentNode[]>([])
             : fc.array(numberOf(concept, field), { minLength: 1, maxLength: /Values/.test(field) ? 4 : 1 }),
         ),
     );

@@ -2,6 +2,7 @@ import { sequenceElement, type DataSet } from '../../server/dicom-writer/data-el
 import type { DoseReportContent, WrittenEvent } from '../../server/dicom-writer/dose-report-content';
 import { doseReportDataSet, writeDoseReport } from '../../server/dicom-writer/write-dose-report';
 import { writeFile, type FileOptions } from '../../server/dicom-writer/write-file';
+import { changeEveryItem, changeItems, conceptOf } from '../../scripts/samples/edit-content';
 import { readDoseReport } from '../../server/dicom/read-dose-report';
 
 export const event = (overrides: Partial<WrittenEvent> = {}): WrittenEvent => ({
@@ -38,10 +39,21 @@ export const readContent = (overrides: Partial<DoseReportContent> = {}, options?
   read(writeDoseReport(content(overrides), options));
 
 /** The report with its root's content items rewritten. */
-export function withItems(change: (items: DataSet[]) => DataSet[]): Uint8Array {
+export function withItems(change: (items: DataSet[]) => DataSet[], options?: FileOptions): Uint8Array {
   return writeFile(
     doseReportDataSet(content()).map((element) =>
       element.tag === 0x0040a730 ? sequenceElement(0x0040a730, change(element.value as DataSet[])) : element,
     ),
+    options,
+  );
+}
+
+/** The report with the items of its one event rewritten. */
+export function withEventItems(change: (items: DataSet[]) => DataSet[], options?: FileOptions): Uint8Array {
+  return writeFile(
+    changeEveryItem(doseReportDataSet(content()), (item) =>
+      conceptOf(item) === '113706' ? changeItems(item, change) : item,
+    ),
+    options,
   );
 }
