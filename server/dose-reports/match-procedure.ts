@@ -8,18 +8,20 @@ import { accessionKeyOf, addPatientIdentity, patientKeyOf } from '../procedures/
 import {
   addProcedure,
   findByStudy,
+  findHeir,
   findProcedure,
   freeStudyKey,
   listByOrder,
   lockHeir,
   lockOrder,
+  lockProcedure,
   lockStudy,
   nextCaseNumber,
   updateProcedure,
 } from '../procedures/procedure.store';
 import type { Procedure } from '../procedures/procedure.entity';
 import { lockGrouping } from '../regrouping/regrouping-lock.store';
-import { mayBelongTogether } from '../regrouping/span';
+import { mayBelongTogether, pauseBetweenH } from '../regrouping/span';
 import { prefillRecord } from './prefill-record';
 import { spanOfReport } from './report-span';
 
@@ -90,10 +92,12 @@ async function joinOrder(
 ): Promise<Procedure | null> {
   const span = spanOfReport(report, hospital.timeZone);
   if (!span) return null;
+  const near: Procedure[] = [];
   for (const id of await listByOrder(tx, hospital.id, accessionKey, report)) {
-    const heir = await lockHeir(tx, hospital.id, id);
+    const heir = await findHeir(tx, hospital.id, id);
     if (heir && !heir.isWithdrawn && heir.timeBasis !== 'receipt' && mayBelongTogether(heir, span))
-      return heir;
+      near.push(heir);
   }
-  return null;
+  const nearest = near.toSorted((a, b) => pauseBetweenH(a, span) - pauseBetweenH(b, span))[0];
+  return nearest ? lockProcedure(tx, hospital.id, nearest.id) : null;
 }

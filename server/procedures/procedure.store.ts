@@ -85,15 +85,21 @@ export async function listByOrder(
   return rows.map(({ id }) => id);
 }
 
-/** Where the reports of a procedure are now: itself, or what took it over, and so on; locked. */
-export async function lockHeir(db: EntityManager, hospitalId: string, id: string): Promise<Procedure | null> {
-  let procedure = await lockProcedure(db, hospitalId, id);
+/** Where the reports of a procedure are now: itself, or what took it over, and so on. */
+export async function findHeir(db: EntityManager, hospitalId: string, id: string): Promise<Procedure | null> {
+  let procedure = await findProcedure(db, hospitalId, id);
   const seen = new Set([id]);
   while (procedure?.mergedIntoId && !seen.has(procedure.mergedIntoId)) {
     seen.add(procedure.mergedIntoId);
-    procedure = await lockProcedure(db, hospitalId, procedure.mergedIntoId);
+    procedure = await findProcedure(db, hospitalId, procedure.mergedIntoId);
   }
   return procedure;
+}
+
+/** The same, locked: nobody may regroup meanwhile, so that the way there holds still. */
+export async function lockHeir(db: EntityManager, hospitalId: string, id: string): Promise<Procedure | null> {
+  const heir = await findHeir(db, hospitalId, id);
+  return heir && lockProcedure(db, hospitalId, heir.id);
 }
 
 /** "26-00412": the year of the procedure and a number that counts up. */
