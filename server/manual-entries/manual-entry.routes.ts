@@ -4,12 +4,15 @@ import {
   enteredSchema,
   manualEntryCorrectionSchema,
   manualEntrySchema,
+  neighbourQuerySchema,
+  neighbourSchema,
   newManualEntrySchema,
 } from '../../shared/contract/manual-entry';
 import { route, type Route } from '../http/route';
 import { openProcedure } from '../procedures/open-procedure';
 import { correctEntry } from './correct-entry';
 import { enterByHand } from './enter-by-hand';
+import { findNeighbours } from './find-neighbours';
 import { listEntries } from './list-entries';
 import { showPhoto } from './show-photo';
 
@@ -25,6 +28,15 @@ export const manualEntryRoutes: Route[] = [
     response: enteredSchema,
     status: 201,
     handle: ({ deps, actor, body }) => enterByHand(deps.db, actor, body, deps.now()),
+  }),
+  route({
+    method: 'get',
+    path: '/manual-entries/neighbours',
+    permission: 'procedure.enter-by-hand',
+    summary: 'Procedures of the same machine within an hour of a start',
+    query: neighbourQuerySchema,
+    response: listOf(neighbourSchema),
+    handle: async ({ deps, actor, query }) => ({ items: await findNeighbours(deps.db, actor, query) }),
   }),
   route({
     method: 'post',

@@ -28,6 +28,7 @@ const emptyPlane = (plane: ReportPlane['plane']): ReportPlane => ({
   calibrations: [],
   devices: [],
   reported: {},
+  preciseValues: {},
   qualifiers: {},
   furtherItems: [],
 });

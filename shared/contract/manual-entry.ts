@@ -85,3 +85,16 @@ export const manualEntrySchema = z.object({
   isCurrent: z.boolean(),
 });
 export type ManualEntry = z.infer<typeof manualEntrySchema>;
+
+/** Where and about when an entry says that the procedure was. */
+export const neighbourQuerySchema = z.object({ equipment: idSchema, at: wallClockSchema });
+
+/** A procedure of the same machine within an hour: perhaps the very one that is being typed. */
+export const neighbourSchema = z.object({
+  id: idSchema,
+  caseNumber: z.string(),
+  startedAt: z.string(),
+  name: z.string().nullable(),
+  isManual: z.boolean(),
+});
+export type Neighbour = z.infer<typeof neighbourSchema>;

@@ -221,3 +221,17 @@ test('a machine that no list knows is entered by its room', async () => {
   const { procedureId } = await enter([kap('5')], { equipmentId: null, roomId: room.id });
   expect((await open(procedureId)).room).toEqual({ id: room.id, name: 'OR3' });
 });
+
+test('what is stored of the same machine and hour is told before it is typed again', async () => {
+  const at = '2026-03-02T09:00';
+  const { procedureId } = await enter([kap('5')], {
+    localStartedAt: '2026-03-02T09:50',
+    procedureTypeId: typeId,
+  });
+  await enter([kap('5')], { localStartedAt: '2026-03-02T10:10' });
+  const near = async (equipment: string) =>
+    (await technologist.get(`/api/manual-entries/neighbours?equipment=${equipment}&at=${at}`).expect(200))
+      .body.items;
+  expect(await near(machineId)).toMatchObject([{ id: procedureId, name: 'Nephrostomy', isManual: true }]);
+  expect(await near(procedureId)).toEqual([]);
+});

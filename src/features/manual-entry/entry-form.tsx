@@ -13,6 +13,7 @@ import { dropEntryDraft, keepEntryDraft, readEntryDraft, useKeptEntry } from './
 import { listFigures, toTyped, type EntryValues } from './entry-values';
 import { FiguresPart } from './figures-part';
 import { findEntryIssues, pointToField } from './find-entry-issues';
+import { NeighboursNote } from './neighbours-note';
 import { PatientPart } from './patient-part';
 import { PhotoPart } from './photo-part';
 import { SecondPass } from './second-pass';
@@ -105,6 +106,7 @@ export function EntryForm({ kind, draftName, opened, choices, send, backTo, onEn
         )}
         <ProblemNote error={send.error} kept="Your entries are still in the form." />
         <CasePart choices={choices} isNew={kind === 'new'} />
+        {kind === 'new' && <NeighboursNote />}
         {kind === 'new' && <PatientPart />}
         <FiguresPart />
         <DoubtsNote />

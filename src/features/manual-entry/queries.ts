@@ -1,8 +1,9 @@
 import { queryOptions } from '@tanstack/react-query';
 import { listOf } from '../../../shared/contract/common';
 import { equipmentChoiceSchema } from '../../../shared/contract/equipment';
-import { manualEntrySchema } from '../../../shared/contract/manual-entry';
+import { manualEntrySchema, neighbourSchema } from '../../../shared/contract/manual-entry';
 import { request } from '../../lib/api';
+import { withQuery } from '../../lib/url-query';
 
 export const manualEntryQueries = {
   machines: () =>
@@ -10,6 +11,18 @@ export const manualEntryQueries = {
       queryKey: ['equipment', 'choices'],
       queryFn: async ({ signal }) =>
         (await request('/api/equipment/choices', { schema: listOf(equipmentChoiceSchema), signal })).items,
+    }),
+  /** What is stored already of a machine about a start. */
+  neighbours: (equipment: string, at: string) =>
+    queryOptions({
+      queryKey: ['procedures', 'neighbours', equipment, at],
+      queryFn: async ({ signal }) =>
+        (
+          await request(withQuery('/api/manual-entries/neighbours', { equipment, at }), {
+            schema: listOf(neighbourSchema),
+            signal,
+          })
+        ).items,
     }),
   /** Below the procedure's own key: what changes the procedure makes them stale. */
   ofProcedure: (id: string) =>
