@@ -3,6 +3,7 @@ import { fileURLToPath } from 'node:url';
 import { readableGroups } from './samples/readable-samples';
 import type { Sample } from './samples/sample';
 import { unreadableSamples } from './samples/unreadable-samples';
+import { variations } from './samples/variations.table-data';
 
 const folder = fileURLToPath(new URL('../samples/', import.meta.url));
 
@@ -36,5 +37,14 @@ for (const { fileName, bytes, expected, isValid } of samples) {
   writeFileSync(`${folder}${name}.expected.json`, `${JSON.stringify({ fileName, isValid, ...expected })}\n`);
 }
 const list = Object.entries(groups).map(([title, members]) => `## ${title}\n\n${members.map(line).join('')}`);
-writeFileSync(`${folder}README.md`, introduction + list.join('\n'));
+const numbers = samples.map(({ fileName }) => /^\d+/.exec(fileName)?.[0]);
+const shown = variations.map(([what, ...shownBy]) => {
+  const unknown = shownBy.find((number) => !numbers.includes(number));
+  if (unknown) throw new Error(`no sample ${unknown} for ${what}`);
+  return `- ${what}: ${shownBy.join(', ')}\n`;
+});
+writeFileSync(
+  `${folder}README.md`,
+  `${introduction}## Where to find what\n\n${shown.join('')}\n${list.join('\n')}`,
+);
 process.stdout.write(`${samples.length} samples written to samples/\n`);
