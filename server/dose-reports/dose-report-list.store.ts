@@ -2,6 +2,7 @@ import type { EntityManager } from 'typeorm';
 import type { Remark } from '../../shared/contract/common';
 import type { DoseReport } from '../../shared/contract/dose-report';
 import type { Cursor } from '../kernel/cursor';
+import { isHopeless } from './read-again.store';
 
 export type ListedReport = Required<Omit<DoseReport, 'warnings'>> & {
   warnings: Remark[];
@@ -41,7 +42,7 @@ export async function listReports(
             report."outcome", report.reason_code as "reasonCode", report.reason_detail as "reasonDetail",
             file.byte_count as "byteCount", report.file_name as "fileName", report.procedure_id as "procedureId",
             report.archive_id as "archiveId", report.archive_name as "archiveName",
-            report.original_file_id is not null as "canReadAgain", held."inArchive" or report.original_file_id is not null as "hasOriginal",
+            report.original_file_id is not null and not coalesce(${isHopeless}, false) as "canReadAgain", held."inArchive" or report.original_file_id is not null as "hasOriginal",
             case when $8 > 0 and report."outcome" = 'refused' and (report.original_file_id is not null or held."inArchive")
               then report.settled_at + make_interval(days => $8) end as "keptUntil",
             report.purged_at as "purgedAt",

@@ -2,8 +2,8 @@ import type { EntityManager } from 'typeorm';
 import type { ReadAgainCandidate, ReadAgainList } from '../../shared/contract/read-again';
 import { IrradiationEvent } from '../procedures/irradiation-event.entity';
 
-/** Nothing that a better reader of DICOM could help. */
-const hopeless = `report.reason_code in ('empty', 'not-dicom') or report.reason_code like 'archive-%'`;
+/** Nothing that a better reader of DICOM could help; for a query that calls the row `report`. */
+export const isHopeless = `report.reason_code in ('empty', 'not-dicom') or report.reason_code like 'archive-%'`;
 
 /**
  * Kept files that may be read again: read by another version of the reader, or held. Where two reports of one identity
@@ -15,7 +15,7 @@ const candidates = `
    and report."outcome" in ('stored', 'held', 'refused')
    and coalesce(report.reason_code, '') not like 'sop-instance-%'
    and (report."outcome" = 'held' or report.reader_version is distinct from $2)
-   and not coalesce(${hopeless}, false)`;
+   and not coalesce(${isHopeless}, false)`;
 
 export const listCandidates = (
   db: EntityManager,

@@ -13,7 +13,7 @@ export const doseReportSchema = z.object({
   byteCount: z.int().nullable(),
   /** Whether the bytes can be downloaded: the file's own, or those of the archive that it could not be taken out of. */
   hasOriginal: z.boolean(),
-  /** Whether the file's own bytes are kept, so that it can be read again. */
+  /** Whether the file's own bytes are kept and a better reader could make something of them. */
   canReadAgain: z.boolean(),
   /** When the bytes of a refused file will be deleted; null: they are kept for as long as the report is. */
   keptUntil: z.string().nullable(),

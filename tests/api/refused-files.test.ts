@@ -117,6 +117,8 @@ test('the bytes of a refused file are kept for a time that the list tells, those
   const told = body.items.find((item: { fileName: string }) => item.fileName === 'told.txt');
   const days = (Date.parse(told.keptUntil) - Date.parse(told.receivedAt)) / 86_400_000;
   expect(days).toBeCloseTo(180, 1);
+  // No reader of DICOM will ever make a report of a text.
+  expect(told).toMatchObject({ hasOriginal: true, canReadAgain: false });
   const good = body.items.find((item: { fileName: string }) => item.fileName === 'good.dcm');
   expect(good.keptUntil).toBeNull();
 });

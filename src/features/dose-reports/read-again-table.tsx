@@ -42,6 +42,7 @@ const listColumns = ({
   {
     key: 'verdict',
     head: 'Read now',
+    className: 'md:min-w-36',
     cell: ({ verdict }) => (
       <span className={verdict === 'fails' ? 'font-semibold text-beacon' : undefined}>
         {verdictWords[verdict]}

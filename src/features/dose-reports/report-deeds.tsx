@@ -13,7 +13,7 @@ import { outcomeWords } from './report-words';
 export function ReportDeeds({ report, decideIn }: { report: DoseReport; decideIn: string | null }) {
   const readAgain = useReadAgain();
   const isUnread = ['held', 'refused', 'received'].includes(report.outcome);
-  const isInArchive = !report.canReadAgain;
+  const isInArchive = report.byteCount === null;
   if (!report.hasOriginal) return null;
   return (
     <div className="flex flex-wrap items-center gap-x-4 gap-y-1 text-sm whitespace-nowrap md:flex-col md:items-start">

@@ -22,15 +22,16 @@ const sizeOf = (byteCount: number) =>
 export const ReportFile = ({ report }: { report: DoseReport }) => (
   <span className="wrap-anywhere">
     {report.fileName === undefined ? `File ${report.id.slice(-6)}` : <FileName path={report.fileName} />}
-    {report.archiveId && report.archiveName && (
-      <span className="block text-sm font-normal text-ink-2">
-        in{' '}
-        <Link to={`?archive=${report.archiveId}`} className="link-line">
-          {report.archiveName}
-        </Link>
-      </span>
-    )}
     <span className="block text-sm font-normal text-ink-2">
+      {report.archiveId && report.archiveName && (
+        <>
+          in{' '}
+          <Link to={`?archive=${report.archiveId}`} className="link-line">
+            {report.archiveName}
+          </Link>
+          {report.byteCount !== null && ', '}
+        </>
+      )}
       {report.channel === 'generated' && 'generated, no original'}
       {report.channel === 'manual' && 'entered by hand, no original'}
       {report.channel === 'page' && report.byteCount !== null && sizeOf(report.byteCount)}

@@ -17,11 +17,12 @@ export const isTrouble = (item: Upload): boolean => item.state === 'failed' || i
 const lineLook =
   'flex flex-col gap-1 border-b border-rule pb-2 [content-visibility:auto] [contain-intrinsic-size:auto_3rem]';
 
+/** Where room is short, the folder gives way before the name does. */
 function Name({ name, folder }: { name: string; folder: string }) {
   return (
-    <span className="min-w-0 truncate" title={`${folder}${name}`}>
-      {folder && <span className="text-ink-2">{folder}</span>}
-      {name}
+    <span className="flex min-w-0" title={`${folder}${name}`}>
+      {folder && <span className="min-w-0 truncate text-ink-2">{folder}</span>}
+      <span className="max-w-full flex-none truncate">{name}</span>
     </span>
   );
 }
