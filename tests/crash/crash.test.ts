@@ -1,8 +1,9 @@
 import { createHash, randomUUID } from 'node:crypto';
-import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { existsSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { chmod } from 'node:fs/promises';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { setTimeout as pause } from 'node:timers/promises';
 import { inflateRawSync } from 'node:zlib';
 import type { DataSource } from 'typeorm';
 import { afterAll, beforeAll, expect, test } from 'vitest';
@@ -66,8 +67,11 @@ const makeFiles = (): OutgoingFile[] =>
     return { bytes, sha256, uploadKey: index % 2 === 0 ? randomUUID() : null };
   });
 
-const readPostmasterPid = () =>
-  Number(readFileSync(join(folder, 'postgres', 'postmaster.pid'), 'utf8').split('\n')[0]);
+/** While the server is starting there may be no file; a killed one's stays until then. */
+function readPostmasterPid(): number {
+  const file = join(folder, 'postgres', 'postmaster.pid');
+  return existsSync(file) ? Number(readFileSync(file, 'utf8').split('\n')[0]) : 0;
+}
 
 /** Kills at the planned points, each put off by a random few files; returns what was killed. */
 function planKills() {
@@ -76,7 +80,12 @@ function planKills() {
   let busy: Promise<void> = Promise.resolve();
   const strike = async (victim: 'server' | 'database') => {
     done.push(victim);
-    if (victim === 'database') return void process.kill(readPostmasterPid(), 'SIGKILL');
+    if (victim === 'database') {
+      const killed = readPostmasterPid();
+      process.kill(killed, 'SIGKILL');
+      while (readPostmasterPid() === killed) await pause(50);
+      return server.recovers();
+    }
     await server.kill();
     await server.start();
   };

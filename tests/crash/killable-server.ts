@@ -1,5 +1,6 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import { createInterface } from 'node:readline';
+import { setTimeout as pause } from 'node:timers/promises';
 
 /** Starts the server on a port, waits until it listens, and ends it without warning. */
 export class KillableServer {
@@ -37,6 +38,19 @@ export class KillableServer {
         if (line.startsWith('ready ')) resolve();
       });
     });
+  }
+
+  /** Waits until it answers with its database again: it must live through the loss by itself. */
+  async recovers(): Promise<void> {
+    const isWell = () =>
+      fetch(`${this.url}/api/health`).then(
+        ({ ok }) => ok,
+        () => false,
+      );
+    while (!(await isWell())) {
+      if (!this.isRunning) throw new Error('the server ended with its database');
+      await pause(100);
+    }
   }
 
   async kill(): Promise<void> {
