@@ -65,6 +65,11 @@ export const ofPlane = (plane: PlaneTotals, planes: PlaneTotals[]): string =>
   planes.length > 1 && plane.plane !== null ? ` of plane ${plane.plane}` : '';
 
 export const kermaQuantities = [
-  { field: 'referenceAirKermaGy', sign: 'K a,r' },
-  { field: 'kermaAreaProductGyCm2', sign: 'P KA' },
+  {
+    field: 'referenceAirKermaGy',
+    sign: 'K a,r',
+    /** As it is printed. */
+    print: (value: number) => `${write(value * 1000)} mGy`,
+  },
+  { field: 'kermaAreaProductGyCm2', sign: 'P KA', print: (value: number) => `${write(value)} Gy·cm²` },
 ] as const;

@@ -69,7 +69,7 @@ const fieldAreaForType: CheckRule = {
     const off = Math.max(ratio, 1 / ratio);
     return high !== null && off > high
       ? found(
-          `Mean field area ${write(areaCm2)} cm²: ${write(off)} times ${ratio > 1 ? 'above' : 'below'} the median of its type, ${write(typeFieldArea.medianCm2)} cm²: a unit slip?`,
+          `Mean field area ${write(areaCm2)} cm² is ${ratio > 1 ? `${write(off)} times` : `1/${write(off)} of`} the median of its type, ${write(typeFieldArea.medianCm2)} cm²: a unit slip?`,
           areaCm2,
         )
       : passed(`Mean field area fits its type’s median of ${write(typeFieldArea.medianCm2)} cm²`);

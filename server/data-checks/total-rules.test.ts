@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { makeReport, resultOf } from './given-facts';
+import { checkOne, makeReport, resultOf } from './given-facts';
 
 test('more than five per cent between events and totals is said; a factor of ten is a unit', () => {
   const sums = (kermaGy: number) => ({ kermaGy: 1, productGyCm2: 100, summed: { kermaGy } });
@@ -14,7 +14,9 @@ test('more than five per cent between events and totals is said; a factor of ten
 test('a total that holds the procedure before is a counter that was not reset', () => {
   const previousTotals = new Map([['machine', { referenceAirKermaGy: 1.2, kermaAreaProductGyCm2: null }]]);
   const total = (kermaGy: number) => ({ kermaGy, summed: { kermaGy: 0.35 }, context: { previousTotals } });
-  expect(resultOf('reset-failure', total(1.55))).toBe('failed');
+  const standing = checkOne('reset-failure', total(1.55));
+  expect(standing.result).toBe('failed');
+  expect(standing.detail).toMatch(/by 1.200 mGy.*\(1.200 mGy\)/);
   expect(resultOf('reset-failure', total(1.3))).toBe('passed');
   expect(resultOf('reset-failure', total(0.35))).toBe('passed');
   expect(resultOf('reset-failure', { kermaGy: 1.55, summed: { kermaGy: 0.35 } })).toBe('not-checked');

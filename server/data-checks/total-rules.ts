@@ -121,7 +121,7 @@ const resetFailure: CheckRule = {
     let compared = 0;
     for (const [equipmentId, previous] of context.previousTotals) {
       const own = planes.filter((plane) => plane.equipmentId === equipmentId);
-      for (const { field, sign } of kermaQuantities) {
+      for (const { field, sign, print } of kermaQuantities) {
         const before = previous[field];
         const excess = own.length === 0 ? null : excessOf(own, field);
         if (excess === null || before === null || before <= 0 || excess.events <= 0) continue;
@@ -131,7 +131,7 @@ const resetFailure: CheckRule = {
           Math.abs(excess.excess - before) <= counterTolerance * before
         )
           return found(
-            `${sign}: the reported total exceeds the sum of events by ${write(excess.excess)}, which is what the machine displayed at the procedure before (${write(before)}): not reset?`,
+            `${sign}: the reported total exceeds the sum of events by ${print(excess.excess)}, which is what the machine displayed at the procedure before (${print(before)}): not reset?`,
             field,
             excess.excess,
           );

@@ -29,6 +29,18 @@ export const readSettled = (
   quantity: TotalQuantity,
 ): number | null => settledFigures?.[fieldOf[quantity]] ?? null;
 
+/**
+ * Whether an open finding is about this quantity: rules about fluoroscopy time doubt the time, all others what was
+ * measured.
+ */
+export const isDoubted = ({ dataChecks }: Pick<Procedure, 'dataChecks'>, quantity: TotalQuantity): boolean =>
+  dataChecks.some(
+    ({ code, result, settlement }) =>
+      result === 'failed' &&
+      settlement === null &&
+      code.startsWith('fluoroscopy-time') === (quantity === 'fluoroscopy-time'),
+  );
+
 const add = (one: number, other: number): number => one + other;
 // Not Math.max itself: a fold hands over place and list as well.
 const takeLarger = (one: number, other: number): number => Math.max(one, other);

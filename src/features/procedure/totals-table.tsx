@@ -3,7 +3,14 @@ import { formatKermaAreaProduct } from '../../../shared/units';
 import { DataTable } from '../../ui/data-table';
 import type { Column } from '../../ui/data-table.types';
 import { DoubtWords } from '../../ui/doubt-words';
-import { combinePlanes, readPlane, readSettled, totalQuantities, type TotalQuantity } from './combine-planes';
+import {
+  combinePlanes,
+  isDoubted,
+  readPlane,
+  readSettled,
+  totalQuantities,
+  type TotalQuantity,
+} from './combine-planes';
 import { namePlane } from './procedure-words';
 import { quantityNames, TotalSign } from './quantity-words';
 import { TotalFigure } from './total-figure';
@@ -26,7 +33,7 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
           quantity={quantity}
           settled={isOne ? readSettled(procedure, quantity) : null}
         />
-        {isOne && <DoubtWords {...procedure} />}
+        {isOne && <DoubtWords isInDoubt={isDoubted(procedure, quantity)} isLeftOut={procedure.isLeftOut} />}
         {quantity === 'kerma-area-product' && <Parts plane={plane} />}
       </span>
     ),
@@ -56,7 +63,7 @@ export function TotalsTable({ procedure }: { procedure: Procedure }) {
             isUpperBound={quantity === 'reference-air-kerma' && isReferenceAirKermaUpperBound}
             settled={readSettled(procedure, quantity)}
           />
-          <DoubtWords {...procedure} />
+          <DoubtWords isInDoubt={isDoubted(procedure, quantity)} isLeftOut={procedure.isLeftOut} />
         </strong>
       ),
     },
