@@ -12,6 +12,12 @@ type Opened = 'class' | 'overlap' | 'withdrawal' | null;
 const overlapWords = (fieldsOverlap: boolean | null): string =>
   fieldsOverlap === null ? 'not judged' : fieldsOverlap ? 'overlap' : 'lie apart';
 
+const describeCounting = ({ isWithdrawn, mergedInto, isInDoubt, isLeftOut }: Procedure): string => {
+  if (isWithdrawn) return mergedInto ? 'no: merged' : 'no: withdrawn';
+  if (isInDoubt) return 'not in statistics: in doubt';
+  return isLeftOut ? 'not in statistics: left out' : 'yes';
+};
+
 type MarksNoteProps = { procedure: Procedure; canClassify: boolean; canWithdraw: boolean };
 
 /** What people say about the procedure as a whole: its class, whether two fields meet, whether it counts. */
@@ -26,9 +32,7 @@ export function MarksNote({ procedure, canClassify, canWithdraw }: MarksNoteProp
         {hasTwoPlanes && (
           <DefinitionRow name="Fields of the planes">{overlapWords(procedure.fieldsOverlap)}</DefinitionRow>
         )}
-        <DefinitionRow name="Counts">
-          {isWithdrawn ? (procedure.mergedInto ? 'no: merged' : 'no: withdrawn') : 'yes'}
-        </DefinitionRow>
+        <DefinitionRow name="Counts">{describeCounting(procedure)}</DefinitionRow>
       </DefinitionList>
       <div className="flex flex-wrap gap-2">
         {canClassify && (
