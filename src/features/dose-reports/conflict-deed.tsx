@@ -8,7 +8,9 @@ import { ConflictForm } from './conflict-form';
 /** Only for a held report whose identity another one has: compare the two and decide, or decide anew. */
 export function ConflictDeed({ report, timeZone }: { report: DoseReport; timeZone: string }) {
   const [isOpen, setIsOpen] = useState(false);
-  if (report.outcome !== 'held' || !isConflictCode(report.reasonCode)) return null;
+  const isDoubled = report.outcome === 'held' && isConflictCode(report.reasonCode);
+  // An open dialog closes itself once it is decided; only then nothing is left to do here.
+  if (!isDoubled && !isOpen) return null;
   const close = () => setIsOpen(false);
   return (
     <>

@@ -54,7 +54,15 @@ function Decision({
   const isOpen = code === 'sop-instance-conflict';
   const [decision, setDecision] = useState<'keep' | 'replace'>(isOpen && stored ? 'keep' : 'replace');
   const queryClient = useQueryClient();
-  const decide = useDecide(reportId);
+  const decide = useDecide(reportId, (decided) => {
+    showToast({
+      text:
+        decided.decision === 'keep'
+          ? 'The stored report counts. The other is kept beside it.'
+          : 'The report counts now. The other is kept and can be put back.',
+    });
+    onClose();
+  });
   const form = useForm({
     resolver: zodResolver(decideInputSchema.pick({ reason: true })),
     defaultValues: { reason: '' },
@@ -63,15 +71,6 @@ function Decision({
     decide.mutate(
       { decision, storedId: stored?.doseReportId ?? null, reason },
       {
-        onSuccess: () => {
-          showToast({
-            text:
-              decision === 'keep'
-                ? 'The stored report counts. The other is kept beside it.'
-                : 'The report counts now. The other is kept and can be put back.',
-          });
-          onClose();
-        },
         onError: (error) => {
           placeIssues(error, form.setError);
           void queryClient.invalidateQueries({ queryKey: conflictQuery(reportId).queryKey });

@@ -13,9 +13,11 @@ export const conflictQuery = (id: string) =>
     staleTime: 0,
   });
 
-export const useDecide = (id: string) =>
+/** `onDone` is called even when the decided row has left the list meanwhile. */
+export const useDecide = (id: string, onDone: (input: DecideInput) => void) =>
   useMutation({
     mutationFn: (body: DecideInput) =>
       request(`${pathOf(id)}/decide`, { method: 'POST', body, schema: decidedSchema }),
+    onSuccess: (_decided, input) => onDone(input),
     meta: { invalidates: [doseReportsKey, ['procedures'], ['staff-exposure']] },
   });

@@ -77,7 +77,7 @@ export function compareSummaries(before: ReadingSummary, after: ReadingSummary):
       after: formatKermaAreaProduct(after.kermaAreaProductGyCm2),
     },
     {
-      name: 'fluoroscopy time, min:s',
+      name: 'fluoroscopy time, min',
       before: formatFluoroscopyTime(before.fluoroscopyTimeS),
       after: formatFluoroscopyTime(after.fluoroscopyTimeS),
     },

@@ -1,7 +1,11 @@
 import type { DoseReport } from '../../../shared/contract/dose-report';
+import { reasons, sentenceOfReason, type ReasonCode } from '../../../shared/contract/outcome';
 import { formatInstant } from '../../lib/clock';
 import { paths } from '../../paths';
 import { TextLink } from '../../ui/text-link';
+
+/** For those who must not see details: the sentence that says the same of every file. */
+const sentenceOf = (code: string) => (code in reasons ? sentenceOfReason(code as ReasonCode) : code);
 
 const dayOf = (instant: string, timeZone: string) => formatInstant(instant, timeZone).slice(0, 10);
 
@@ -10,7 +14,7 @@ export function ReportReason({ report, timeZone }: { report: DoseReport; timeZon
   const { reasonDetail, reasonCode, warnings = [], procedureId, keptUntil, purgedAt } = report;
   return (
     <div className="flex flex-col gap-1 text-sm">
-      {(reasonDetail ?? reasonCode) && <p>{reasonDetail ?? reasonCode}</p>}
+      {reasonCode && <p>{reasonDetail ?? sentenceOf(reasonCode)}</p>}
       {keptUntil && <p className="text-ink-2">Its bytes are kept until {dayOf(keptUntil, timeZone)}.</p>}
       {purgedAt && (
         <p className="text-ink-2">
