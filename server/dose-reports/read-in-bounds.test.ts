@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs';
-import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { afterAll, afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { readDoseReport } from '../dicom/read-dose-report';
 import { endReading, readInBounds } from './read-in-bounds';
 import { readingLimits } from './reading-limits';
@@ -7,13 +7,12 @@ import { readingLimits } from './reading-limits';
 const large = readFileSync('samples/21-300-events.dcm');
 const usual = { ...readingLimits };
 
-beforeEach(() => expect(large.length).toBeGreaterThan(usual.apartFromBytes));
-afterEach(async () => {
-  Object.assign(readingLimits, usual);
-  await endReading();
-});
+beforeAll(() => expect(large.length).toBeGreaterThan(usual.apartFromBytes));
+afterEach(() => Object.assign(readingLimits, usual));
+afterAll(endReading);
 
-describe('readInBounds', () => {
+// Starting a thread takes ten seconds where many others want the processor.
+describe('readInBounds', { timeout: 120_000 }, () => {
   it('gives of a large file what reading it here gives, to the last event', async () => {
     expect(await readInBounds(large)).toEqual(readDoseReport(large));
   });
@@ -44,6 +43,7 @@ describe('readInBounds', () => {
   });
 
   it('holds what needs too much memory, and reads the next file', async () => {
+    await endReading();
     Object.assign(readingLimits, { heapMb: 4 });
     expect(await readInBounds(large)).toMatchObject({ outcome: 'held', reason: { code: 'limit-memory' } });
     Object.assign(readingLimits, usual);

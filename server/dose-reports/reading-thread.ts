@@ -19,7 +19,10 @@ export class ReadingThread {
 
   static async start(): Promise<ReadingThread> {
     const worker = new Worker(new URL('./start-reading-worker.mjs', import.meta.url), {
-      resourceLimits: { maxOldGenerationSizeMb: readingLimits.heapMb },
+      resourceLimits: {
+        maxOldGenerationSizeMb: readingLimits.heapMb,
+        maxYoungGenerationSizeMb: readingLimits.youngHeapMb,
+      },
     });
     const thread = new ReadingThread(worker);
     try {
