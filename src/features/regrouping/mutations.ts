@@ -25,9 +25,11 @@ export const useRegroup = () =>
     meta,
   });
 
-export const useTakeBack = (regroupingId: string) =>
+/** `onDone` is called even when what was taken back has left the page meanwhile. */
+export const useTakeBack = (regroupingId: string, onDone: (taken: Regrouped) => void) =>
   useMutation<Regrouped, Error, TakeBackInput>({
     mutationFn: (body) =>
       request(`/api/regroupings/${regroupingId}/undo`, { method: 'POST', body, schema: regroupedSchema }),
+    onSuccess: onDone,
     meta,
   });

@@ -11,12 +11,15 @@ import { TakeBackDialog } from './take-back-dialog';
 
 /** What a physicist may do with the reports of a procedure: move, split, merge, and take the last of it back. */
 export function RegroupDeeds({ procedure, timeZone }: { procedure: Procedure; timeZone: string }) {
-  const [opened, setOpened] = useState<RegroupingKind | 'back' | null>(null);
+  const [opened, setOpened] = useState<RegroupingKind | null>(null);
+  // Kept here: once taken back it is no longer the last, and its dialog still has to close.
+  const [takingBackId, setTakingBackId] = useState<string | null>(null);
+  const [isBackOpen, setIsBackOpen] = useState(false);
   const { data: lines = [] } = useQuery(regroupingQueries.list(procedure.id));
   const last = lines.find(({ canTakeBack }) => canTakeBack);
+  const takingBack = lines.find(({ id }) => id === takingBackId);
   const close = () => setOpened(null);
   const { length: reportCount } = procedure.reports;
-  const kind = opened === 'back' ? null : opened;
   return (
     <>
       <div className="flex flex-wrap gap-2">
@@ -39,16 +42,27 @@ export function RegroupDeeds({ procedure, timeZone }: { procedure: Procedure; ti
       {last && (
         <div className="flex flex-wrap items-baseline justify-between gap-x-3 gap-y-1 text-sm">
           <span>{describeLine(last, procedure.id)}.</span>
-          <Button isSmall onClick={() => setOpened('back')}>
+          <Button
+            isSmall
+            onClick={() => {
+              setTakingBackId(last.id);
+              setIsBackOpen(true);
+            }}
+          >
             Take back …
           </Button>
         </div>
       )}
-      <Dialog isWide isOpen={kind !== null} onClose={close} title={kind ? kindTitles[kind] : ''}>
-        {kind && <RegroupForm procedure={procedure} kind={kind} timeZone={timeZone} onClose={close} />}
+      <Dialog isWide isOpen={opened !== null} onClose={close} title={opened ? kindTitles[opened] : ''}>
+        {opened && <RegroupForm procedure={procedure} kind={opened} timeZone={timeZone} onClose={close} />}
       </Dialog>
-      {last && (
-        <TakeBackDialog line={last} procedureId={procedure.id} isOpen={opened === 'back'} onClose={close} />
+      {takingBack && (
+        <TakeBackDialog
+          isOpen={isBackOpen}
+          line={takingBack}
+          procedureId={procedure.id}
+          onClose={() => setIsBackOpen(false)}
+        />
       )}
     </>
   );

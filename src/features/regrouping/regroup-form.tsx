@@ -3,6 +3,7 @@ import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
 import type { Procedure } from '../../../shared/contract/procedure';
 import type { PreviewInput, RegroupCandidate, RegroupingKind } from '../../../shared/contract/regrouping';
+import { ApiProblem } from '../../lib/api-problem';
 import { paths } from '../../paths';
 import { showToast } from '../../ui/toast-store';
 import { useRegroup, type RegroupDeed } from './mutations';
@@ -73,7 +74,8 @@ export function RegroupForm({ procedure, kind, timeZone, onClose }: RegroupFormP
       },
       onError: (error) => {
         onError(error);
-        // Somebody was faster: the page and the candidates show what they did.
+        // Somebody was faster: the page shows what they did, and the other procedure is chosen anew.
+        if (error instanceof ApiProblem && error.code === 'conflict') setTarget(null);
         void queryClient.invalidateQueries({ queryKey: ['procedures', 'one', procedure.id] });
       },
     });

@@ -16,7 +16,10 @@ type TakeBackDialogProps = {
 /** The way back of the last merge, split or move. */
 export function TakeBackDialog({ line, procedureId, isOpen, onClose }: TakeBackDialogProps) {
   const queryClient = useQueryClient();
-  const takeBack = useTakeBack(line.id);
+  const takeBack = useTakeBack(line.id, ({ caseNumber }) => {
+    showToast({ text: `The reports are in ${caseNumber} again.` });
+    onClose();
+  });
   const { sourceVersion, targetVersion } = line;
   return (
     <Dialog isOpen={isOpen} onClose={onClose} title={`Take back: ${describeLine(line, procedureId)}`}>
@@ -30,10 +33,6 @@ export function TakeBackDialog({ line, procedureId, isOpen, onClose }: TakeBackD
           takeBack.mutate(
             { sourceVersion, targetVersion, reason },
             {
-              onSuccess: ({ caseNumber }) => {
-                showToast({ text: `The reports are in ${caseNumber} again.` });
-                onClose();
-              },
               onError: (error) => {
                 onError(error);
                 void queryClient.invalidateQueries({ queryKey: ['procedures', 'one', procedureId] });
