@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { calendarDateSchema, idSchema, remarkSchema, requiredText } from './common';
+import { calendarDateSchema, idSchema, remarkSchema } from './common';
 
 /** `hard`: a failure keeps the procedure out of every statistic until it is settled. `note`: said beside the figures. */
 export const checkSeverities = ['hard', 'note', 'off'] as const;
@@ -123,7 +123,7 @@ export type CheckRule = z.infer<typeof checkRuleSchema>;
 
 export const checkSettingInputSchema = standing.extend({
   validFrom: calendarDateSchema,
-  reason: requiredText(500).min(3, 'Say why in a few words.'),
+  reason,
   /** The newest setting that the person saw; null: there was none. */
   basedOn: idSchema.nullable(),
 });
