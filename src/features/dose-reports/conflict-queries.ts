@@ -8,7 +8,8 @@ const pathOf = (id: string) => `/api/dose-reports/${encodeURIComponent(id)}`;
 /** A held report beside the stored one of the same identity. */
 export const conflictQuery = (id: string) =>
   queryOptions({
-    queryKey: [...doseReportsKey, 'conflict', id],
+    // Apart from the list: once decided there is nothing to compare, and the open dialog would ask in vain.
+    queryKey: ['dose-report-conflict', id],
     queryFn: ({ signal }) => request(`${pathOf(id)}/conflict`, { schema: conflictSchema, signal }),
     staleTime: 0,
   });
