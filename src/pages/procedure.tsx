@@ -24,7 +24,7 @@ import { NotFound } from '../frame/not-found';
 import { Page } from '../frame/page';
 import { paths } from '../paths';
 import { ButtonLink } from '../ui/button';
-import { TextLink } from '../ui/text-link';
+import { EmptyState } from '../ui/empty-state';
 import { EnteredByHand } from '../ui/entered-by-hand';
 
 export function Component() {
@@ -46,6 +46,7 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
       {isComplete ? 'Correct the record' : 'Complete the record'}
     </ButtonLink>
   );
+  if (procedure.mergedInto) return <EmptiedProcedure procedure={procedure} heir={procedure.mergedInto} />;
   return (
     <Page
       title={nameProcedure(procedure)}
@@ -71,6 +72,37 @@ function ProcedurePage({ procedure }: { procedure: Procedure }) {
           !isComplete && (canComplete ? recordLink : 'A technologist or the physicist completes the record.')
         }
       />
+    </Page>
+  );
+}
+
+/** Its reports went to another procedure: nothing is left to show but its record and its history. */
+function EmptiedProcedure({
+  procedure,
+  heir,
+}: {
+  procedure: Procedure;
+  heir: NonNullable<Procedure['mergedInto']>;
+}) {
+  const user = useUser();
+  const hasRecord = procedure.recordState === 'complete' && can(user, 'procedure.complete');
+  return (
+    <Page
+      title={nameProcedure(procedure)}
+      eyebrow={describePlace(procedure)}
+      lead={<Lead procedure={procedure} />}
+      deeds={
+        hasRecord && <ButtonLink to={paths.procedureRecord(procedure.id)}>Look at its record</ButtonLink>
+      }
+      margin={<Margin procedure={procedure} />}
+    >
+      <EmptyState title={`Its dose reports are in ${heir.caseNumber}`}>
+        <p className="flex flex-col items-start gap-3">
+          Totals, exposures and staff exposure stand there. The physicist can take this back; everything is
+          then as it was.
+          <ButtonLink to={paths.procedure(heir.id)}>Open {heir.caseNumber}</ButtonLink>
+        </p>
+      </EmptyState>
     </Page>
   );
 }
@@ -138,19 +170,7 @@ const Lead = ({ procedure }: { procedure: Procedure }) => (
       </p>
     )}
     {procedure.isWithdrawn && (
-      <p className="font-semibold text-ink">
-        Withdrawn: it counts in no list and no statistic.
-        {procedure.mergedInto && (
-          <>
-            {' '}
-            Its reports are in{' '}
-            <TextLink to={paths.procedure(procedure.mergedInto.id)}>
-              {procedure.mergedInto.caseNumber}
-            </TextLink>
-            .
-          </>
-        )}
-      </p>
+      <p className="font-semibold text-ink">Withdrawn: it counts in no list and no statistic.</p>
     )}
     <AttentionReasons attention={procedure.attention} />
   </div>

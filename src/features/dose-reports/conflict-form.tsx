@@ -17,7 +17,7 @@ import { conflictQuery, useDecide } from './conflict-queries';
 import { compareSides, describeConflict, type ComparedRow } from './conflict-words';
 
 const columns: Column<ComparedRow>[] = [
-  { key: 'name', head: '', phone: 'title', cell: ({ name }) => name },
+  { key: 'name', head: <span className="sr-only">Stated</span>, phone: 'title', cell: ({ name }) => name },
   {
     key: 'stored',
     head: 'Counts now',
