@@ -1,4 +1,5 @@
 import { gzipSync } from 'node:zlib';
+import type { Response } from 'supertest';
 import { afterAll, beforeAll, expect, test } from 'vitest';
 import { writeNewReport } from '../../scripts/bench/written-report';
 import type { ReceivedFile, ReceivedFiles } from '../../shared/contract/received-files';
@@ -24,6 +25,13 @@ const attach = (zip: Buffer, name = 'old cases.zip') =>
 const send = async (entries: ZipEntry[]): Promise<ReceivedFiles> =>
   (await attach(writeZip(entries)).expect(200)).body;
 const codesOf = ({ results }: ReceivedFiles) => results.map(({ outcome, reason }) => reason?.code ?? outcome);
+
+/** Reads a download as bytes. */
+const collect = (response: Response, done: (error: Error | null, body: Buffer) => void) => {
+  const chunks: Buffer[] = [];
+  response.on('data', (chunk: Buffer) => chunks.push(chunk));
+  response.on('end', () => done(null, Buffer.concat(chunks)));
+};
 
 test('each entry of an archive has its outcome, in its order, named by its path', async () => {
   const same = report();
@@ -94,12 +102,6 @@ test('what could not be unpacked is handed out with its archive, what was unpack
   expect(Buffer.compare(await download(results[0] as ReceivedFile), zip)).toBe(0);
   expect((await download(results[1] as ReceivedFile)).length).toBeLessThan(zip.length);
 });
-
-const collect = (response: NodeJS.ReadableStream, done: (error: Error | null, body: Buffer) => void) => {
-  const chunks: Buffer[] = [];
-  response.on('data', (chunk: Buffer) => chunks.push(chunk));
-  response.on('end', () => done(null, Buffer.concat(chunks)));
-};
 
 test.each([
   [
