@@ -1,4 +1,5 @@
 import { quantile } from 'simple-statistics';
+import { plausibleFieldAreaCm2 } from '../../shared/dosimetry/field-plausibility';
 import {
   arithmetic,
   found,
@@ -23,8 +24,7 @@ const meanFieldArea: CheckRule = {
   source: practice,
   severity: 'hard',
   owner: 'physicist',
-  low: 4,
-  high: 600,
+  ...plausibleFieldAreaCm2,
   unit: 'cm²',
   check({ planes }, bounds) {
     const areas = planes.flatMap((plane) => {

@@ -1,3 +1,4 @@
+import { plausibleKermaRateMgyPerMin } from '../../shared/dosimetry/field-plausibility';
 import {
   arithmetic,
   found,
@@ -180,7 +181,7 @@ const kermaRate: CheckRule = {
   severity: 'note',
   owner: 'physicist',
   low: 0.05,
-  high: 600,
+  high: plausibleKermaRateMgyPerMin,
   unit: 'mGy/min',
   check({ together }, bounds) {
     const [time, kerma] = [together.fluoroscopyTimeS, together.referenceAirKerma.displayed];

@@ -111,7 +111,8 @@ function Parts({ plane }: { plane: PlaneTotals }) {
   );
 }
 
-const basisOf = (planes: readonly PlaneTotals[]): string => {
+const basisOf = ({ planes, isManual }: Procedure): string => {
+  if (isManual) return 'Totals as typed from the machine’s screen.';
   const bases = new Set(planes.map((plane) => plane.basis));
   if (bases.size > 1)
     return 'Totals as reported where the machine reported them, else summed over the events.';
@@ -122,7 +123,7 @@ const basisOf = (planes: readonly PlaneTotals[]): string => {
 
 const TotalsBasis = ({ procedure }: { procedure: Procedure }) => (
   <>
-    {basisOf(procedure.planes)}
+    {basisOf(procedure)}
     {procedure.settledFigures && (
       <>
         {' '}
