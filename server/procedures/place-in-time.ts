@@ -7,20 +7,27 @@ export function toInstant(local: string, timeZone: string): Date | null {
   return moment.isValid ? moment.toJSDate() : null;
 }
 
-/** The same for many texts: those of one wall-clock minute share its instant, and a zone's offset never changes within one. */
+const clockTime = /^(\d{4}-\d\d-\d\dT(?:[01]\d|2[0-3])):([0-5]\d):([0-5]\d(?:\.\d{1,6})?)$/;
+
+/**
+ * The same for many texts. Those of one wall-clock quarter of an hour share a conversion: where zones change their
+ * offset today, they do so at a quarter.
+ */
 export function createInstantReader(timeZone: string): (local: string) => Date | null {
-  const minutes = new Map<string, number | null>();
+  const quarters = new Map<string, number | null>();
   return (local) => {
-    const parts = /^(\d{4}-\d\d-\d\dT\d\d:\d\d):(\d\d(?:\.\d{1,6})?)$/.exec(local);
+    const parts = clockTime.exec(local);
     if (!parts) return toInstant(local, timeZone);
-    const [, minute = '', second = ''] = parts;
-    let startMs = minutes.get(minute);
+    const [, hour = '', minute = '', second = ''] = parts;
+    const minutesBefore = Number(minute) % 15;
+    const quarter = `${hour}:${String(Number(minute) - minutesBefore).padStart(2, '0')}`;
+    let startMs = quarters.get(quarter);
     if (startMs === undefined) {
-      startMs = toInstant(minute, timeZone)?.getTime() ?? null;
-      minutes.set(minute, startMs);
+      startMs = toInstant(quarter, timeZone)?.getTime() ?? null;
+      quarters.set(quarter, startMs);
     }
-    const seconds = Number(second);
-    return startMs === null || seconds >= 60 ? null : new Date(startMs + Math.trunc(seconds * 1000 + 1e-6));
+    const millisecondsAfter = minutesBefore * 60_000 + Math.trunc(Number(second) * 1000 + 1e-6);
+    return startMs === null ? null : new Date(startMs + millisecondsAfter);
   };
 }
 
