@@ -58,7 +58,7 @@ function detailsOf(event: ReportEvent): Record<string, unknown> {
 }
 
 /** Rows made in one go: some milliseconds, between which other requests are answered. */
-const rowsInOneGo = 250;
+const rowsInOneGo = 100;
 
 /** The events of a report as rows; the same UID and plane twice counts once. */
 export async function toEventRows(

@@ -3,8 +3,8 @@ import type { ReportEvent } from '../../shared/contract/report-event';
 import { readDoseReport } from '../dicom/read-dose-report';
 import type { ReadingAnswer, ReadingQuestion } from './reading-messages';
 
-/** Events in one message: about 15 ms of work for the one who takes them in. */
-const eventsPerMessage = 250;
+/** Events in one message: some milliseconds of work for the one who takes them in. */
+const eventsPerMessage = 100;
 
 const answer = (message: ReadingAnswer) => parentPort?.postMessage(message);
 

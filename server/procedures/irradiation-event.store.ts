@@ -42,8 +42,8 @@ const columns = {
 
 const names = Object.keys(columns) as (keyof typeof columns)[];
 
-/** Rows in one statement: some ten milliseconds of writing JSON, between which other requests are answered. */
-const rowsPerStatement = 250;
+/** Rows in one statement: some milliseconds of writing JSON, between which other requests are answered. */
+const rowsPerStatement = 100;
 
 /** Adds the events that the procedure does not hold yet; one seen before (same UID and plane) changes nothing. */
 export async function addEvents(db: EntityManager, procedureId: string, events: NewEvent[]): Promise<void> {
