@@ -1,4 +1,4 @@
-import type { EntityManager, FindOptionsSelect } from 'typeorm';
+import type { EntityManager } from 'typeorm';
 import { IrradiationEvent } from './irradiation-event.entity';
 
 export type NewEvent = Omit<IrradiationEvent, 'procedureId'>;
@@ -42,15 +42,16 @@ const columns = {
 
 const names = Object.keys(columns) as (keyof typeof columns)[];
 
+const columnOf = (db: EntityManager, name: (typeof names)[number]) =>
+  `"${db.connection.getMetadata(IrradiationEvent).findColumnWithPropertyName(name)?.databaseName}"`;
+
 /** Rows in one statement: some milliseconds of writing JSON, between which other requests are answered. */
 const rowsPerStatement = 100;
 
 /** Adds the events that the procedure does not hold yet; one seen before (same UID and plane) changes nothing. */
 export async function addEvents(db: EntityManager, procedureId: string, events: NewEvent[]): Promise<void> {
   if (events.length === 0) return;
-  const column = (name: (typeof names)[number]) =>
-    db.connection.getMetadata(IrradiationEvent).findColumnWithPropertyName(name)?.databaseName;
-  const targets = names.map((name) => `"${column(name)}"`).join(', ');
+  const targets = names.map((name) => columnOf(db, name)).join(', ');
   const shape = names.map((name) => `"${name}" ${columns[name]}`).join(', ');
   const statement = `insert into irradiation_event (procedure_id, ${targets})
      select $1, ${names.map((name) => `given."${name}"`).join(', ')}
@@ -74,13 +75,18 @@ export const listEvents = (db: EntityManager, procedureId: string): Promise<Irra
 
 export type EventFigures = Omit<IrradiationEvent, 'reported' | 'details'>;
 
-const figures = Object.fromEntries(
-  ['procedureId', ...names.filter((name) => name !== 'reported' && name !== 'details')].map((name) => [
-    name,
-    true,
-  ]),
-) as FindOptionsSelect<IrradiationEvent>;
+const figures = names.filter((name) => name !== 'reported' && name !== 'details');
 
-/** The events without the file's own strings, which are most of a row: for whoever computes. */
+/**
+ * The events without the file's own strings, which are most of a row: for whoever computes. Plain rows: the library's
+ * entities take as long again, in one go for thousands of events.
+ */
 export const listEventFigures = (db: EntityManager, procedureId: string): Promise<EventFigures[]> =>
-  db.find(IrradiationEvent, { select: figures, where: { procedureId }, order: inTime });
+  db.query(
+    `select procedure_id as "procedureId",
+            ${figures.map((name) => `${columnOf(db, name)} as "${name}"`).join(', ')}
+       from irradiation_event
+      where procedure_id = $1
+      order by started_at, plane, id`,
+    [procedureId],
+  );
