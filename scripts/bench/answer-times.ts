@@ -1,25 +1,28 @@
-import { setTimeout } from 'node:timers/promises';
-import { fetchBody } from './fetch-body';
-
-const pauseMs = 20;
+import { fork } from 'node:child_process';
+import { once } from 'node:events';
 
 /** Fetches an address again and again while a deed is under way; returns how long each answer took. */
 export async function timeAnswersDuring(
-  deed: Promise<unknown>,
+  deed: () => Promise<unknown>,
   address: string,
   cookie: string,
 ): Promise<number[]> {
-  let isOver = false;
-  const over = deed.finally(() => (isOver = true));
-  const timesMs: number[] = [];
-  while (!isOver) {
-    const startedMs = performance.now();
-    await fetchBody(address, cookie);
-    timesMs.push(performance.now() - startedMs);
-    await setTimeout(pauseMs);
+  const poller = fork(new URL('./poll-answers.mjs', import.meta.url), {
+    env: { ...process.env, POLLED_ADDRESS: address, POLLED_COOKIE: cookie },
+  });
+  const ended = once(poller, 'exit').then(() => {
+    throw new Error('Asking for the other page ended before its time.');
+  });
+  try {
+    await Promise.race([once(poller, 'message'), ended]);
+    await Promise.race([deed(), ended]);
+    poller.send('stop');
+    const [timesMs] = (await Promise.race([once(poller, 'message'), ended])) as [number[]];
+    return timesMs;
+  } finally {
+    poller.kill();
+    await ended.catch(() => undefined);
   }
-  await over;
-  return timesMs;
 }
 
 /** The value that so large a share of the values does not exceed. */
