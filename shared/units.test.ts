@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
 import {
+  formatAirKermaRateMgyPerMin,
   convertGyM2ToGyCm2,
   convertGyPerSToMgyPerMin,
   convertMsvToMrem,
@@ -53,6 +54,17 @@ describe('reference air kerma', () => {
     expect(formatReferenceAirKermaMgy(null)).toBe('–');
     expect(formatReferenceAirKermaMgy(0)).toBe('0');
   });
+});
+
+test('a low air-kerma rate keeps two digits, so that ticks of an axis differ', () => {
+  expect([0, 0.5, 2, 9.9, 12.4, 60].map(formatAirKermaRateMgyPerMin)).toEqual([
+    '0',
+    '0.50',
+    '2.0',
+    '9.9',
+    '12',
+    '60',
+  ]);
 });
 
 test('kerma–area product has three significant digits', () => {

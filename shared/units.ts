@@ -82,9 +82,14 @@ export function formatReferenceAirKermaMgy(referenceAirKermaGy: number | null): 
   return kermaMgy > 0 && kermaMgy < 0.5 ? formatSignificant(kermaMgy, 1) : formatInteger(kermaMgy);
 }
 
-/** Air-kerma rate at the reference point in mGy/min, an integer (dose-rate index, strip scale). */
-export const formatAirKermaRateMgyPerMin = (rateMgyPerMin: number | null): string =>
-  formatInteger(rateMgyPerMin);
+/**
+ * Air-kerma rate at the reference point in mGy/min (dose-rate index, strip scale): an integer from 10 on, below it two
+ * significant digits, so that low-rate fluoroscopy is not all zeros and ones.
+ */
+export function formatAirKermaRateMgyPerMin(rateMgyPerMin: number | null): string {
+  const isLow = rateMgyPerMin !== null && rateMgyPerMin > 0 && rateMgyPerMin < 10;
+  return isLow ? formatSignificant(rateMgyPerMin, 2) : formatInteger(rateMgyPerMin);
+}
 
 /** Air kerma–area product in Gy·cm², three significant digits: 0.84 → "0.840", 43 → "43.0", 271 → "271". */
 export const formatKermaAreaProduct = (kermaAreaProductGyCm2: number | null): string =>
