@@ -12,7 +12,7 @@ export class TimeLimit {
   private readonly startedMs = performance.now();
   private readonly usedBefore = process.cpuUsage();
   private readonly looking: NodeJS.Timeout;
-  readonly signal = this.controller.signal;
+  readonly signal: AbortSignal = this.controller.signal;
 
   constructor(private readonly limitMs: number) {
     this.looking = setInterval(() => this.look(), Math.min(limitMs, lookEveryMs)).unref();

@@ -59,7 +59,7 @@ const listColumns = ({
         <ul className="text-sm">
           {compareSummaries(before, after).map((line) => (
             <li key={line.name}>
-              {line.name}: {line.before} → {line.after}
+              {line.name}: {line.after}, before {line.before}
             </li>
           ))}
         </ul>
@@ -84,7 +84,7 @@ function Changes({ preview: { changedCount, changes, reason } }: { preview: Read
       <ul className="ml-4 list-disc text-ink-2">
         {changes.map(({ where, field, before, after }) => (
           <li key={`${where} ${field}`} className="wrap-anywhere">
-            {where}, {nameField(field)}: {before ?? MISSING} → {after ?? MISSING}
+            {where}, {nameField(field)}: {after ?? MISSING}, before {before ?? MISSING}
           </li>
         ))}
       </ul>

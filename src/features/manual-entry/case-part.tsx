@@ -2,6 +2,7 @@ import { useController, useFormContext, useWatch } from 'react-hook-form';
 import type { EquipmentChoice } from '../../../shared/contract/equipment';
 import { ComboboxField } from '../../ui/combobox-field';
 import { FieldGroup } from '../../ui/field-group';
+import { RadioGroup } from '../../ui/radio-group';
 import { SelectField, type Choice } from '../../ui/select-field';
 import { TextField } from '../../ui/text-field';
 import type { ComboboxChoice } from '../../ui/use-combobox';
@@ -21,6 +22,7 @@ export function CasePart({ choices, isNew }: CasePartProps) {
   const { errors } = formState;
   const equipmentId = useWatch({ control, name: 'equipmentId' });
   const { field: type } = useController({ control, name: 'procedureTypeId' });
+  const { field: planes } = useController({ control, name: 'hasTwoPlanes' });
   const chooseMachine = (id: string) => {
     const machine = choices.machines.find((one) => one.id === id);
     if (machine) setValue('hasTwoPlanes', machine.isBiplane, { shouldDirty: true });
@@ -67,6 +69,20 @@ export function CasePart({ choices, isNew }: CasePartProps) {
           error={errors.procedureTypeId?.message}
         />
       )}
+      <RadioGroup
+        legend="Planes of the machine"
+        isInline
+        value={planes.value ? 'two' : 'one'}
+        choices={[
+          { value: 'one', label: 'One plane' },
+          { value: 'two', label: 'Planes A and B' },
+        ]}
+        radio={{
+          name: planes.name,
+          onBlur: planes.onBlur,
+          onChange: ({ target }) => planes.onChange(target.value === 'two'),
+        }}
+      />
     </FieldGroup>
   );
 }

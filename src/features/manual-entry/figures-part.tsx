@@ -1,10 +1,9 @@
 import { useId } from 'react';
-import { get, useController, useFormContext, useFormState, useWatch } from 'react-hook-form';
+import { get, useFormContext, useFormState, useWatch } from 'react-hook-form';
 import { typedQuantityNames, type TypedQuantityName } from '../../../shared/contract/manual-entry';
 import { Field, FieldError } from '../../ui/field';
 import { FieldGroup } from '../../ui/field-group';
 import { QuantitySign } from '../../ui/quantity-sign';
-import { RadioGroup } from '../../ui/radio-group';
 import { describeTyped, quantityNames } from './conversion-words';
 import type { EntryValues } from './entry-values';
 import { FigureInputs } from './figure-inputs';
@@ -47,8 +46,10 @@ function FigureField({ quantity, index }: { quantity: TypedQuantityName; index: 
   );
 }
 
-const PlaneFigures = ({ index, legend }: { index: 0 | 1; legend: string }) => (
-  <FieldGroup legend={legend}>
+type PlaneFiguresProps = { index: 0 | 1; legend: string; note?: string };
+
+const PlaneFigures = ({ index, legend, note }: PlaneFiguresProps) => (
+  <FieldGroup legend={legend} note={note}>
     {typedQuantityNames.map((quantity) => (
       <FigureField key={quantity} quantity={quantity} index={index} />
     ))}
@@ -58,34 +59,18 @@ const PlaneFigures = ({ index, legend }: { index: 0 | 1; legend: string }) => (
 /** The figures with the unit chosen beside each, and what they are in the units of the lists. */
 export function FiguresPart() {
   const { control, formState } = useFormContext<EntryValues>();
-  const { field } = useController({ control, name: 'hasTwoPlanes' });
+  const hasTwoPlanes = useWatch({ control, name: 'hasTwoPlanes' });
   const none = formState.errors.root?.['figures'];
   const errorId = useId();
   return (
     <>
-      <div className="flex flex-col gap-2">
-        <RadioGroup
-          legend="X-ray planes of the machine"
-          isInline
-          value={field.value ? 'two' : 'one'}
-          choices={[
-            { value: 'one', label: 'One plane' },
-            { value: 'two', label: 'Planes A and B' },
-          ]}
-          radio={{
-            name: field.name,
-            onBlur: field.onBlur,
-            onChange: ({ target }) => field.onChange(target.value === 'two'),
-          }}
-        />
-        <p className="text-sm text-ink-2">
-          Type what the screen shows, in its own units. A field left empty stays unknown; it never counts as
-          zero.
-        </p>
-        {none && <FieldError id={errorId}>{none.message}</FieldError>}
-      </div>
-      <PlaneFigures index={0} legend={field.value ? 'Figures of plane A' : 'What the screen showed'} />
-      {field.value && <PlaneFigures index={1} legend="Figures of plane B" />}
+      <PlaneFigures
+        index={0}
+        legend={hasTwoPlanes ? 'What the screen showed for plane A' : 'What the screen showed'}
+        note="Type it in the screen’s own units. A field left empty stays unknown; it never counts as zero."
+      />
+      {none && <FieldError id={errorId}>{none.message}</FieldError>}
+      {hasTwoPlanes && <PlaneFigures index={1} legend="What the screen showed for plane B" />}
     </>
   );
 }
