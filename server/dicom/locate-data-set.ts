@@ -50,12 +50,14 @@ function findMetaHeader(bytes: Buffer): number | null {
 }
 
 function inflate(bytes: Buffer): Buffer {
+  const sensibleBytes = Math.max(limits.inflatedBytesAtLeast, limits.inflationRatio * bytes.length);
+  const maxOutputLength = Math.min(limits.inflatedBytes, sensibleBytes);
   try {
-    return inflateRawSync(bytes, { maxOutputLength: limits.inflatedBytes });
+    return inflateRawSync(bytes, { maxOutputLength });
   } catch (error) {
     const code = error instanceof Error && 'code' in error ? String(error.code) : '';
     if (code === 'ERR_BUFFER_TOO_LARGE') {
-      throw new ReadFailure('limit-inflated-size', `more than ${limits.inflatedBytes} bytes when inflated`);
+      throw new ReadFailure('limit-inflated-size', `more than ${maxOutputLength} bytes when inflated`);
     }
     if (code === 'Z_BUF_ERROR') throw new ReadFailure('truncated', 'the deflated data set breaks off');
     throw new ReadFailure('malformed', 'the deflated data set cannot be inflated');
