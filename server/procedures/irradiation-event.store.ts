@@ -48,22 +48,38 @@ const columnOf = (db: EntityManager, name: (typeof names)[number]) =>
 /** Rows in one statement: some milliseconds of writing JSON, between which other requests are answered. */
 const rowsPerStatement = 100;
 
-/** Adds the events that the procedure does not hold yet; one seen before (same UID and plane) changes nothing. */
+/** A cell as PostgreSQL reads it from text: lists and documents stand in one text each. */
+const cellOf = (value: unknown, type: string): unknown => {
+  if (value === null || value === undefined) return null;
+  if (type === 'jsonb') return JSON.stringify(value);
+  if (value instanceof Date) return value.toISOString();
+  if (type.endsWith('[]')) return `{${(value as number[]).join(',')}}`;
+  return value;
+};
+
+/**
+ * Adds the events that the procedure does not hold yet; one seen before (same UID and plane) changes nothing. Column by
+ * column: the server takes ten times as long over rows of JSON.
+ */
 export async function addEvents(db: EntityManager, procedureId: string, events: NewEvent[]): Promise<void> {
   if (events.length === 0) return;
   const targets = names.map((name) => columnOf(db, name)).join(', ');
-  const shape = names.map((name) => `"${name}" ${columns[name]}`).join(', ');
+  const isWrapped = (type: string) => type === 'jsonb' || type.endsWith('[]');
+  const lists = names.map(
+    (name, index) => `$${index + 2}::${isWrapped(columns[name]) ? 'text' : columns[name]}[]`,
+  );
   const statement = `insert into irradiation_event (procedure_id, ${targets})
-     select $1, ${names.map((name) => `given."${name}"`).join(', ')}
-       from json_to_recordset($2::json) as given(${shape})
+     select $1, ${names.map((name) => `given."${name}"::${columns[name]}`).join(', ')}
+       from unnest(${lists.join(', ')}) as given(${names.map((name) => `"${name}"`).join(', ')})
       where not exists (select 1 from irradiation_event known
                          where known.procedure_id = $1 and known.event_key = given."eventKey")
      on conflict (procedure_id, event_key, started_at) do nothing`;
   for (let start = 0; start < events.length; start += rowsPerStatement) {
-    const rows = events
-      .slice(start, start + rowsPerStatement)
-      .map((event) => Object.fromEntries(names.map((name) => [name, event[name]])));
-    await db.query(statement, [procedureId, JSON.stringify(rows)]);
+    const rows = events.slice(start, start + rowsPerStatement);
+    await db.query(statement, [
+      procedureId,
+      ...names.map((name) => rows.map((event) => cellOf(event[name], columns[name]))),
+    ]);
   }
 }
 
