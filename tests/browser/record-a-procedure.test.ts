@@ -27,7 +27,7 @@ test('a technologist drops a report, completes the record and sees the estimate'
   await page.getByLabel('Choose files').setInputFiles(['samples/01-single-plane.dcm', 'samples/43-text.txt']);
   const outcomes = page.getByRole('list', { name: 'Files and their outcomes' });
   await outcomes.getByText('stored').waitFor();
-  await outcomes.getByText('This is not a DICOM file', { exact: false }).waitFor();
+  await outcomes.getByText('This is a text, not a DICOM file', { exact: false }).waitFor();
   expect(await page.getByRole('status').filter({ hasText: 'read' }).first().textContent()).toBe(
     '2 read: 1 stored, 1 refused.',
   );
