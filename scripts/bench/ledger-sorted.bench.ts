@@ -1,4 +1,4 @@
-import { procedureSorts } from '../../shared/contract/procedure';
+import { procedureSorts } from '../../shared/contract/procedure-row';
 import type { Bench } from './bench';
 import { fetchBody } from './fetch-body';
 import { formatMs, timeMedianMs } from './measure';

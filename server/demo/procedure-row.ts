@@ -1,4 +1,4 @@
-import type { MissingPart } from '../../shared/contract/record';
+import type { MissingPart } from '../../shared/contract/procedure-row';
 import { plainChecking } from '../data-checks/check-data';
 import type { DoseReport } from '../dose-reports/dose-report.entity';
 import type { CalibrationFactor } from '../equipment/calibration-factor.entity';

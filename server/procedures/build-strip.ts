@@ -1,4 +1,4 @@
-import type { Strip } from '../../shared/contract/procedure';
+import type { Strip } from '../../shared/contract/procedure-row';
 import { airKermaRate } from '../../shared/dosimetry/air-kerma-rate';
 import type { SummaryEvent } from './summary-input';
 

@@ -1,8 +1,5 @@
-import type {
-  MissingPart,
-  Presence as PresenceContract,
-  ProcedureRecord,
-} from '../../shared/contract/record';
+import type { MissingPart } from '../../shared/contract/procedure-row';
+import type { Presence as PresenceContract, ProcedureRecord } from '../../shared/contract/record';
 import type { Db } from '../db/db';
 import { listChoices } from '../people/person.store';
 import { listPresences } from './presence.store';

@@ -1,5 +1,5 @@
 import type { SettledFigures } from '../../shared/contract/data-check';
-import type { AttentionLevel } from '../../shared/contract/procedure';
+import type { AttentionLevel } from '../../shared/contract/procedure-row';
 import { isDoubtful, isOpen, type StoredCheck } from '../data-checks/check-data';
 import type { SummaryInput } from './summary-input';
 import type { Together } from './total-together';

@@ -1,4 +1,4 @@
-import type { ProcedureFilter, ProcedurePage, ProcedureRow } from '../../shared/contract/procedure';
+import type { ProcedureFilter, ProcedurePage, ProcedureRow } from '../../shared/contract/procedure-row';
 import { can, scopeOf } from '../../shared/permissions';
 import { noteAudit } from '../audit/audit.store';
 import type { Db } from '../db/db';

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import type { Patient } from '../../shared/contract/procedure';
+import type { Patient } from '../../shared/contract/procedure-row';
 import type { EntityManager } from 'typeorm';
 import { newId } from '../kernel/new-id';
 import { PatientIdentity } from './patient-identity.entity';

@@ -1,5 +1,5 @@
 import type { EntityManager } from 'typeorm';
-import type { ProcedureFilter, ProcedureRow } from '../../shared/contract/procedure';
+import type { ProcedureFilter, ProcedureRow } from '../../shared/contract/procedure-row';
 import type { Cursor } from '../kernel/cursor';
 
 export type ListedProcedure = Omit<ProcedureRow, 'patient'> & {

@@ -1,12 +1,7 @@
 import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm';
 import type { SettledFigures } from '../../shared/contract/data-check';
-import type {
-  AttentionLevel,
-  Procedure as ProcedureContract,
-  ProcedureRow,
-  Strip,
-} from '../../shared/contract/procedure';
-import type { MissingPart } from '../../shared/contract/record';
+import type { AttentionLevel, MissingPart, ProcedureRow, Strip } from '../../shared/contract/procedure-row';
+import type { Procedure as ProcedureContract } from '../../shared/contract/procedure';
 import {
   count,
   day,

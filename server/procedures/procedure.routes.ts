@@ -5,10 +5,9 @@ import {
   patientSchema,
   procedureCountSchema,
   procedureFilterSchema,
-  procedureMarkSchema,
   procedurePageSchema,
-  procedureSchema,
-} from '../../shared/contract/procedure';
+} from '../../shared/contract/procedure-row';
+import { procedureMarkSchema, procedureSchema } from '../../shared/contract/procedure';
 import { recordInputSchema, suggestedTeamSchema } from '../../shared/contract/record';
 import { staffExposuresSchema } from '../../shared/contract/staff-exposure';
 import { route, type Route } from '../http/route';

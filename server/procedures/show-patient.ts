@@ -1,4 +1,4 @@
-import type { Patient } from '../../shared/contract/procedure';
+import type { Patient } from '../../shared/contract/procedure-row';
 import { noteAudit } from '../audit/audit.store';
 import type { Db } from '../db/db';
 import type { Actor } from '../kernel/actor';

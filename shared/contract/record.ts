@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { idSchema, namedSchema, optionalText, versionSchema } from './common';
+import { missingParts, type MissingPart } from './procedure-row';
 
 /** The record of a procedure: what no file says. Type, operator, who was in the room, where, wearing what. */
 
@@ -123,9 +124,6 @@ export const recordInputSchema = z.object({
   reason: optionalText(500),
 });
 export type RecordInput = z.input<typeof recordInputSchema>;
-
-export const missingParts = ['procedure-type', 'operator', 'person', 'place', 'garment'] as const;
-export type MissingPart = (typeof missingParts)[number];
 
 export const missingPartNames: Record<MissingPart, string> = {
   'procedure-type': 'procedure type',

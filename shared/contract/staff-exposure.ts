@@ -2,7 +2,7 @@ import { z } from 'zod';
 import { estimatedSchema, idSchema, localDateTimeSchema, namedSchema, remarkSchema } from './common';
 import { duties } from './record';
 import { jobs } from './person';
-import { periods } from './procedure';
+import { periods } from './procedure-row';
 
 const figure = estimatedSchema.nullable();
 

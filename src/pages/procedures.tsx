@@ -1,6 +1,6 @@
 import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useDeferredValue, type ReactNode } from 'react';
-import { procedureFilterSchema } from '../../shared/contract/procedure';
+import { procedureFilterSchema } from '../../shared/contract/procedure-row';
 import { can } from '../../shared/permissions';
 import { StripLegend } from '../charts/strip-legend';
 import { FindBox } from '../features/ledger/find-box';

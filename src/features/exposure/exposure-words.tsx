@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import { dutyNames, duties } from '../../../shared/contract/record';
-import { periodNames, periods } from '../../../shared/contract/procedure';
+import { periodNames, periods } from '../../../shared/contract/procedure-row';
 import {
   exposureQuantities,
   type ExposureDuty,

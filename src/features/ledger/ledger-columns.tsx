@@ -1,4 +1,4 @@
-import type { ProcedureRow } from '../../../shared/contract/procedure';
+import type { ProcedureRow } from '../../../shared/contract/procedure-row';
 import {
   formatFluoroscopyTime,
   formatKermaAreaProduct,

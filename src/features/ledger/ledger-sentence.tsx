@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/contract/procedure';
+import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/contract/procedure-row';
 import { Sentence } from '../../ui/sentence';
 import { SentenceSelect } from '../../ui/sentence-select';
 import type { Choice } from '../../ui/select-field';

@@ -1,4 +1,4 @@
-import type { ProcedureRow, Strip } from '../../../shared/contract/procedure';
+import type { ProcedureRow, Strip } from '../../../shared/contract/procedure-row';
 import { findShadeStep } from '../../charts/shade-step';
 import { StripChart } from '../../charts/strip-chart';
 import type { StripBlock } from '../../charts/strip.types';

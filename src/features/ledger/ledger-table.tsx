@@ -1,6 +1,6 @@
 import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
-import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/contract/procedure';
+import type { ProcedureFilter, ProcedureFilterInput } from '../../../shared/contract/procedure-row';
 import { paths } from '../../paths';
 import { DataTable } from '../../ui/data-table';
 import { MoreButton } from '../../ui/more-button';

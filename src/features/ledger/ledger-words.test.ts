@@ -1,5 +1,5 @@
 import { expect, test } from 'vitest';
-import { procedureSorts } from '../../../shared/contract/procedure';
+import { procedureSorts } from '../../../shared/contract/procedure-row';
 import {
   describeIncomplete,
   describeRecordState,

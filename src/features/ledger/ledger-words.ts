@@ -3,7 +3,7 @@ import {
   periods,
   type ProcedureFilter,
   type ProcedureRow,
-} from '../../../shared/contract/procedure';
+} from '../../../shared/contract/procedure-row';
 import type { Job, PersonChoice } from '../../../shared/contract/person';
 import { missingPartNames } from '../../../shared/contract/record';
 import { formatInteger } from '../../../shared/units';

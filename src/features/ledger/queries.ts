@@ -3,7 +3,7 @@ import {
   procedureCountSchema,
   procedurePageSchema,
   type ProcedureFilter,
-} from '../../../shared/contract/procedure';
+} from '../../../shared/contract/procedure-row';
 import { request } from '../../lib/api';
 import { withQuery } from '../../lib/url-query';
 

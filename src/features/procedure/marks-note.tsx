@@ -1,5 +1,6 @@
 import { useState } from 'react';
-import { procedureClasses, type Procedure } from '../../../shared/contract/procedure';
+import { procedureClasses } from '../../../shared/contract/procedure-row';
+import { type Procedure } from '../../../shared/contract/procedure';
 import { Button } from '../../ui/button';
 import { DefinitionList, DefinitionRow } from '../../ui/definition-row';
 import { MarginNote } from '../../ui/margin-note';

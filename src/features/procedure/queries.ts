@@ -1,6 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 import { irradiationEventsSchema } from '../../../shared/contract/irradiation-event';
-import { patientSchema, procedureSchema } from '../../../shared/contract/procedure';
+import { patientSchema } from '../../../shared/contract/procedure-row';
+import { procedureSchema } from '../../../shared/contract/procedure';
 import { suggestedTeamSchema } from '../../../shared/contract/record';
 import { staffExposuresSchema } from '../../../shared/contract/staff-exposure';
 import { request } from '../../lib/api';
