@@ -2,8 +2,7 @@ import { z } from 'zod';
 import { idSchema, namedSchema, optionalText, versionSchema } from './common';
 import { missingParts, type MissingPart } from './procedure-row';
 
-/** The record of a procedure: what no file says. Type, operator, who was in the room, where, wearing what. */
-
+/** What somebody does in the room. The record says who did, where they stood and what they wore: no file tells it. */
 export const duties = [
   'primary-operator',
   'second-operator',

@@ -111,5 +111,3 @@ export function createUploadStore(send: Send, onSettled: () => void, pause = wai
     },
   };
 }
-
-export type UploadStore = ReturnType<typeof createUploadStore>;
